@@ -1,0 +1,59 @@
+import { z } from 'zod'
+import { RowMeta } from '../http/common'
+import { Diagram, Role } from '../court/diagram'
+import { RulePackKey } from '../court/rulePacks'
+import { FAMILIES, SKILLS, TRAITS, valuesOf } from '../vocabulary'
+import { SkillLevel } from '../squad/schemas'
+
+export const CounterRole = z.object({
+  role: Role,
+  /** What the role is, e.g. "thrower" or "middle". */
+  title: z.string().max(40),
+  needs: z.array(z.object({ skill: z.enum(valuesOf(SKILLS)), level: SkillLevel })).max(3),
+  /** What this player does, in order, to the player ("Screen for 4, then come to the ball."). At most four. */
+  jobs: z.array(z.string().max(80)).max(4),
+  /** The one line for this role when the counter is the change-up. */
+  changeUpLine: z.string().max(80),
+  /** Index of the step in which this role decides. */
+  keyStep: z.number().int().min(0).max(11),
+})
+export type CounterRole = z.infer<typeof CounterRole>
+
+export const CounterBody = z.object({
+  name: z.string().trim().min(1).max(40),
+  family: z.enum(valuesOf(FAMILIES)),
+  /** Where they stand, in a few words. */
+  alignment: z.string().max(60),
+  call: z.string().max(20),
+  /** Shown by hand; never printed on a sheet. */
+  signal: z.string().max(40),
+  traits: z.array(z.enum(valuesOf(TRAITS))),
+  diagram: Diagram,
+  roles: z.array(CounterRole).length(5),
+  /** Passing options in order. */
+  looks: z.array(z.string().max(60)).min(1).max(4),
+  teachingPoints: z.array(z.string().max(90)).max(6),
+  cautions: z.array(z.string().max(120)).max(4),
+  /** Said to players, e.g. "Don’t catch in the corner." */
+  donts: z.array(z.string().max(60)).max(3),
+  rulePacks: z.array(RulePackKey).min(1),
+  /** Live repetitions in practice to date. */
+  liveReps: z.number().int().min(0).max(9999),
+  /** Actions in it that the squad has not yet run; breaks ties. */
+  /** Practice trips against a press, and how many got through. */
+  practice: z.object({ k: z.number().int().min(0), n: z.number().int().min(0) }).default({ k: 0, n: 0 }),
+  newActions: z.number().int().min(0).max(20),
+})
+export type CounterBody = z.infer<typeof CounterBody>
+
+/** Our own record with it: game trips against a shape, and practice trips. */
+export const CounterRecord = z.object({
+  shape: z.string(),
+  k: z.number().int(),
+  n: z.number().int(),
+})
+
+export const CounterRow = RowMeta.extend({ ...CounterBody.shape, record: z.array(CounterRecord) })
+export type CounterRow = z.infer<typeof CounterRow>
+export const CounterList = z.object({ rows: z.array(CounterRow), total: z.number().int() })
+export type CounterList = z.infer<typeof CounterList>

@@ -1,0 +1,30 @@
+import { z } from 'zod'
+import { Id, Instant, RowMeta } from '../http/common'
+import { RulePackKey } from '../court/rulePacks'
+import { STATIONS, valuesOf } from '../vocabulary'
+
+export const GameBody = z.object({
+  opponentId: Id,
+  tipOff: Instant,
+  place: z.enum(['home', 'away', 'neutral']),
+  rulePack: RulePackKey,
+  /** When the head coach must have picked. */
+  chooseBy: Instant.nullable().default(null),
+})
+export type GameBody = z.infer<typeof GameBody>
+
+export const GameRow = RowMeta.extend({
+  ...GameBody.shape,
+  opponentName: z.string(),
+  /** Where the work stands: worked out from what is there, never typed in. */
+  station: z.enum(valuesOf(STATIONS)),
+  counts: z.object({ possessions: z.number().int(), scoutedGames: z.number().int() }),
+  /** Newest plan version of this game, signed or not. */
+  plan: z
+    .object({ id: z.uuid(), number: z.number().int(), signedAt: z.iso.datetime().nullable() })
+    .nullable(),
+  headCoach: z.object({ name: z.string(), initials: z.string() }).nullable(),
+})
+export type GameRow = z.infer<typeof GameRow>
+export const GameList = z.object({ rows: z.array(GameRow), total: z.number().int() })
+export type GameList = z.infer<typeof GameList>

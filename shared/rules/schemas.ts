@@ -1,0 +1,79 @@
+import { z } from 'zod'
+import { RowMeta } from '../http/common'
+import { LIMITS } from '../limits'
+import { GRADES, STRENGTHS, TRAITS, valuesOf } from '../vocabulary'
+
+/** Facts that are not habits: our squad, the rule set, the counter itself. */
+export const FACTS = [
+  /** Pressed rows counted for the opponent. */
+  'pressedRows',
+  /** Available players who handle under pressure (handle 2 or more). */
+  'handlers',
+  /** Available players with a long arm (long-arm 2 or more). */
+  'longArms',
+  /** Available middle players (decide 2 or more). */
+  'middlePlayers',
+  /** Backcourt count, seconds. */
+  'backcourtCount',
+  /** Available players in all. */
+  'available',
+] as const
+export const FactName = z.enum(FACTS)
+export type FactName = z.infer<typeof FactName>
+
+/** A habit's adjusted rate against a threshold, from a grade up. `seen` is one sighting: k of 1 or more. */
+export const HabitCondition = z.object({
+  habit: z.string().max(60),
+  is: z.enum(['above', 'below', 'seen']),
+  threshold: z.number().min(0).max(1).default(0.5),
+  grade: z.enum(valuesOf(GRADES)).default('lean'),
+})
+export const FactCondition = z.object({
+  fact: FactName,
+  is: z.enum(['equal', 'at-least', 'at-most']),
+  value: z.number(),
+})
+export type HabitCondition = z.infer<typeof HabitCondition>
+export type FactCondition = z.infer<typeof FactCondition>
+export type Condition = HabitCondition | FactCondition | { all: Condition[] } | { any: Condition[] }
+export const Condition: z.ZodType<Condition> = z.lazy(() =>
+  z.union([
+    HabitCondition,
+    FactCondition,
+    z.object({ all: z.array(Condition).min(1).max(8) }),
+    z.object({ any: z.array(Condition).min(1).max(8) }),
+  ]),
+)
+
+export const Demand = z.discriminatedUnion('effect', [
+  z.object({
+    effect: z.enum(['want', 'avoid']),
+    trait: z.enum(valuesOf(TRAITS)),
+    strength: z.enum(valuesOf(STRENGTHS)),
+  }),
+  z.object({ effect: z.literal('ban'), trait: z.enum(valuesOf(TRAITS)) }),
+  z.object({ effect: z.literal('warn'), text: z.string().max(LIMITS.reasonSentence) }),
+])
+export type Demand = z.infer<typeof Demand>
+
+export const RuleBody = z.object({
+  /** DOMAIN.md section 4's number; null for a rule of the team's own. */
+  number: z.number().int().min(1).max(99).nullable(),
+  /** What the rule is about, e.g. "2-2-1: fill the middle". */
+  title: z.string().min(1).max(60),
+  when: Condition,
+  then: z.array(Demand).min(1).max(5),
+  because: z.string().min(1).max(LIMITS.reasonSentence),
+  /** Contra-facts: while they hold the rule stays silent and says so. */
+  unless: Condition.nullable().default(null),
+  unlessBecause: z.string().max(LIMITS.reasonSentence).default(''),
+  /** Acts on one sighting; credence 1. */
+  starred: z.boolean().default(false),
+  on: z.boolean().default(true),
+})
+export type RuleBody = z.infer<typeof RuleBody>
+
+export const RuleRow = RowMeta.extend(RuleBody.shape)
+export type RuleRow = z.infer<typeof RuleRow>
+export const RuleList = z.object({ rows: z.array(RuleRow), total: z.number().int() })
+export type RuleList = z.infer<typeof RuleList>

@@ -1,0 +1,71 @@
+import { fileURLToPath, URL } from 'node:url'
+import { readdirSync } from 'node:fs'
+import vue from '@vitejs/plugin-vue'
+import Components from 'unplugin-vue-components/vite'
+import { ElementPlusResolver } from 'unplugin-vue-components/resolvers'
+import { defineConfig, type TestProjectConfiguration } from 'vitest/config'
+import { apiInDev } from './server/tooling/apiInDev.ts'
+
+const path = (relative: string) => fileURLToPath(new URL(relative, import.meta.url))
+
+/** Element Plus loads each component's CSS on demand; Vite must know them up front or dev reloads on every first use. */
+const elementPlusStyles = () =>
+  readdirSync(path('./node_modules/element-plus/es/components'), { withFileTypes: true })
+    .filter((entry) => entry.isDirectory())
+    .map((entry) => `element-plus/es/components/${entry.name}/style/css`)
+
+export default defineConfig(({ command, isSsrBuild, mode }) => {
+  const testing = mode === 'test'
+  return {
+    resolve: {
+      alias: { '@shared': path('./shared'), '@server': path('./server'), '@': path('./src') },
+    },
+    plugins: [
+      vue(),
+      Components({
+        dts: false,
+        dirs: [],
+        resolvers: [ElementPlusResolver({ importStyle: testing ? false : 'css' })],
+      }),
+      ...(command === 'serve' && !testing ? [apiInDev()] : []),
+    ],
+    optimizeDeps: command === 'serve' && !testing ? { include: elementPlusStyles() } : {},
+    publicDir: isSsrBuild ? false : 'public',
+    build: isSsrBuild
+      ? {
+          ssr: 'server/main.ts',
+          outDir: 'dist/server',
+          target: 'node20',
+          minify: false,
+          sourcemap: true,
+          emptyOutDir: true,
+        }
+      : { outDir: 'dist/client', emptyOutDir: true },
+    test: {
+      projects: [
+        node('unit', ['tests/shared/**/*.test.ts', 'tests/server/**/*.test.ts']),
+        node('reference', ['tests/reference/**/*.test.ts']),
+        node('api', ['tests/api/**/*.test.ts'], 30_000),
+        node('e2e', ['tests/e2e/**/*.test.ts'], 120_000),
+        {
+          extends: true,
+          test: { name: 'client', environment: 'jsdom', include: ['tests/src/**/*.test.ts'] },
+        },
+      ],
+    },
+  }
+})
+
+function node(name: string, include: string[], testTimeout = 10_000): TestProjectConfiguration {
+  return {
+    extends: true,
+    test: {
+      name,
+      include,
+      environment: 'node',
+      setupFiles: ['tests/support/setup.ts'],
+      testTimeout,
+      hookTimeout: testTimeout,
+    },
+  }
+}
