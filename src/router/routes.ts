@@ -1,0 +1,127 @@
+import type { RouteRecordRaw } from 'vue-router'
+import type { Action } from '@shared/session/schemas'
+
+declare module 'vue-router' {
+  interface RouteMeta {
+    /** First words of the window's title until the page knows better. */
+    title?: string
+    /** Needs nobody signed in. */
+    open?: boolean
+    /** The word of the main nav that this page belongs to. */
+    section?: 'opponents' | 'library' | 'squad' | 'sheets'
+    /** `match`: the page fills the bar's middle itself; `none`: the page has no bar of ours at all. */
+    bar?: 'match' | 'none'
+    /** Without this right the page shows who can instead. */
+    needs?: Action
+  }
+}
+
+/** Pages of one team, below /t/:team. Every view is fetched when it is first opened. */
+const teamPages: RouteRecordRaw[] = [
+  { path: '', name: 'team-home', component: () => import('@/views/shell/NotFoundView.vue') },
+  {
+    path: 'opponents',
+    name: 'opponents',
+    component: () => import('@/views/opponents/OpponentsView.vue'),
+    meta: { title: 'Opponents', section: 'opponents', needs: 'opponent:read' },
+  },
+  {
+    path: 'opponents/:opponent',
+    name: 'opponent',
+    redirect: (to) => ({ name: 'read', params: to.params }),
+  },
+  {
+    path: 'opponents/:opponent/scouted-games',
+    name: 'scouted-games',
+    component: () => import('@/views/scoutedGames/ScoutedGamesView.vue'),
+    props: true,
+    meta: { title: 'Scout', section: 'opponents', needs: 'scouting:read' },
+  },
+  {
+    path: 'scouted-games/:game/log',
+    name: 'log',
+    component: () => import('@/views/possessions/LogView.vue'),
+    props: true,
+    meta: { title: 'Log', section: 'opponents', bar: 'match', needs: 'scouting:write' },
+  },
+  {
+    path: 'opponents/:opponent/read',
+    name: 'read',
+    component: () => import('@/views/tendencies/ReadView.vue'),
+    props: true,
+    meta: { title: 'Read', section: 'opponents', needs: 'scouting:read' },
+  },
+  {
+    path: 'games/:game/choose',
+    name: 'choose',
+    component: () => import('@/views/choices/ChooseView.vue'),
+    props: true,
+    meta: { title: 'Choose', section: 'opponents', needs: 'plan:read' },
+  },
+  {
+    path: 'library',
+    name: 'library',
+    component: () => import('@/views/counters/LibraryView.vue'),
+    meta: { title: 'Library', section: 'library', needs: 'counter:read' },
+  },
+  {
+    path: 'library/:counter',
+    name: 'counter',
+    component: () => import('@/views/counters/CounterView.vue'),
+    props: true,
+    meta: { title: 'Counter', section: 'library', needs: 'counter:read' },
+  },
+  {
+    path: 'squad',
+    name: 'squad',
+    component: () => import('@/views/squad/SquadView.vue'),
+    meta: { title: 'Squad', section: 'squad', needs: 'squad:read' },
+  },
+  {
+    path: 'sheets',
+    name: 'sheets',
+    component: () => import('@/views/sheets/SheetListView.vue'),
+    meta: { title: 'Sheets', section: 'sheets', needs: 'sheet:read' },
+  },
+  {
+    path: 'sheets/:sheet',
+    name: 'sheet',
+    component: () => import('@/views/sheets/SheetView.vue'),
+    props: true,
+    meta: { title: 'Sheet', section: 'sheets', bar: 'none', needs: 'sheet:read' },
+  },
+]
+
+export const routes: RouteRecordRaw[] = [
+  // The two homes never show themselves: the router sends them on by teams and role.
+  { path: '/', name: 'home', component: () => import('@/views/shell/NotFoundView.vue') },
+  {
+    path: '/sign-in',
+    name: 'sign-in',
+    component: () => import('@/views/session/SignInView.vue'),
+    meta: { title: 'Sign in', open: true },
+  },
+  {
+    path: '/teams',
+    name: 'teams',
+    component: () => import('@/views/session/TeamChooserView.vue'),
+    meta: { title: 'Your teams' },
+  },
+  {
+    path: '/t/:team',
+    component: () => import('@/views/shell/TeamShell.vue'),
+    children: teamPages,
+  },
+  {
+    path: '/no-signal',
+    name: 'no-signal',
+    component: () => import('@/views/shell/NoSignalView.vue'),
+    meta: { title: 'No signal', open: true },
+  },
+  {
+    path: '/:path(.*)*',
+    name: 'not-found',
+    component: () => import('@/views/shell/NotFoundView.vue'),
+    meta: { title: 'Not here', open: true },
+  },
+]
