@@ -48,6 +48,8 @@ export const FrozenPlan = z.object({
         k: z.number().int(),
         n: z.number().int(),
         thin: z.boolean(),
+        /** The line below that speaks of this zone; several zones may share one. */
+        letter: z.enum(['A', 'B', 'C']).nullable(),
       }),
     ),
     room: z.enum(['middle', 'sideline', 'long', 'pass-back', 'far-side']).nullable(),

@@ -69,6 +69,10 @@ export const TendencyRead = z.object({
   /** Always over the other filters, so that the filter bar shows what each choice would hold. */
   situations: z.array(Situation),
   tendencies: z.array(Tendency),
+  /** Their median pick-up, k of n at it; for the front on the court. Null when none was logged. */
+  pickup: z
+    .object({ value: z.enum(valuesOf(PICKUPS)), k: z.number().int(), n: z.number().int(), thin: z.boolean() })
+    .nullable(),
   /** Counts per trap spot and side, all traps of a possession; for the court. */
   spots: z.array(
     z.object({
