@@ -58,6 +58,8 @@ export interface GroupNode {
   id: string
   /** What it is, for a screen reader; absent where the drawing's own description says it. */
   label?: string
+  /** Metres: the point that stands for the group when it is chosen by key rather than by a tap. */
+  at?: { readonly x: number; readonly y: number }
   nodes: SceneNode[]
 }
 

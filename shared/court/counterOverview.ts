@@ -1,0 +1,168 @@
+import type { Role } from '../vocabulary'
+import type { Drawing } from './counterStep'
+import { bent, distance, pointAt, lengthOf, straight, through, trimmed, type Curve } from './curve'
+import type { Diagram, Move } from './diagram'
+import { startOfDiagram, walkDiagram, type WalkedMove } from './diagramWalk'
+import { toMetres, type InMetres } from './frame'
+import { movement } from './movement'
+import type { GroupNode, SceneNode } from './scene'
+import { ballAt, ourToken, theirToken } from './tokens'
+
+/** Metres: a walk shorter than this before a catch is not drawn; the token where it catches says enough. */
+const SHORT_WALK = 2.2
+
+/** Somebody on the ball's way: who, and where the ball is caught. */
+interface Catch {
+  role: Role
+  at: InMetres
+}
+
+/** One walk of a player without the ball, from where it is last drawn. */
+interface Walk {
+  role: Role
+  from: InMetres
+  legs: { to: InMetres; bend: number; screen: boolean }[]
+  /** Ends where the ball is caught, so at a token. */
+  caught: boolean
+}
+
+/**
+ * The whole way in one drawing: where each of ours starts, the ball's way with whoever carries it solid at
+ * the place of the catch, and the walk of everybody else as one line.
+ */
+export function counterOverview(diagram: Diagram, drawing: Drawing): GroupNode[] {
+  const { pack, pen, size } = drawing
+  const start = startOfDiagram(diagram)
+  const trip = new Trip(diagram, drawing)
+  for (const step of walkDiagram(diagram)) for (const walked of step.moves) trip.take(walked)
+  const walks = trip.finish()
+  const theirs = drawing.defenders
+    ? [...start.theirs].map(([id, place]) => theirToken(toMetres(pack, place), id, size, pen))
+    : []
+  const tokens: GroupNode[] = []
+  for (const walk of walks) {
+    if (trip.catches.some(({ role, at }) => role === walk.role && distance(at, walk.from) < size.r)) continue
+    const solid = drawing.you === walk.role
+    tokens.push(ourToken(walk.from, walk.role, solid, size, pen, `start-${walk.role}`))
+  }
+  for (const { role, at } of trip.catches)
+    tokens.push(ourToken(at, role, drawing.you ? drawing.you === role : true, size, pen))
+  const first = start.ours.get(start.ball)
+  return [
+    { kind: 'group', id: 'walks', nodes: walks.flatMap((walk) => walkNodes(walk, drawing)) },
+    { kind: 'group', id: 'ball-way', nodes: trip.ballWay },
+    { kind: 'group', id: 'theirs', nodes: theirs },
+    { kind: 'group', id: 'tokens', nodes: tokens },
+    ...(first ? [ballAt(toMetres(pack, first), size, pen)] : []),
+  ]
+}
+
+/** Follows a trip move by move and keeps what its overview needs. */
+class Trip {
+  readonly catches: Catch[] = []
+  readonly ballWay: GroupNode[] = []
+  private readonly pending = new Map<Role, Walk>()
+  private readonly done: Walk[] = []
+  private ballAt: InMetres
+  private holder: Role
+
+  constructor(
+    diagram: Diagram,
+    private readonly drawing: Drawing,
+  ) {
+    const start = startOfDiagram(diagram)
+    this.holder = start.ball
+    for (const [role, place] of start.ours)
+      this.pending.set(role, { role, from: toMetres(drawing.pack, place), legs: [], caught: false })
+    const first = this.pending.get(start.ball)
+    this.ballAt = first?.from ?? toMetres(drawing.pack, { x: 0, y: 0.5 })
+    if (first) {
+      this.catches.push({ role: start.ball, at: first.from })
+      this.pending.delete(start.ball)
+    }
+  }
+
+  take({ move, to: place }: WalkedMove): void {
+    const to = toMetres(this.drawing.pack, place)
+    if (move.kind === 'theirs') return
+    if (move.kind === 'pass') return this.pass(move, to)
+    if (move.kind === 'dribble' && move.who === this.holder) return this.ballMove('dribble', to, move.bend)
+    if (move.who === this.holder) return this.ballMove('cut', to, 'bend' in move ? move.bend : 0)
+    this.pending
+      .get(move.who)
+      ?.legs.push({ to, bend: 'bend' in move ? move.bend : 0, screen: move.kind === 'screen' })
+  }
+
+  /** Walks that are worth a line; short ones that end in a catch are told by the token there. */
+  finish(): Walk[] {
+    return [...this.done, ...this.pending.values()].filter(
+      (walk) => !walk.caught || walkLength(walk) > SHORT_WALK,
+    )
+  }
+
+  private pass(move: Extract<Move, { kind: 'pass' }>, to: InMetres): void {
+    const walk = this.pending.get(move.to)
+    if (walk) {
+      this.pending.delete(move.to)
+      this.done.push({ ...walk, caught: true })
+    }
+    const { size, pen } = this.drawing
+    const atToken = this.catches.some(({ at }) => distance(at, this.ballAt) < size.r)
+    const way = trimmed(
+      straight(this.ballAt, to),
+      atToken ? size.r + pen.px(2) : pen.px(4),
+      size.r + pen.px(3),
+    )
+    this.push('pass', way)
+    // Whoever has passed is drawn no further, unless the ball comes back.
+    if (this.holder !== move.to)
+      this.pending.set(this.holder, { role: this.holder, from: this.ballAt, legs: [], caught: true })
+    const known = this.catches.some(({ role, at }) => role === move.to && distance(at, to) < size.r * 2)
+    if (!known) this.catches.push({ role: move.to, at: to })
+    this.ballAt = to
+    this.holder = move.to
+  }
+
+  private ballMove(kind: 'dribble' | 'cut', to: InMetres, bend: number): void {
+    const { size, pen } = this.drawing
+    const atToken = this.catches.some(({ at }) => distance(at, this.ballAt) < size.r)
+    this.push(kind, trimmed(bent(this.ballAt, to, bend), atToken ? size.r + pen.px(2) : 0, 0))
+    this.ballAt = to
+  }
+
+  private push(kind: 'pass' | 'dribble' | 'cut', way: Curve): void {
+    const nodes = movement(kind, way, this.drawing.pen)
+    if (nodes.length > 0) this.ballWay.push({ kind: 'group', id: `ball-way-${this.ballWay.length}`, nodes })
+  }
+}
+
+const walkLength = ({ from, legs }: Walk): number =>
+  legs.reduce(([length, at], leg): [number, InMetres] => [length + distance(at, leg.to), leg.to], [
+    0,
+    from,
+  ] as [number, InMetres])[0]
+
+function walkNodes(walk: Walk, { pen, size }: Drawing): SceneNode[] {
+  const curve = walkCurve(walk)
+  if (curve.length === 0) return []
+  const way = trimmed(curve, size.r + pen.px(2), walk.caught ? size.r + pen.px(3) : 0)
+  const nodes = movement(walk.legs.at(-1)?.screen ? 'screen' : 'cut', way, pen)
+  return nodes.length === 0 ? [] : [{ kind: 'group', id: `walk-${walk.role}`, nodes }]
+}
+
+/** All legs as one smooth way; the swing of a leg is kept as a point it goes through. */
+function walkCurve({ from, legs }: Walk): Curve {
+  const [only] = legs
+  if (legs.length === 1 && only) return bent(from, only.to, only.bend)
+  const points: InMetres[] = [from]
+  for (const { to, bend } of legs) {
+    const last = points.at(-1) ?? from
+    if (distance(last, to) < 0.4) continue
+    if (Math.abs(bend) > 0.02) {
+      const swing = bent(last, to, bend)
+      points.push(pointAt(swing, lengthOf(swing) / 2).point as InMetres)
+    }
+    points.push(to)
+  }
+  return points.length < 2 ? [] : through(points)
+}

@@ -1,0 +1,139 @@
+import type { Lane, Role } from '../vocabulary'
+import { courtLines } from './courtLines'
+import { counterOverview } from './counterOverview'
+import { counterStep } from './counterStep'
+import type { Diagram } from './diagram'
+import { walkDiagram } from './diagramWalk'
+import { ballWaySentence, stepSentence } from './diagramWords'
+import { toMetres } from './frame'
+import type { HatchMedium } from './hatch'
+import { penOf } from './pen'
+import { roomBox, roomNode, type BallSide } from './pressMarks'
+import type { RulePack } from './rulePacks'
+import { countRuler, rulerMargins } from './rulers'
+import type { Scene } from './scene'
+import { tokenSize, type TokenSize } from './tokens'
+import { trapZones, type TrapZone } from './trapZones'
+import { cropEnd, scaleToFit, viewOf, type Crop, type Margins } from './view'
+
+export interface CounterSceneOptions {
+  diagram: Diagram
+  pack: RulePack
+  /** CSS px per metre at which it is shown; on paper pt per metre times 4/3. */
+  pxPerMetre: number
+  /** One step, from where they stand at its start; or the whole way in one drawing. */
+  step: number | 'all'
+  /** The reader's own role: that token alone is solid. Without it, who is on the ball's way. */
+  you?: Role | null
+  /** The opponent's traps, under our drawing. */
+  zones?: readonly TrapZone[]
+  /** Room the press leaves, drawn without a count. */
+  room?: { lane: Lane; ballSide?: BallSide } | null
+  /** Tokens of 9.5 px instead of 12, small hatch. Default: under 18 px per metre. */
+  small?: boolean
+  /** Radius of a token in px where neither fits: 14 in an editor. */
+  tokenRadius?: number
+  crop?: Crop
+  medium?: HatchMedium
+  /** Default: yes in a step, no in the whole way. */
+  defenders?: boolean
+  /** Last step's places as ghosts. Default true. */
+  ghosts?: boolean
+  /** The over-half bar. Default false. */
+  ruler?: boolean
+}
+
+/** Half a metre more than the deepest a thrower may stand, so that every drawing of a list lines up. */
+const THROWER_ROOM = 1.6
+const RULER_TYPE = 13
+
+/** A counter as drawn on the court: one step or the whole way (DESIGN.md section 3). */
+export function counterScene(options: CounterSceneOptions): Scene {
+  const { diagram, pack } = options
+  const pen = penOf(options.pxPerMetre)
+  const small = options.small ?? pen.pxPerMetre < 18
+  const size = tokenSize(pen, small, options.tokenRadius)
+  const crop = options.crop ?? 'full'
+  const medium = options.medium ?? (small ? 'small' : 'screen')
+  const zones = options.zones ?? []
+  const drawing = { pack, pen, size, you: options.you ?? null }
+  const step = options.step
+  const nodes = [
+    courtLines(pack, pen),
+    ...(zones.length > 0 ? [trapZones(pack, zones, pen, medium, step !== 'all')] : []),
+    ...(options.room
+      ? [roomNode(roomBox(pack, options.room.lane, options.room.ballSide ?? 'right'), pen, 'room')]
+      : []),
+    ...(step === 'all'
+      ? counterOverview(diagram, { ...drawing, defenders: options.defenders ?? false })
+      : counterStep(diagram, step, {
+          ...drawing,
+          defenders: options.defenders ?? true,
+          ghosts: options.ghosts ?? true,
+        })),
+    ...(options.ruler
+      ? [countRuler(pack, cropEnd(pack, crop), pen, { throwIn: false, type: RULER_TYPE })]
+      : []),
+  ]
+  return {
+    view: viewOf(pack, crop, counterMargins(options, pen.pxPerMetre, size), pen),
+    nodes,
+    description: counterSentence(diagram, step),
+  }
+}
+
+/** What a drawing says in words. */
+export function counterSentence(diagram: Diagram, step: number | 'all'): string {
+  if (step === 'all') return ballWaySentence(diagram)
+  const title = diagram.steps[step]?.title
+  if (title === undefined) return ballWaySentence(diagram)
+  return `Step ${step + 1} of ${diagram.steps.length}, ${title}: ${stepSentence(diagram, step)}`
+}
+
+/** px per metre at which the counter drawing of these options is `widthPx` wide. */
+export function counterScale(options: Omit<CounterSceneOptions, 'pxPerMetre'>, widthPx: number): number {
+  // Margins depend a little on the scale (tokens are set in px, places in metres): two rounds settle it.
+  let scale = widthPx / options.pack.court.length
+  for (let round = 0; round < 3; round += 1) {
+    const small = options.small ?? scale < 18
+    const size = tokenSize(penOf(scale), small, options.tokenRadius)
+    scale = scaleToFit(options.pack, options.crop ?? 'full', counterMargins(options, scale, size), widthPx)
+  }
+  return scale
+}
+
+/** Room for whoever stands off the court, tokens whole. */
+function counterMargins(
+  options: Omit<CounterSceneOptions, 'pxPerMetre'>,
+  pxPerMetre: number,
+  size: TokenSize,
+): Margins {
+  const { pack, diagram } = options
+  const places = [
+    ...diagram.start.ours.map(({ at }) => at),
+    ...walkDiagram(diagram).flatMap(({ after }) => [...after.ours.values()]),
+  ].map((place) => toMetres(pack, place))
+  const reach = size.r * 1.6
+  const over = (metres: number) => Math.max(0, metres) * pxPerMetre + 3
+  const most = (list: number[]) => Math.max(0, ...list)
+  const left = most(places.filter((at) => at.x < size.r).map((at) => reach - at.x))
+  return {
+    left: over(Math.max(THROWER_ROOM, left)),
+    right: over(
+      most(
+        places
+          .filter((at) => at.x > pack.court.length - size.r)
+          .map((at) => at.x + reach - pack.court.length),
+      ),
+    ),
+    top: Math.max(
+      options.ruler ? rulerMargins(false, RULER_TYPE).top : 0,
+      over(most(places.filter((at) => at.y < size.r).map((at) => reach - at.y))),
+    ),
+    bottom: over(
+      most(
+        places.filter((at) => at.y > pack.court.width - size.r).map((at) => at.y + reach - pack.court.width),
+      ),
+    ),
+  }
+}

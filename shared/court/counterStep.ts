@@ -1,0 +1,104 @@
+import type { Role } from '../vocabulary'
+import { bent, straight, trimmed, type Curve } from './curve'
+import type { Diagram } from './diagram'
+import { stateAt, walkDiagram, type WalkedMove, type WalkedStep } from './diagramWalk'
+import { toMetres, type InFractions, type InMetres } from './frame'
+import { movement } from './movement'
+import type { Pen } from './pen'
+import type { RulePack } from './rulePacks'
+import type { GroupNode, SceneNode } from './scene'
+import { ballAt, ghost, ourToken, theirToken, type TokenSize } from './tokens'
+
+export interface Drawing {
+  pack: RulePack
+  pen: Pen
+  size: TokenSize
+  you: Role | null
+  defenders: boolean
+}
+
+/** One step: tokens where it starts, everything that happens in it as movement, last step as ghosts. */
+export function counterStep(
+  diagram: Diagram,
+  index: number,
+  drawing: Drawing & { ghosts: boolean },
+): GroupNode[] {
+  const { pack, pen, size } = drawing
+  const step = stateAt(diagram, index)
+  const metres = (place: InFractions): InMetres => toMetres(pack, place)
+  const onWay = ballWay(step)
+  const tokens = [...step.before.ours].map(([role, place]) =>
+    ourToken(metres(place), role, drawing.you ? role === drawing.you : onWay.has(role), size, pen),
+  )
+  const holder = step.before.ours.get(step.before.ball)
+  const theirs = drawing.defenders
+    ? [...step.before.theirs].map(([id, place]) => theirToken(metres(place), id, size, pen))
+    : []
+  return [
+    { kind: 'group', id: 'ghosts', nodes: drawing.ghosts ? ghosts(diagram, index, step, drawing) : [] },
+    { kind: 'group', id: 'moves', nodes: step.moves.flatMap((move) => stepMove(move, index, step, drawing)) },
+    { kind: 'group', id: 'theirs', nodes: theirs },
+    { kind: 'group', id: 'tokens', nodes: tokens },
+    ...(holder ? [ballAt(metres(holder), size, pen)] : []),
+  ]
+}
+
+/** Whoever has the ball at some moment of a step. */
+function ballWay(step: WalkedStep): Set<Role> {
+  const roles = new Set<Role>([step.before.ball])
+  for (const { move } of step.moves) if (move.kind === 'pass') roles.add(move.from).add(move.to)
+  return roles
+}
+
+function ghosts(
+  diagram: Diagram,
+  index: number,
+  step: WalkedStep,
+  { pack, pen, size }: Drawing,
+): SceneNode[] {
+  const before = walkDiagram(diagram)[index - 1]?.before
+  if (!before) return []
+  return [...before.ours].flatMap(([role, place]) => {
+    const now = step.before.ours.get(role)
+    if (!now) return []
+    const [was, is] = [toMetres(pack, place), toMetres(pack, now)]
+    return Math.hypot(was.x - is.x, was.y - is.y) < size.r ? [] : [ghost(was, size, pen)]
+  })
+}
+
+function stepMove(
+  walked: WalkedMove,
+  step: number,
+  { before, moves }: WalkedStep,
+  drawing: Drawing,
+): GroupNode[] {
+  const { pack, pen, size } = drawing
+  const { move } = walked
+  if (move.kind === 'theirs' && !drawing.defenders) return []
+  const [from, to] = [toMetres(pack, walked.from), toMetres(pack, walked.to)]
+  const bend = 'bend' in move ? move.bend : 0
+  const kind = move.kind === 'theirs' ? 'cut' : move.kind
+  const tokens = [...before.ours.values(), ...before.theirs.values()].map((place) => toMetres(pack, place))
+  const stands = (at: InMetres) => tokens.some((token) => Math.hypot(token.x - at.x, token.y - at.y) < size.r)
+  // A pass and its receiver's own way meet in one place: both stop a token short of it.
+  const meets = moves.some(
+    (other) =>
+      other !== walked &&
+      (other.move.kind === 'pass' || move.kind === 'pass') &&
+      other.to.x === walked.to.x &&
+      other.to.y === walked.to.y,
+  )
+  const startGap = stands(from) ? size.r + pen.px(2) : move.kind === 'pass' ? size.r * 0.6 : 0
+  const endGap = stands(to) ? size.r + pen.px(3) : meets ? size.r * 0.8 : 0
+  const nodes = movement(
+    kind,
+    way(from, to, bend, startGap, endGap),
+    pen,
+    move.kind === 'theirs' ? 'their' : 'our',
+  )
+  return nodes.length === 0 ? [] : [{ kind: 'group', id: `move-${step}-${walked.index}`, nodes }]
+}
+
+function way(from: InMetres, to: InMetres, bend: number, startGap: number, endGap: number): Curve {
+  return trimmed(bend === 0 ? straight(from, to) : bent(from, to, bend), startGap, endGap)
+}

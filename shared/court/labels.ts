@@ -1,0 +1,92 @@
+import { grown, inside, overlaps, type Box, type Point } from './path'
+import { CAP_HEIGHT, DESCENT, textWidth } from './textWidth'
+import type { Cut, Ink, SceneNode, TextNode } from './scene'
+
+export interface LabelLine {
+  text: string
+  /** Metres. */
+  size: number
+  cut: Cut
+  weight: TextNode['weight']
+}
+
+/** A count with its few words, to be set near what it belongs to. */
+export interface Label {
+  id: string
+  lines: readonly LabelLine[]
+  ink: Ink
+  /** Top left corners worth trying, best first, metres; made from the label's own size. */
+  wishes(size: { width: number; height: number }): readonly Point[]
+}
+
+export interface PlacedLabel {
+  label: Label
+  box: Box
+}
+
+const LEADING = 1.16
+
+/** The room a label takes, metres. */
+export function labelSize(label: Pick<Label, 'lines'>): { width: number; height: number } {
+  const first = label.lines[0]
+  const last = label.lines.at(-1)
+  if (!first || !last) return { width: 0, height: 0 }
+  const width = Math.max(...label.lines.map((line) => textWidth(line.text, line.size, line.cut)))
+  const below = label.lines.slice(1).reduce((sum, line) => sum + line.size * LEADING, 0)
+  return { width, height: first.size * CAP_HEIGHT + below + last.size * DESCENT }
+}
+
+/**
+ * Sets labels one after the other, each at the first of its wishes that keeps clear of the labels before
+ * it and of what must stay visible; failing that, at the nearest free place. Same input, same result.
+ */
+export function placeLabels(labels: readonly Label[], area: Box, keepClear: readonly Box[], gap: number) {
+  const placed: PlacedLabel[] = []
+  for (const label of labels) {
+    const size = labelSize(label)
+    const taken = placed.map((other) => grown(other.box, gap))
+    const boxAt = (at: Point): Box => ({ x: at.x, y: at.y, ...size })
+    const free = (box: Box) => inside(box, area) && !taken.some((other) => overlaps(box, other))
+    const clear = (box: Box) => free(box) && !keepClear.some((other) => overlaps(box, other))
+    const wishes = label.wishes(size).map(boxAt)
+    const first = wishes[0] ?? boxAt(area)
+    const box =
+      wishes.find(clear) ?? nearest(first, area, gap * 2, clear) ?? nearest(first, area, gap, free) ?? first
+    placed.push({ label, box })
+  }
+  return placed
+}
+
+/** Looks over the area on a grid, nearest first; at equal distance the upper, then the left one. */
+function nearest(wish: Box, area: Box, grid: number, fits: (box: Box) => boolean): Box | undefined {
+  let best: { box: Box; far: number } | undefined
+  const step = Math.max(grid, area.width / 120)
+  for (let y = area.y; y + wish.height <= area.y + area.height; y += step) {
+    for (let x = area.x; x + wish.width <= area.x + area.width; x += step) {
+      const box = { ...wish, x, y }
+      const far = Math.hypot(x - wish.x, y - wish.y)
+      if ((!best || far < best.far - 1e-9) && fits(box)) best = { box, far }
+    }
+  }
+  return best?.box
+}
+
+/** The text of a placed label, with a floor-coloured edge. */
+export function labelNodes({ label, box }: PlacedLabel, halo: number): SceneNode[] {
+  let baseline = box.y
+  return label.lines.map((line, i): TextNode => {
+    baseline += i === 0 ? line.size * CAP_HEIGHT : line.size * LEADING
+    return {
+      kind: 'text',
+      x: box.x,
+      y: baseline,
+      text: line.text,
+      size: line.size,
+      cut: line.cut,
+      weight: line.weight,
+      anchor: 'start',
+      ink: label.ink,
+      halo: { ink: 'floor', width: halo },
+    }
+  })
+}
