@@ -86,8 +86,9 @@ export function teach(engine: Engine, habits: ReadonlyMap<string, EngineTendency
 const isFact = (name: string): name is FactName => FACTS.some((fact) => fact === name)
 
 /**
- * The conditions that held in a tree that held as a whole, in the order written, and how sure the tree is: `all` is
- * as sure as its least sure part, `any` as its surest that held.
+ * The conditions that held in a tree that held as a whole, in the order written, and how sure the tree is:
+ * `all` is as sure as its least sure part, `any` as its surest that held. (The evaluator leaves the outermost
+ * group without a result of its own.)
  */
 export function held(
   tree: Evaluated,
