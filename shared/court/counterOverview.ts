@@ -1,10 +1,11 @@
 import type { Role } from '../vocabulary'
-import type { Drawing } from './counterStep'
+import { walkedWay, type Drawing } from './counterStep'
 import { bent, distance, pointAt, lengthOf, straight, through, trimmed, type Curve } from './curve'
 import type { Diagram, Move } from './diagram'
 import { startOfDiagram, walkDiagram, type WalkedMove } from './diagramWalk'
 import { toMetres, type InMetres } from './frame'
-import { movement } from './movement'
+import type { RulePack } from './rulePacks'
+import { BESIDE, movement } from './movement'
 import type { GroupNode, SceneNode } from './scene'
 import { ballAt, ourToken, theirToken } from './tokens'
 
@@ -24,6 +25,8 @@ interface Walk {
   legs: { to: InMetres; bend: number; screen: boolean }[]
   /** Ends where the ball is caught, so at a token. */
   caught: boolean
+  /** Begins where the ball was passed on: drawn only if the ball comes back. */
+  passed: boolean
 }
 
 /**
@@ -43,13 +46,20 @@ export function counterOverview(diagram: Diagram, drawing: Drawing): GroupNode[]
   for (const walk of walks) {
     if (trip.catches.some(({ role, at }) => role === walk.role && distance(at, walk.from) < size.r)) continue
     const solid = drawing.you === walk.role
-    tokens.push(ourToken(walk.from, walk.role, solid, size, pen, `start-${walk.role}`))
+    tokens.push(ourToken(walk.from, walk.role, solid, size, pen, `start-${walk.role}-${tokens.length}`))
+  }
+  // Whoever catches twice has two tokens; every part of a drawing has a name of its own.
+  const seen = new Map<Role, number>()
+  const catchId = (role: Role): string => {
+    const times = (seen.get(role) ?? 0) + 1
+    seen.set(role, times)
+    return times === 1 ? `token-${role}` : `token-${role}-${times}`
   }
   for (const { role, at } of trip.catches)
-    tokens.push(ourToken(at, role, drawing.you ? drawing.you === role : true, size, pen))
+    tokens.push(ourToken(at, role, drawing.you ? drawing.you === role : true, size, pen, catchId(role)))
   const first = start.ours.get(start.ball)
   return [
-    { kind: 'group', id: 'walks', nodes: walks.flatMap((walk) => walkNodes(walk, drawing)) },
+    { kind: 'group', id: 'walks', nodes: walks.flatMap((walk, i) => walkNodes(walk, i, drawing)) },
     { kind: 'group', id: 'ball-way', nodes: trip.ballWay },
     { kind: 'group', id: 'theirs', nodes: theirs },
     { kind: 'group', id: 'tokens', nodes: tokens },
@@ -73,7 +83,13 @@ class Trip {
     const start = startOfDiagram(diagram)
     this.holder = start.ball
     for (const [role, place] of start.ours)
-      this.pending.set(role, { role, from: toMetres(drawing.pack, place), legs: [], caught: false })
+      this.pending.set(role, {
+        role,
+        from: toMetres(drawing.pack, place),
+        legs: [],
+        caught: false,
+        passed: false,
+      })
     const first = this.pending.get(start.ball)
     this.ballAt = first?.from ?? toMetres(drawing.pack, { x: 0, y: 0.5 })
     if (first) {
@@ -95,9 +111,8 @@ class Trip {
 
   /** Walks that are worth a line; short ones that end in a catch are told by the token there. */
   finish(): Walk[] {
-    return [...this.done, ...this.pending.values()].filter(
-      (walk) => !walk.caught || walkLength(walk) > SHORT_WALK,
-    )
+    const left = [...this.pending.values()].filter((walk) => !walk.passed)
+    return [...this.done.filter((walk) => walkLength(walk) > SHORT_WALK), ...left]
   }
 
   private pass(move: Extract<Move, { kind: 'pass' }>, to: InMetres): void {
@@ -116,7 +131,13 @@ class Trip {
     this.push('pass', way)
     // Whoever has passed is drawn no further, unless the ball comes back.
     if (this.holder !== move.to)
-      this.pending.set(this.holder, { role: this.holder, from: this.ballAt, legs: [], caught: true })
+      this.pending.set(this.holder, {
+        role: this.holder,
+        from: this.ballAt,
+        legs: [],
+        caught: false,
+        passed: true,
+      })
     const known = this.catches.some(({ role, at }) => role === move.to && distance(at, to) < size.r * 2)
     if (!known) this.catches.push({ role: move.to, at: to })
     this.ballAt = to
@@ -142,27 +163,42 @@ const walkLength = ({ from, legs }: Walk): number =>
     from,
   ] as [number, InMetres])[0]
 
-function walkNodes(walk: Walk, { pen, size }: Drawing): SceneNode[] {
-  const curve = walkCurve(walk)
+function walkNodes(walk: Walk, index: number, { pack, pen, size }: Drawing): SceneNode[] {
+  const curve = walkCurve(pack, walk)
   if (curve.length === 0) return []
   const way = trimmed(curve, size.r + pen.px(2), walk.caught ? size.r + pen.px(3) : 0)
-  const nodes = movement(walk.legs.at(-1)?.screen ? 'screen' : 'cut', way, pen)
-  return nodes.length === 0 ? [] : [{ kind: 'group', id: `walk-${walk.role}`, nodes }]
+  const nodes = movement(walk.legs.at(-1)?.screen ? 'screen' : 'cut', way, pen, 'our', BESIDE)
+  return nodes.length === 0 ? [] : [{ kind: 'group', id: `walk-${index}-${walk.role}`, nodes }]
 }
 
-/** All legs as one smooth way; the swing of a leg is kept as a point it goes through. */
-function walkCurve({ from, legs }: Walk): Curve {
+/**
+ * All legs as one line. Mostly one arc that bows to where the walk strayed furthest; only a walk that
+ * doubles back (away and then to the ball) is drawn through every place.
+ */
+function walkCurve(pack: RulePack, walk: Walk): Curve {
+  const { from, legs } = walk
   const [only] = legs
-  if (legs.length === 1 && only) return bent(from, only.to, only.bend)
-  const points: InMetres[] = [from]
+  const end = legs.at(-1)?.to
+  if (!only || !end) return []
+  if (legs.length === 1) return walkedWay(pack, from, end, only.bend)
+  const chord = distance(from, end)
+  if (chord < walkLength(walk) / 2) return through([from, ...legs.map(({ to }) => to)])
+  return walkedWay(pack, from, end, bow(from, end, walk))
+}
+
+/** The furthest that a walk strays from the straight line, as a share of its length; + is to the right. */
+function bow(from: InMetres, end: InMetres, { legs }: Walk): number {
+  const chord = distance(from, end)
+  let furthest = 0
+  let at = from
   for (const { to, bend } of legs) {
-    const last = points.at(-1) ?? from
-    if (distance(last, to) < 0.4) continue
-    if (Math.abs(bend) > 0.02) {
-      const swing = bent(last, to, bend)
-      points.push(pointAt(swing, lengthOf(swing) / 2).point as InMetres)
+    const swing = bent(at, to, bend)
+    for (const point of [pointAt(swing, lengthOf(swing) / 2).point, to]) {
+      const aside = (end.x - from.x) * (point.y - from.y) - (end.y - from.y) * (point.x - from.x)
+      const share = aside / (chord * chord)
+      if (Math.abs(share) > Math.abs(furthest)) furthest = share
     }
-    points.push(to)
+    at = to
   }
-  return points.length < 2 ? [] : through(points)
+  return Math.max(-0.3, Math.min(0.3, furthest))
 }

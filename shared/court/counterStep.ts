@@ -1,5 +1,5 @@
 import type { Role } from '../vocabulary'
-import { bent, straight, trimmed, type Curve } from './curve'
+import { bent, keptInside, straight, trimmed, type Curve } from './curve'
 import type { Diagram } from './diagram'
 import { stateAt, walkDiagram, type WalkedMove, type WalkedStep } from './diagramWalk'
 import { toMetres, type InFractions, type InMetres } from './frame'
@@ -90,15 +90,20 @@ function stepMove(
   )
   const startGap = stands(from) ? size.r + pen.px(2) : move.kind === 'pass' ? size.r * 0.6 : 0
   const endGap = stands(to) ? size.r + pen.px(3) : meets ? size.r * 0.8 : 0
-  const nodes = movement(
-    kind,
-    way(from, to, bend, startGap, endGap),
-    pen,
-    move.kind === 'theirs' ? 'their' : 'our',
-  )
+  const way = trimmed(walkedWay(pack, from, to, bend), startGap, endGap)
+  const nodes = movement(kind, way, pen, move.kind === 'theirs' ? 'their' : 'our')
   return nodes.length === 0 ? [] : [{ kind: 'group', id: `move-${step}-${walked.index}`, nodes }]
 }
 
-function way(from: InMetres, to: InMetres, bend: number, startGap: number, endGap: number): Curve {
-  return trimmed(bend === 0 ? straight(from, to) : bent(from, to, bend), startGap, endGap)
+/** A walk from one place to another; its swing stays 30 cm inside the lines. */
+export function walkedWay(pack: RulePack, from: InMetres, to: InMetres, bend: number): Curve {
+  if (bend === 0) return straight(from, to)
+  const edge = 0.3
+  const { length, width } = pack.court
+  return keptInside(bent(from, to, bend), {
+    x: edge,
+    y: edge,
+    width: length - 2 * edge,
+    height: width - 2 * edge,
+  })
 }

@@ -1,4 +1,4 @@
-import { n, type Point } from './path'
+import { n, type Box, type Point } from './path'
 
 /** A way on the court: cubic pieces end to end, metres. */
 export interface Cubic {
@@ -28,6 +28,18 @@ export function bent(a: Point, d: Point, bend: number): Curve {
     y: (a.y + d.y) / 2 + 2 * bend * (d.x - a.x),
   }
   return [{ a, b: mix(a, control, 2 / 3), c: mix(d, control, 2 / 3), d }]
+}
+
+/** The same way with its swing kept inside a box: nobody runs out of bounds between two places in it. */
+export function keptInside(curve: Curve, box: Box): Curve {
+  const held = (p: Point): Point => ({
+    x: Math.min(box.x + box.width, Math.max(box.x, p.x)),
+    y: Math.min(box.y + box.height, Math.max(box.y, p.y)),
+  })
+  const within = (p: Point) => held(p).x === p.x && held(p).y === p.y
+  return curve.map((piece) =>
+    within(piece.a) && within(piece.d) ? { ...piece, b: held(piece.b), c: held(piece.c) } : piece,
+  )
 }
 
 /** A smooth way through every point in turn (Catmull-Rom, tension halved at the ends). */

@@ -10,24 +10,38 @@ export interface LabelLine {
   weight: TextNode['weight']
 }
 
+/** A place for a label: its top left corner, metres, and how its lines stand in it. */
+export interface Spot extends Point {
+  align?: 'start' | 'middle' | 'end'
+}
+export interface LabelSize {
+  width: number
+  height: number
+}
+
 /** A count with its few words, to be set near what it belongs to. */
 export interface Label {
   id: string
   lines: readonly LabelLine[]
   ink: Ink
-  /** Top left corners worth trying, best first, metres; made from the label's own size. */
-  wishes(size: { width: number; height: number }): readonly Point[]
+  /** Places worth trying, best first, that must keep clear of labels and marks. */
+  wishes(size: LabelSize): readonly Spot[]
+  /** Where it may cover a mark rather than stray from its own; labels are still kept apart. */
+  fallbacks?(size: LabelSize): readonly Spot[]
+  /** How far it may move from its first wish before it covers a mark instead, metres. Default: no limit. */
+  stray?: number
 }
 
 export interface PlacedLabel {
   label: Label
   box: Box
+  align: 'start' | 'middle' | 'end'
 }
 
 const LEADING = 1.16
 
 /** The room a label takes, metres. */
-export function labelSize(label: Pick<Label, 'lines'>): { width: number; height: number } {
+export function labelSize(label: Pick<Label, 'lines'>): LabelSize {
   const first = label.lines[0]
   const last = label.lines.at(-1)
   if (!first || !last) return { width: 0, height: 0 }
@@ -38,9 +52,15 @@ export function labelSize(label: Pick<Label, 'lines'>): { width: number; height:
 
 /**
  * Sets labels one after the other, each at the first of its wishes that keeps clear of the labels before
- * it and of what must stay visible; failing that, at the nearest free place. Same input, same result.
+ * it and of what must stay visible; failing that, where it may cover a mark; failing that, at the nearest
+ * free place. Same input, same result.
  */
-export function placeLabels(labels: readonly Label[], area: Box, keepClear: readonly Box[], gap: number) {
+export function placeLabels(
+  labels: readonly Label[],
+  area: Box,
+  keepClear: readonly Box[],
+  gap: number,
+): PlacedLabel[] {
   const placed: PlacedLabel[] = []
   for (const label of labels) {
     const size = labelSize(label)
@@ -48,43 +68,56 @@ export function placeLabels(labels: readonly Label[], area: Box, keepClear: read
     const boxAt = (at: Point): Box => ({ x: at.x, y: at.y, ...size })
     const free = (box: Box) => inside(box, area) && !taken.some((other) => overlaps(box, other))
     const clear = (box: Box) => free(box) && !keepClear.some((other) => overlaps(box, other))
-    const wishes = label.wishes(size).map(boxAt)
-    const first = wishes[0] ?? boxAt(area)
-    const box =
-      wishes.find(clear) ?? nearest(first, area, gap * 2, clear) ?? nearest(first, area, gap, free) ?? first
-    placed.push({ label, box })
+    const wishes = label.wishes(size)
+    const wish = boxAt(wishes[0] ?? area)
+    const near = () => nearest(wish, area, gap * 2, clear, label.stray)
+    const spot =
+      wishes.find((at) => clear(boxAt(at))) ??
+      near() ??
+      label.fallbacks?.(size).find((at) => free(boxAt(at))) ??
+      nearest(wish, area, gap, free) ??
+      wish
+    const box = boxAt(spot)
+    placed.push({ label, box, align: ('align' in spot && spot.align) || 'start' })
   }
   return placed
 }
 
 /** Looks over the area on a grid, nearest first; at equal distance the upper, then the left one. */
-function nearest(wish: Box, area: Box, grid: number, fits: (box: Box) => boolean): Box | undefined {
+function nearest(
+  wish: Box,
+  area: Box,
+  grid: number,
+  fits: (box: Box) => boolean,
+  stray = Infinity,
+): Spot | undefined {
   let best: { box: Box; far: number } | undefined
   const step = Math.max(grid, area.width / 120)
   for (let y = area.y; y + wish.height <= area.y + area.height; y += step) {
     for (let x = area.x; x + wish.width <= area.x + area.width; x += step) {
       const box = { ...wish, x, y }
       const far = Math.hypot(x - wish.x, y - wish.y)
-      if ((!best || far < best.far - 1e-9) && fits(box)) best = { box, far }
+      if (far <= stray && (!best || far < best.far - 1e-9) && fits(box)) best = { box, far }
     }
   }
   return best?.box
 }
 
 /** The text of a placed label, with a floor-coloured edge. */
-export function labelNodes({ label, box }: PlacedLabel, halo: number): SceneNode[] {
+export function labelNodes({ label, box, align }: PlacedLabel, halo: number): SceneNode[] {
+  const x = box.x + (align === 'middle' ? box.width / 2 : align === 'end' ? box.width : 0)
   let baseline = box.y
   return label.lines.map((line, i): TextNode => {
     baseline += i === 0 ? line.size * CAP_HEIGHT : line.size * LEADING
     return {
       kind: 'text',
-      x: box.x,
+      x,
       y: baseline,
       text: line.text,
       size: line.size,
       cut: line.cut,
       weight: line.weight,
-      anchor: 'start',
+      anchor: align,
       ink: label.ink,
       halo: { ink: 'floor', width: halo },
     }

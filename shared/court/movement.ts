@@ -12,14 +12,23 @@ const HEAD_HALF = 3.3
 const T_BAR = 16
 const ZIG = { high: 3.4, long: 9 }
 
+/** A walk that only frames the ball's way is drawn lighter, so that the ball leads the eye. */
+export const BESIDE = 0.7
+
 /**
  * A way as it is drawn: cut solid, pass dashed, dribble zigzag, screen with a T-bar, each on a casing.
  * Nothing where the way is too short to be seen.
  */
-export function movement(kind: MovementKind, curve: Curve, pen: Pen, ink: Ink = 'our'): SceneNode[] {
+export function movement(
+  kind: MovementKind,
+  curve: Curve,
+  pen: Pen,
+  ink: Ink = 'our',
+  emphasis = 1,
+): SceneNode[] {
   const length = lengthOf(curve)
   if (length < pen.px(5)) return []
-  const weight = pen.line(WEIGHT[kind])
+  const weight = pen.line(WEIGHT[kind]) * emphasis
   // Small drawings draw smaller heads and bars, by the same factor as their lines.
   const head = Math.min(pen.px(HEAD * pen.k), length)
   const shaft = kind === 'screen' ? curve : trimmed(curve, 0, head * 0.8)

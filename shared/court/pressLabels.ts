@@ -1,11 +1,10 @@
-import type { Label, LabelLine } from './labels'
-import type { Box, Point } from './path'
+import type { Label, LabelLine, LabelSize, Spot } from './labels'
+import type { Box } from './path'
 import type { Pen } from './pen'
 import { pickupWords, roomWords } from './pressWords'
 import type { Counted, PressSceneOptions } from './pressOptions'
 import type { DeniedWay } from './pressMarks'
 import { DENIED, labelOf, type Denied } from '../vocabulary'
-import type { Ink } from './scene'
 import { zoneBox } from './trapZones'
 
 interface Input {
@@ -17,7 +16,7 @@ interface Input {
 }
 
 /** Under this many px per metre there is room for counts only. */
-const NOTES_FROM = 18
+const NOTES_FROM = 20
 
 /** The counts with their words, most fixed first: the room's has one place, a lane's has many. */
 export function pressLabels({ options, pen, room, front, denied }: Input): Label[] {
@@ -33,57 +32,77 @@ export function pressLabels({ options, pen, room, front, denied }: Input): Label
   ]
   const gap = pen.px(10)
   const labels: Label[] = []
-  const add = (id: string, ink: Ink, text: LabelLine[], wishes: Label['wishes']) =>
-    labels.push({ id, ink, lines: text, wishes })
-
   if (room && options.room) {
-    const text = lines(options.room, options.room.note ?? roomWords(options.room.lane), countPx * 1.08)
-    add('room', 'our', text, ({ width, height }) => [
-      { x: room.x + (room.width - width) / 2, y: room.y + (room.height - height) / 2 },
-      ...beside(room, gap, width, height),
-    ])
+    labels.push({
+      id: 'room',
+      ink: 'our',
+      lines: lines(options.room, options.room.note ?? roomWords(options.room.lane), countPx * 1.08),
+      wishes: (size) => [within(room, size), ...beside(room, gap, size)],
+      fallbacks: (size) => [within(room, size)],
+      stray: 0,
+    })
   }
   for (const zone of options.zones) {
     const box = zoneBox(options.pack, zone, pen)
     if (!box) continue
     const note = [zone.thin ? 'thin' : '', zone.note ?? ''].filter(Boolean).join(', ')
-    add(`zone-${zone.spot}-${zone.side}`, 'their', lines(zone, note), ({ width, height }) => {
-      const outer = zone.side === 'right'
-      return beside(box, gap, width, height, outer)
+    labels.push({
+      id: `zone-${zone.spot}-${zone.side}`,
+      ink: 'their',
+      lines: lines(zone, note),
+      wishes: (size) => beside(box, gap, size, zone.side === 'right'),
+      // Beside a zone that is hemmed in, a count would seem its neighbour's: it goes on its own hatch.
+      fallbacks: (size) => [within(box, size)],
+      stray: 0,
     })
   }
   if (front && options.pickup) {
-    const text = lines(options.pickup, options.pickup.note ?? pickupWords(options.pickup.at))
-    add('pickup', 'their', text, ({ width, height }) => [
-      ...[0.1, 0.3, 0.75, 0.9].map((share) => ({
-        x: front.x + front.width + gap,
-        y: front.y + (front.height - height) * share,
-      })),
-      ...beside(front, gap, width, height),
-    ])
+    labels.push({
+      id: 'pickup',
+      ink: 'their',
+      lines: lines(options.pickup, options.pickup.note ?? pickupWords(options.pickup.at)),
+      wishes: (size) => [
+        ...[0.1, 0.3, 0.75, 0.9].map((share) => ({
+          x: front.x + front.width + gap,
+          y: front.y + (front.height - size.height) * share,
+        })),
+        ...beside(front, gap, size),
+      ],
+    })
   }
   for (const { one, way } of denied) {
-    const text = lines(one, one.note ?? `${withoutArticle(labelOf(DENIED, one.lane))} denied`)
-    add(`denied-${one.lane}`, 'their', text, ({ width, height }) => beside(way.box, pen.px(4), width, height))
+    const wishes = (size: LabelSize) => beside(way.box, pen.px(4), size)
+    labels.push({
+      id: `denied-${one.lane}`,
+      ink: 'their',
+      lines: lines(one, one.note ?? `${withoutArticle(labelOf(DENIED, one.lane))} denied`),
+      wishes,
+      fallbacks: wishes,
+      stray: 3,
+    })
   }
   return labels
 }
 
-/** Right, left, above, below and inside a box. `low` hangs the label at the box's lower end. */
-function beside(box: Box, gap: number, width: number, height: number, low = false): Point[] {
-  const edges = [box.y + gap / 2, box.y + (box.height - height) / 2, box.y + box.height - height - gap / 2]
-  const ys = low
-    ? [edges[1] ?? 0, edges[2] ?? 0, edges[0] ?? 0]
-    : [edges[0] ?? 0, edges[1] ?? 0, edges[2] ?? 0]
-  const right = box.x + box.width + gap
-  const left = box.x - gap - width
-  const middle = box.x + (box.width - width) / 2
+const within = (box: Box, { width, height }: LabelSize): Spot => ({
+  x: box.x + (box.width - width) / 2,
+  y: box.y + (box.height - height) / 2,
+  align: 'middle',
+})
+
+/** Right, below, left and above a box; `low` hangs the label at the box's lower end. */
+function beside(box: Box, gap: number, { width, height }: LabelSize, low = false): Spot[] {
+  const top = box.y + gap / 2
+  const middle = box.y + (box.height - height) / 2
+  const bottom = box.y + box.height - height - gap / 2
+  const ys = low ? [middle, bottom, top] : [top, middle, bottom]
+  const above = { x: box.x, y: box.y - height - gap }
+  const below = { x: box.x, y: box.y + box.height + gap }
   return [
-    ...ys.map((y) => ({ x: right, y })),
-    { x: box.x, y: low ? box.y - height - gap : box.y + box.height + gap },
-    ...ys.map((y) => ({ x: left, y })),
-    { x: box.x, y: low ? box.y + box.height + gap : box.y - height - gap },
-    { x: middle, y: box.y + (box.height - height) / 2 },
+    ...ys.map((y) => ({ x: box.x + box.width + gap, y })),
+    low ? above : below,
+    ...ys.map((y): Spot => ({ x: box.x - gap - width, y, align: 'end' })),
+    low ? below : above,
   ]
 }
 

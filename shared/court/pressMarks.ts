@@ -10,8 +10,11 @@ export type BallSide = 'left' | 'right'
 /** A place written for the ball on the right, as it is with the ball on the given side. */
 const onSide = (x: number, y: number, side: BallSide): InFractions => ({ x, y: side === 'right' ? y : 1 - y })
 
-/** Where a class of pick-up is drawn when only the class is known: about the middle of where it falls. */
-const PICKUP_X: Record<Pickup, number> = { full: 0.04, 'three-quarter': 0.3, half: 0.47 }
+/**
+ * Where a class of pick-up is drawn when only the class is known: inside its stretch, clear of
+ * board, ring and half-court line.
+ */
+const PICKUP_X: Record<Pickup, number> = { full: 0.07, 'three-quarter': 0.3, half: 0.47 }
 
 /** x of the front as a fraction of the court. */
 export const pickupX = (at: Pickup | number): number => (typeof at === 'number' ? at : PICKUP_X[at])
@@ -42,7 +45,8 @@ export function pickupFront(
   const below = crossed.filter((zone) => zone.y >= middle)
   const top = Math.max(pen.px(16), ...above.map((zone) => zone.y + zone.height + gap))
   const bottom = Math.min(pack.court.width - pen.px(16), ...below.map((zone) => zone.y - gap))
-  const teeth = Math.max(3, Math.min(7, Math.round((bottom - top) / 1.6)))
+  // An even number leaves the middle of the court, where board and ring are, without a tooth.
+  const teeth = 2 * Math.max(2, Math.min(4, Math.round((bottom - top) / 3.2)))
   const ink = 'their'
   const nodes: SceneNode[] = [
     {
@@ -82,7 +86,7 @@ const DENIED_WAYS: Record<Denied, { from: [number, number]; to: [number, number]
   near: { from: [-0.02, 0.6], to: [0.15, 0.74] },
   far: { from: [-0.02, 0.6], to: [0.17, 0.29] },
   middle: { from: [0.08, 0.8], to: [0.33, 0.5] },
-  'pass-back': { from: [0.085, 0.8], to: [0.085, 0.47] },
+  'pass-back': { from: [0.12, 0.77], to: [0.12, 0.45] },
   'best-handler': { from: [-0.02, 0.6], to: [0.22, 0.6] },
 }
 
@@ -133,7 +137,7 @@ export function deniedLane(pack: RulePack, lane: Denied, side: BallSide, pen: Pe
 
 /** Where the room lies that a press leaves; fractions, for the ball on the right. */
 const ROOMS: Record<Lane, { x0: number; x1: number; y0: number; y1: number }> = {
-  middle: { x0: 0.25, x1: 0.42, y0: 0.335, y1: 0.665 },
+  middle: { x0: 0.24, x1: 0.395, y0: 0.335, y1: 0.665 },
   sideline: { x0: 0.23, x1: 0.45, y0: 0.76, y1: 0.97 },
   long: { x0: 0.66, x1: 0.84, y0: 0.33, y1: 0.67 },
   'pass-back': { x0: 0.02, x1: 0.15, y0: 0.35, y1: 0.65 },

@@ -9,7 +9,7 @@ const AXIS = 6
 const BAR = 30
 const LABEL = 17
 /** Width of the throw-in ruler and its distance from the baseline, px. */
-const THROW_IN = { width: 56, off: 6 }
+const THROW_IN = { width: 68, off: 8 }
 
 export interface RulerOptions {
   /** The small even ruler for the throw-in count. */

@@ -1,11 +1,11 @@
 import { spotLabel } from '../tendencies/habits'
 import { courtLines } from './courtLines'
 import { toMetres, toPlace, inMetres } from './frame'
-import { boxD } from './path'
+import { boxD, lineD } from './path'
 import { penOf } from './pen'
 import type { RulePack } from './rulePacks'
-import type { GroupNode, Scene } from './scene'
-import { SPOT_CELLS, spotCentre } from './trapSpots'
+import type { GroupNode, Scene, SceneNode } from './scene'
+import { SPOT_CELLS } from './trapSpots'
 import { scaleToFit, viewOf, type Margins } from './view'
 
 const MARGINS: Margins = { top: 3, right: 3, bottom: 3, left: 3 }
@@ -16,30 +16,45 @@ export function trapTapScene(pack: RulePack, pxPerMetre = 26): Scene {
   const cells = SPOT_CELLS.map((cell): GroupNode => {
     const a = toMetres(pack, { x: cell.x0, y: cell.y0 })
     const b = toMetres(pack, { x: cell.x1, y: cell.y1 })
-    const centre = spotCentre(cell.spot, cell.side)
-    const d = boxD({ x: a.x, y: a.y, width: b.x - a.x, height: b.y - a.y })
     return {
       kind: 'group',
       id: `spot-${cell.spot}-${cell.side}`,
       label: spotLabel(cell.spot, cell.side),
-      ...(centre ? { at: toMetres(pack, centre) } : {}),
+      at: inMetres((a.x + b.x) / 2, (a.y + b.y) / 2),
       nodes: [
-        { kind: 'path', d, fill: 'floor', fillOpacity: 0 },
         {
           kind: 'path',
-          d,
-          stroke: 'graphite-3',
-          strokeWidth: pen.px(1.3),
-          dash: [pen.px(1.5), pen.px(5)],
+          d: boxD({ x: a.x, y: a.y, width: b.x - a.x, height: b.y - a.y }),
+          fill: 'floor',
+          fillOpacity: 0,
         },
       ],
     }
   })
+  const dotted: SceneNode = {
+    kind: 'path',
+    d: cellEdges(pack),
+    stroke: 'graphite-3',
+    strokeWidth: pen.px(1.3),
+    dash: [pen.px(1.5), pen.px(5)],
+  }
   return {
     view: viewOf(pack, 'full', MARGINS, pen),
-    nodes: [courtLines(pack, pen), { kind: 'group', id: 'spots', nodes: cells }],
+    nodes: [courtLines(pack, pen), { kind: 'group', id: 'spots', nodes: [dotted, ...cells] }],
     description: 'The court, our endline at the left. Tap where two came to the ball.',
   }
+}
+
+/** Every edge between cells once; court lines are not dotted over. */
+function cellEdges(pack: RulePack): string {
+  const edges = new Set<string>()
+  const edge = (x0: number, y0: number, x1: number, y1: number) =>
+    edges.add(lineD(toMetres(pack, { x: x0, y: y0 }), toMetres(pack, { x: x1, y: y1 })))
+  for (const { x0, x1, y0, y1 } of SPOT_CELLS) {
+    for (const y of [y0, y1]) if (y > 0 && y < 1) edge(x0, y, x1, y)
+    for (const x of [x0, x1]) if (x > 0 && x < 1 && x !== 0.5) edge(x, y0, x, y1)
+  }
+  return [...edges].join('')
 }
 
 /** px per metre at which the tap court is `widthPx` wide. */

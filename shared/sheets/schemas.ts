@@ -99,6 +99,7 @@ export const SheetRow = z.object({
   tipOff: z.iso.datetime(),
   createdAt: z.iso.datetime(),
 })
+export type SheetRow = z.infer<typeof SheetRow>
 export const SheetList = z.object({ rows: z.array(SheetRow), total: z.number().int() })
 export type SheetList = z.infer<typeof SheetList>
 

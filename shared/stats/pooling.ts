@@ -27,8 +27,8 @@ export interface Pool {
   posteriors: Beta[]
 }
 
-/** Steps of the search; the answer is exact to a ratio of 1.0001. */
-const STEPS = 60
+/** The search ends once the strength is known to a ratio of 1.001. */
+const NEAR = 0.001
 const GOLDEN = (Math.sqrt(5) - 1) / 2
 
 /**
@@ -47,8 +47,9 @@ export function overallRate(cells: readonly Count[]): number | null {
 export function poolLikelihood(cells: readonly Count[], mean: number, strength: number): number {
   const a = mean * strength
   const b = (1 - mean) * strength
+  const before = lnBeta(a, b)
   return cells.reduce(
-    (sum, cell) => (cell.n > 0 ? sum + lnBeta(a + cell.k, b + cell.n - cell.k) - lnBeta(a, b) : sum),
+    (sum, cell) => (cell.n > 0 ? sum + lnBeta(a + cell.k, b + cell.n - cell.k) - before : sum),
     0,
   )
 }
@@ -63,14 +64,26 @@ export function poolStrength(
   bounds: Pick<PoolSettings, 'least' | 'most'>,
 ): number {
   const at = (log: number) => poolLikelihood(cells, mean, Math.exp(log))
-  let low = Math.log(bounds.least)
-  let high = Math.log(bounds.most)
-  const ends = [low, high]
-  for (let step = 0; step < STEPS && high - low > 1e-4; step += 1) {
-    const left = high - GOLDEN * (high - low)
-    const right = low + GOLDEN * (high - low)
-    if (at(left) < at(right)) low = left
-    else high = right
+  const ends = [Math.log(bounds.least), Math.log(bounds.most)]
+  let [low = 0, high = 0] = ends
+  let left = high - GOLDEN * (high - low)
+  let right = low + GOLDEN * (high - low)
+  let atLeft = at(left)
+  let atRight = at(right)
+  while (high - low > NEAR) {
+    if (atLeft < atRight) {
+      low = left
+      left = right
+      atLeft = atRight
+      right = low + GOLDEN * (high - low)
+      atRight = at(right)
+    } else {
+      high = right
+      right = left
+      atRight = atLeft
+      left = high - GOLDEN * (high - low)
+      atLeft = at(left)
+    }
   }
   const best = [...ends, (low + high) / 2].reduce((held, log) => (at(log) > at(held) ? log : held))
   return Math.exp(best)

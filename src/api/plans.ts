@@ -17,6 +17,6 @@ export function signOffPlan(
   game: string,
   body: SignOffBody,
   version: number,
-): Promise<PlanRow> {
-  return request('POST', teamPath(team, 'games', game, 'plan', 'sign-off'), PlanRow, { body, version })
+): Promise<PlanState> {
+  return request('POST', teamPath(team, 'games', game, 'plan', 'sign-off'), PlanState, { body, version })
 }

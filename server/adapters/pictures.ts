@@ -1,0 +1,48 @@
+import sharp from 'sharp'
+import { LIMITS } from '@shared/limits'
+
+/** A still ready to be kept: upright, without metadata, no edge over the limits; JPEG. */
+export interface PreparedPicture {
+  full: Buffer
+  thumbnail: Buffer
+  /** px of the full picture. */
+  width: number
+  height: number
+}
+
+/** Why a picture is refused; the route turns it into words for the coach. */
+export class PictureRefused extends Error {
+  constructor(readonly why: 'not-an-image' | 'too-many-pixels') {
+    super(why)
+  }
+}
+
+const TAKEN = new Set(['jpeg', 'png', 'webp'])
+
+/**
+ * Checks, turns upright, strips metadata and shrinks an uploaded picture. What counts is what the bytes
+ * are, never the name or the type that came with them.
+ * @throws PictureRefused
+ */
+export async function preparePicture(upload: Buffer): Promise<PreparedPicture> {
+  const options = { limitInputPixels: LIMITS.stillPixels, failOn: 'error', pages: 1 } as const
+  const meta = await sharp(upload, { ...options, limitInputPixels: false })
+    .metadata()
+    .catch(() => null)
+  if (!meta?.width || !meta.height || !TAKEN.has(meta.format)) throw new PictureRefused('not-an-image')
+  if (meta.width * meta.height > LIMITS.stillPixels) throw new PictureRefused('too-many-pixels')
+  const sized = (edge: number, quality: number) =>
+    sharp(upload, options)
+      .rotate()
+      .resize({ width: edge, height: edge, fit: 'inside', withoutEnlargement: true })
+      .flatten({ background: '#ffffff' })
+      .jpeg({ quality, mozjpeg: true })
+      .toBuffer({ resolveWithObject: true })
+  try {
+    const full = await sized(LIMITS.stillEdge, 84)
+    const thumbnail = await sized(LIMITS.thumbnailEdge, 78)
+    return { full: full.data, thumbnail: thumbnail.data, width: full.info.width, height: full.info.height }
+  } catch {
+    throw new PictureRefused('not-an-image')
+  }
+}

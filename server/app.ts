@@ -1,0 +1,79 @@
+import express, { Router, type Express } from 'express'
+import { pinoHttp } from 'pino-http'
+import type { Context } from './context'
+import { choiceRoutes } from './features/choices/choices.routes'
+import { counterRoutes } from './features/counters/counters.routes'
+import { gameRoutes } from './features/games/games.routes'
+import { opponentRoutes } from './features/opponents/opponents.routes'
+import { planRoutes } from './features/plans/plans.routes'
+import { possessionRoutes } from './features/possessions/possessions.routes'
+import { ruleRoutes } from './features/rules/rules.routes'
+import { scoutedGameRoutes } from './features/scoutedGames/scoutedGames.routes'
+import { mountSession } from './features/session/session.routes'
+import { callerIn } from './features/session/session.service'
+import { sheetRoutes } from './features/sheets/sheets.routes'
+import { squadRoutes } from './features/squad/squad.routes'
+import { stillRoutes } from './features/stills/stills.routes'
+import { tendencyRoutes } from './features/tendencies/tendencies.routes'
+import { mount, type Endpoint } from './http/endpoint'
+import { health } from './http/health'
+import { describeApi } from './http/openapi'
+import { ownOriginOnly } from './http/origin'
+import { signInWith } from './http/passport'
+import { noSuchAddress, problemHandler } from './http/problem'
+import { securityHeaders } from './http/security'
+import { LIMITS } from '@shared/limits'
+
+/** Every team endpoint of the API; mounted and described from this one list. */
+export const endpointsOf = (context: Context): Endpoint[] => [
+  ...opponentRoutes(context),
+  ...scoutedGameRoutes(context),
+  ...possessionRoutes(context),
+  ...stillRoutes(context),
+  ...tendencyRoutes(context),
+  ...counterRoutes(context),
+  ...ruleRoutes(context),
+  ...squadRoutes(context),
+  ...gameRoutes(context),
+  ...choiceRoutes(context),
+  ...planRoutes(context),
+  ...sheetRoutes(context),
+]
+
+/** The whole HTTP side but the client's files; the same for tests and for production. */
+export function createApp(context: Context): Express {
+  const app = express()
+  app.disable('x-powered-by')
+  if (context.config.publicUrl) app.set('trust proxy', 1)
+  app.use(securityHeaders(context.config))
+  app.get('/healthz', health(context.db))
+
+  const { passport, middleware } = signInWith(context)
+  const api = Router()
+  api.use(
+    pinoHttp({
+      logger: context.log,
+      quietReqLogger: true,
+      customLogLevel: (_req, res, error) => (error || res.statusCode >= 500 ? 'error' : 'debug'),
+    }),
+  )
+  api.use(ownOriginOnly(context.config.publicUrl))
+  api.use((_req, res, next) => {
+    res.set('Cache-Control', 'private, no-store')
+    next()
+  })
+  api.use(express.json({ limit: LIMITS.jsonBytes }))
+  const endpoints = endpointsOf(context)
+  const description = describeApi(endpoints)
+  api.get('/openapi.json', (_req, res) => void res.json(description))
+  api.use(middleware)
+  mountSession(api, context, passport)
+  for (const spec of endpoints)
+    mount(api, spec, (req, teamId) =>
+      req.user ? callerIn(context.db, req.user, teamId) : Promise.resolve(null),
+    )
+  api.use(noSuchAddress)
+  app.use('/api', api)
+  app.use('/api', problemHandler(context.log))
+  return app
+}

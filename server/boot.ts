@@ -1,0 +1,54 @@
+import { randomBytes } from 'node:crypto'
+import { mkdir, readFile, writeFile } from 'node:fs/promises'
+import { join } from 'node:path'
+import { pino } from 'pino'
+import { systemClock } from './adapters/clock'
+import { diskStillFiles } from './adapters/stillFiles'
+import type { Config } from './config'
+import type { Context } from './context'
+import { openDatabase } from './database/dataSource'
+import { loadDemo } from './database/demo/load'
+import { purgeDeleted } from './features/possessions/deletion.service'
+import { SESSION_MS } from './http/passport'
+import { SessionStore } from './http/sessionStore'
+
+/** The secret of the settings, or one made once and kept beside the data, readable by its owner only. */
+async function sessionSecret(config: Config): Promise<string> {
+  if (config.sessionSecret) return config.sessionSecret
+  const file = join(config.dataDir, 'session-secret')
+  const kept = await readFile(file, 'utf8').catch(() => null)
+  if (kept) return kept
+  const made = randomBytes(32).toString('hex')
+  await writeFile(file, made, { mode: 0o600 })
+  return made
+}
+
+/** Opens everything that the app stands on; fills an empty database with the demo where that is wanted. */
+export async function boot(config: Config): Promise<{ context: Context; demoLoaded: boolean }> {
+  await mkdir(config.dataDir, { recursive: true })
+  const context: Context = {
+    config,
+    db: await openDatabase(join(config.dataDir, 'overtop.sqlite')),
+    clock: systemClock,
+    stillFiles: diskStillFiles(config.dataDir),
+    log: pino({ level: config.logLevel }),
+    sessionSecret: await sessionSecret(config),
+  }
+  const demoLoaded = config.demo ? await loadDemo(context) : false
+  return { context, demoLoaded }
+}
+
+const EVERY_MS = 60_000
+
+/** What has to go goes every minute: deletions past their undo, sessions past their time. */
+export function startHousekeeping(context: Context): () => void {
+  const sessions = new SessionStore(context.db, context.clock, SESSION_MS)
+  const sweep = async () => {
+    await purgeDeleted(context.db, context.stillFiles, context.clock())
+    await sessions.sweep()
+  }
+  const report = (error: unknown) => context.log.error({ err: error }, 'housekeeping failed')
+  void sweep().catch(report)
+  const timer = setInterval(() => void sweep().catch(report), EVERY_MS)
+  return () => clearInterval(timer)
+}

@@ -1,0 +1,77 @@
+import { resolve } from 'node:path'
+import { z } from 'zod'
+
+/**
+ * Settings of one server process, read once at boot from the environment (.env.example lists them).
+ * Everything that is written at run time lies below `dataDir`.
+ */
+const Settings = z.object({
+  PORT: z.coerce
+    .number({ error: 'PORT must be a number from 0 to 65535, e.g. 3000' })
+    .int('PORT must be a whole number, e.g. 3000')
+    .min(0, 'PORT must be 0 or more')
+    .max(65_535, 'PORT must be at most 65535')
+    .default(3000),
+  HOST: z.string().min(1, 'HOST must name an address to listen on, e.g. 127.0.0.1').default('127.0.0.1'),
+  DATA_DIR: z.string().min(1, 'DATA_DIR must name a folder, e.g. uploads').default('uploads'),
+  PUBLIC_URL: z
+    .url('PUBLIC_URL must be the address people type, e.g. https://overtop.club.example')
+    .optional(),
+  SESSION_SECRET: z
+    .string()
+    .min(
+      32,
+      'SESSION_SECRET must be at least 32 characters; leave it out to have one made and kept in DATA_DIR',
+    )
+    .optional(),
+  DEMO: z
+    .enum(['on', 'off'], { error: 'DEMO must be on or off' })
+    .default('on')
+    .transform((value) => value === 'on'),
+  LOG_LEVEL: z
+    .enum(['fatal', 'error', 'warn', 'info', 'debug', 'silent'], {
+      error: 'LOG_LEVEL must be one of fatal, error, warn, info, debug, silent',
+    })
+    .default('warn'),
+})
+
+export interface Config {
+  port: number
+  host: string
+  /** Absolute path. */
+  dataDir: string
+  /** Where people reach the server when a proxy stands before it; null on a bare local start. */
+  publicUrl: string | null
+  sessionSecret: string | null
+  demo: boolean
+  logLevel: string
+}
+
+/** Thrown with one clear line per fault; main prints the lines and stops. */
+export class ConfigError extends Error {
+  constructor(readonly faults: string[]) {
+    super(faults.join('\n'))
+  }
+}
+
+/**
+ * The environment as a Config. Empty values count as left out, as they do in an .env file.
+ * @throws ConfigError with one line per fault.
+ */
+export function readConfig(env: Record<string, string | undefined>): Config {
+  const given = Object.fromEntries(
+    Object.entries(env).filter(([, value]) => value !== undefined && value !== ''),
+  )
+  const parsed = Settings.safeParse(given)
+  if (!parsed.success) throw new ConfigError([...new Set(parsed.error.issues.map((issue) => issue.message))])
+  const settings = parsed.data
+  return {
+    port: settings.PORT,
+    host: settings.HOST,
+    dataDir: resolve(settings.DATA_DIR),
+    publicUrl: settings.PUBLIC_URL ?? null,
+    sessionSecret: settings.SESSION_SECRET ?? null,
+    demo: settings.DEMO,
+    logLevel: settings.LOG_LEVEL,
+  }
+}

@@ -1,0 +1,16 @@
+import type { Logger } from 'pino'
+import type { DataSource } from 'typeorm'
+import type { Clock } from './adapters/clock'
+import type { StillFiles } from './adapters/stillFiles'
+import type { Config } from './config'
+
+/** What the app is built from; production and tests build the same app from other values. */
+export interface Context {
+  config: Config
+  db: DataSource
+  clock: Clock
+  stillFiles: StillFiles
+  log: Logger
+  /** Signs the session cookie. */
+  sessionSecret: string
+}

@@ -1,0 +1,37 @@
+import type { EntityManager } from 'typeorm'
+import type { TendencyFilter } from '@shared/tendencies/schemas'
+import { COVERED, JOINED, SOURCES } from './expressions'
+import { situation } from './filters'
+import { TRAP_LINE, type HabitSql } from './habitSql'
+
+export interface EvidenceId {
+  id: string
+  /** In k, not only in n. */
+  counted: boolean
+  kind: 'scouted' | 'ours'
+  foe: string
+  day: string
+}
+
+/** The possessions behind a habit's n, newest game first, and how many there are in all. */
+export async function evidenceIds(
+  manager: EntityManager,
+  opponentId: string,
+  habit: HabitSql,
+  filter: TendencyFilter,
+  page: { limit: number; offset: number },
+): Promise<{ rows: EvidenceId[]; total: number }> {
+  const where = situation(filter)
+  const rows: (Omit<EvidenceId, 'counted'> & { counted: number; total: number })[] = await manager.query(
+    `WITH ${SOURCES}, ${TRAP_LINE}
+     SELECT p.id, ${habit.k} AS counted, s.kind, s.label AS foe, s.day, count(*) OVER () AS total
+       FROM ${JOINED} LEFT JOIN trap_line tr ON tr.possessionId = p.id
+      WHERE ${where.sql} AND ${COVERED} AND ${habit.n}
+      ORDER BY s.day DESC, s.id, p.number LIMIT ? OFFSET ?`,
+    [opponentId, opponentId, ...where.parameters, page.limit, page.offset],
+  )
+  return {
+    rows: rows.map(({ total: _total, counted, ...row }) => ({ ...row, counted: counted === 1 })),
+    total: rows[0]?.total ?? 0,
+  }
+}

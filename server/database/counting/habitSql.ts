@@ -1,0 +1,87 @@
+import { SPOT_CELLS } from '@shared/court/trapSpots'
+import { HABITS } from '@shared/tendencies/habits'
+import { DENIED, GOT_OUT, LANES, NOT_PRESSED, SHAPES, SHAPE_VARIANTS, TRAP_CUES } from '@shared/vocabulary'
+import { HAS_SHAPE, holds, inSpot, is, NOT_STOPPED, PRESSED, seen, THROUGH, THROWN_IN } from './expressions'
+
+/** What a habit's n and k count, as SQL over a possession `p`, its game `s` and its traps in one line `tr`. */
+export interface HabitSql {
+  n: string
+  k: string
+}
+
+/** Columns of `tr`: one line per possession that has traps. Read as 0 where there is none. */
+export const TRAP_LINE = `trap_line AS (
+  SELECT t.possessionId,
+         max(CASE WHEN t.position = 1 THEN t.cue END) AS cue,
+         max(t.position = 1 AND t.result IN (${GOT_OUT.map((result) => `'${result}'`).join(', ')})) AS gotOut,
+         count(*) AS traps,
+         ${SPOT_CELLS.map((cell) => `max${inSpot(cell.spot, cell.side)} AS ${column(cell.spot, cell.side)}`).join(',\n         ')}
+    FROM source s
+    JOIN possessions p ON (p.scoutedGameId = s.id OR p.gameId = s.id) AND p.deletedAt IS NULL
+    JOIN traps t ON t.possessionId = p.id
+   GROUP BY t.possessionId)`
+
+function column(spot: string, side: string): string {
+  return `"${spot} ${side}"`
+}
+
+const yes = (expression: string) => `coalesce(${expression}, 0)`
+const and = (...parts: string[]) => `(${parts.join(' AND ')})`
+
+const TRAPS_LOGGED = is('p.trapsLogged', 'seen')
+const TRAPPED = and(PRESSED, TRAPS_LOGGED, yes('tr.traps > 0'))
+const BALL_SEEN = and(PRESSED, seen('p.onBall'))
+/** Light and all-out also need to know whom they denied. */
+const BALL_AND_DENIED_SEEN = and(BALL_SEEN, seen('p.denied'))
+const THROWER_SEEN = and(PRESSED, THROWN_IN, seen('p.throwerGuard'))
+const DENIED_TWO = yes('json_array_length(p.denied) >= 2')
+const DENIED_NONE = yes(`p.denied = '[]'`)
+const SAFETY_SEEN = and(TRAPPED, seen('p.goalie'))
+
+const SQL: Record<string, HabitSql> = {
+  press: { n: HAS_SHAPE, k: PRESSED },
+  fake: { n: HAS_SHAPE, k: is('p.shape', 'fake') },
+  'pickup:full': { n: and(PRESSED, seen('p.pickup')), k: is('p.pickup', 'full') },
+  mirror: { n: THROWER_SEEN, k: is('p.throwerGuard', 'mirror') },
+  'thrower-free': { n: THROWER_SEEN, k: is('p.throwerGuard', 'none') },
+  sag: { n: and(BALL_SEEN, is('p.handler', 'weak')), k: is('p.onBall', 'sagged') },
+  light: { n: BALL_AND_DENIED_SEEN, k: and(is('p.onBall', 'contained'), DENIED_NONE) },
+  'all-out': { n: BALL_AND_DENIED_SEEN, k: and(is('p.onBall', 'pressured'), DENIED_TWO) },
+  disguise: { n: and(PRESSED, 'p.shownShape IS NOT NULL'), k: yes('p.shownShape <> p.shape') },
+  trap: { n: and(PRESSED, TRAPS_LOGGED), k: yes('tr.traps > 0') },
+  'trap-again': { n: and(TRAPPED, yes('tr.gotOut')), k: yes('tr.traps > 1') },
+  'safety-leaves-early': { n: SAFETY_SEEN, k: is('p.goalie', 'left-early') },
+  'safety-home': { n: SAFETY_SEEN, k: is('p.goalie', 'home') },
+  'others-through': { n: and(PRESSED, `s.kind = 'scouted'`, NOT_STOPPED), k: THROUGH },
+}
+for (const { value } of SHAPES)
+  if (!NOT_PRESSED.includes(value)) SQL[`shape:${value}`] = { n: PRESSED, k: is('p.shape', value) }
+for (const { value, parent } of SHAPE_VARIANTS)
+  SQL[`variant:${value}`] = {
+    n: and(PRESSED, `(p.shapeVariant IS NOT NULL OR p.shape <> '${parent}')`),
+    k: is('p.shapeVariant', value),
+  }
+for (const { value } of DENIED)
+  SQL[`deny:${value}`] = { n: and(PRESSED, seen('p.denied')), k: holds('p.denied', value) }
+for (const { value } of TRAP_CUES)
+  SQL[`cue:${value}`] = { n: and(TRAPPED, seen('tr.cue')), k: is('tr.cue', value) }
+for (const { value } of LANES)
+  SQL[`leave-open:${value}`] = { n: and(TRAPPED, seen('p.leftOpen')), k: holds('p.leftOpen', value) }
+for (const { spot, side } of SPOT_CELLS) {
+  SQL[`trap-at:${spot}:${side}`] = { n: and(PRESSED, TRAPS_LOGGED), k: yes(`tr.${column(spot, side)}`) }
+  if (side === 'left')
+    SQL[`trap-at:${spot}:any`] = {
+      n: and(PRESSED, TRAPS_LOGGED),
+      k: yes(`(tr.${column(spot, 'left')} OR tr.${column(spot, 'right')})`),
+    }
+}
+
+/** The SQL of a habit, or undefined for a key that is not counted. */
+export const habitSql = (key: string): HabitSql | undefined => SQL[key]
+
+/** Every counted habit with its SQL, in the order of HABITS. */
+export const COUNTED_HABITS: readonly ({ key: string } & HabitSql)[] = HABITS.map(({ key }) => {
+  const sql = SQL[key]
+  if (!sql) throw new Error(`habit ${key} has no SQL`)
+  return { key, ...sql }
+})

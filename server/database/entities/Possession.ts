@@ -1,0 +1,129 @@
+import { Check, Column, Entity, Index, JoinColumn, ManyToOne, OneToMany, type Relation } from 'typeorm'
+import type { PossessionBody } from '@shared/possessions/schemas'
+import { json, TeamRow } from '../columns'
+import { Counter } from './Counter'
+import { Game } from './Game'
+import { ScoutedGame } from './ScoutedGame'
+import { Still } from './Still'
+import { Trap } from './Trap'
+
+/**
+ * One live ball in the offence's backcourt, pressed or not: the unit of evidence (RECORD.md section 1).
+ * Belongs to exactly one scouted game or one of our games.
+ */
+@Entity('possessions')
+@Check('("scoutedGameId" IS NULL) <> ("gameId" IS NULL)')
+@Index(['scoutedGameId', 'number'])
+@Index(['gameId', 'number'])
+@Index(['teamId', 'counterId'])
+export class Possession extends TeamRow {
+  @ManyToOne(() => ScoutedGame, { onDelete: 'CASCADE', nullable: true })
+  @JoinColumn({ name: 'scoutedGameId' })
+  scoutedGame?: Relation<ScoutedGame> | null
+
+  @Column({ type: 'varchar', length: 36, nullable: true })
+  scoutedGameId!: string | null
+
+  @ManyToOne(() => Game, { onDelete: 'CASCADE', nullable: true })
+  @JoinColumn({ name: 'gameId' })
+  game?: Relation<Game> | null
+
+  @Column({ type: 'varchar', length: 36, nullable: true })
+  gameId!: string | null
+
+  @Column({ type: 'varchar', length: 36, nullable: true })
+  tripId!: string | null
+
+  @Column({ type: 'integer' })
+  number!: number
+
+  @Column({ type: 'integer', nullable: true })
+  period!: number | null
+
+  /** Tenths of a second left in the period. */
+  @Column({ type: 'integer', nullable: true })
+  clock!: number | null
+
+  @Column({ type: 'integer', nullable: true })
+  margin!: number | null
+
+  @Column({ type: 'text' })
+  trigger!: PossessionBody['trigger']
+
+  @Column({ type: 'text', nullable: true })
+  shape!: PossessionBody['shape']
+
+  @Column({ type: 'text', nullable: true })
+  shapeVariant!: PossessionBody['shapeVariant']
+
+  @Column({ type: 'text', nullable: true })
+  pickup!: PossessionBody['pickup']
+
+  /** Whether traps were looked for: null not logged, `seen` (none or some, in table traps), `not-visible`. */
+  @Column({ type: 'text', nullable: true })
+  trapsLogged!: 'seen' | 'not-visible' | null
+
+  @OneToMany(() => Trap, (trap) => trap.possession)
+  traps?: Relation<Trap>[]
+
+  @Column({ type: 'text', nullable: true })
+  outcome!: PossessionBody['outcome']
+
+  @Column({ type: 'text', nullable: true })
+  outcomePlace!: PossessionBody['outcomePlace']
+
+  @Column({ type: 'text', nullable: true })
+  throwerGuard!: PossessionBody['throwerGuard']
+
+  @Column({ type: 'text', nullable: true, transformer: json })
+  denied!: PossessionBody['denied']
+
+  @Column({ type: 'text', nullable: true, transformer: json })
+  tookAway!: PossessionBody['tookAway']
+
+  @Column({ type: 'text', nullable: true, transformer: json })
+  leftOpen!: PossessionBody['leftOpen']
+
+  @Column({ type: 'text', nullable: true })
+  onBall!: PossessionBody['onBall']
+
+  @Column({ type: 'text', nullable: true })
+  handler!: PossessionBody['handler']
+
+  @Column({ type: 'text', nullable: true })
+  goalie!: PossessionBody['goalie']
+
+  @Column({ type: 'text', nullable: true })
+  shownShape!: PossessionBody['shownShape']
+
+  /** Seconds from the first touch. */
+  @Column({ type: 'real', nullable: true })
+  crossedAt!: number | null
+
+  @Column({ type: 'text', nullable: true, transformer: json })
+  track!: PossessionBody['track']
+
+  @Column({ type: 'text' })
+  note!: string
+
+  @ManyToOne(() => Counter, { onDelete: 'SET NULL', nullable: true })
+  @JoinColumn({ name: 'counterId' })
+  counter?: Relation<Counter> | null
+
+  @Column({ type: 'varchar', length: 36, nullable: true })
+  counterId!: string | null
+
+  @Column({ type: 'boolean', nullable: true })
+  rightCall!: boolean | null
+
+  @Column({ type: 'boolean', nullable: true })
+  runWell!: boolean | null
+
+  @OneToMany(() => Still, (still) => still.possession)
+  stills?: Relation<Still>[]
+
+  /** Set while a deletion can still be undone; then the row is really gone. */
+  @Index()
+  @Column({ type: 'text', nullable: true })
+  deletedAt!: string | null
+}

@@ -1,0 +1,29 @@
+import { Column, Entity, Index, JoinColumn, ManyToOne, type Relation } from 'typeorm'
+import type { Skills } from '@shared/squad/schemas'
+import { json, TeamRow } from '../columns'
+import { Team } from './Team'
+
+/** Often a minor: a number, a name and what she can do in a counter; nothing else is kept. */
+@Entity('squad_players')
+@Index(['teamId', 'jersey'], { unique: true })
+export class SquadPlayer extends TeamRow {
+  @ManyToOne(() => Team, { onDelete: 'CASCADE' })
+  @JoinColumn({ name: 'teamId' })
+  team?: Relation<Team>
+
+  @Column({ type: 'integer' })
+  jersey!: number
+
+  @Column({ type: 'text' })
+  firstName!: string
+
+  @Column({ type: 'text' })
+  lastName!: string
+
+  @Column({ type: 'text', transformer: json })
+  skills!: Skills
+
+  /** Calendar day in the team's zone; null is available. */
+  @Column({ type: 'text', nullable: true })
+  outUntil!: string | null
+}

@@ -1,0 +1,20 @@
+import type { OpponentRow } from '@shared/opponents/schemas'
+import type { OpponentCounts } from '../../database/counting/opponentCounts'
+import type { Opponent } from '../../database/entities/Opponent'
+import { metaOf } from '../../http/present'
+
+const NOTHING: OpponentRow['counts'] = {
+  scoutedGames: 0,
+  possessions: 0,
+  pressed: 0,
+  pressable: 0,
+  mostlyShape: null,
+}
+
+export const presentOpponent = (row: Opponent, counted: OpponentCounts | undefined): OpponentRow => ({
+  ...metaOf(row),
+  name: row.name,
+  shortName: row.shortName,
+  counts: counted?.counts ?? NOTHING,
+  nextGame: counted?.nextGame ?? null,
+})

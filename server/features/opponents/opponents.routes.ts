@@ -1,0 +1,46 @@
+import { OpponentBody, OpponentList, OpponentRow } from '@shared/opponents/schemas'
+import type { Context } from '../../context'
+import { findInTeam } from '../../database/findInTeam'
+import { Opponent } from '../../database/entities/Opponent'
+import { endpoint, ok } from '../../http/endpoint'
+import { InTeam, OneRow } from '../../http/params'
+import { listReply, putReply } from '../../http/present'
+import { presentOpponent } from './opponents.presenter'
+import { countsOf, listOpponents, putOpponent } from './opponents.service'
+
+export const opponentRoutes = ({ db, clock }: Context) => [
+  endpoint({
+    method: 'get',
+    path: '/teams/:team/opponents',
+    summary: 'Opponents of the team, next meeting first',
+    action: 'opponent:read',
+    params: InTeam,
+    response: OpponentList,
+    handle: async ({ caller }) => listReply(await listOpponents(db, caller.teamId, clock())),
+  }),
+  endpoint({
+    method: 'get',
+    path: '/teams/:team/opponents/:id',
+    summary: 'One opponent',
+    action: 'opponent:read',
+    params: OneRow,
+    response: OpponentRow,
+    handle: async ({ caller, params }) => {
+      const row = await findInTeam(db.manager, Opponent, caller.teamId, params.id, 'opponent')
+      return ok(presentOpponent(row, await countsOf(db, row, clock())), row.version)
+    },
+  }),
+  endpoint({
+    method: 'put',
+    path: '/teams/:team/opponents/:id',
+    summary: 'Add or change an opponent',
+    action: 'opponent:write',
+    params: OneRow,
+    body: OpponentBody,
+    response: OpponentRow,
+    handle: async ({ caller, params, body, ifMatch }) => {
+      const put = await putOpponent(db, { id: params.id, teamId: caller.teamId, body, ifMatch, now: clock() })
+      return putReply(put, presentOpponent(put.row, await countsOf(db, put.row, clock())))
+    },
+  }),
+]

@@ -1,0 +1,121 @@
+import { randomUUID } from 'node:crypto'
+import { IsNull, type DataSource, type EntityManager } from 'typeorm'
+import { PossessionBody, type PossessionPatch } from '@shared/possessions/schemas'
+import { possessionColumns, trapColumns } from '../../database/columnsOf'
+import { Counter } from '../../database/entities/Counter'
+import { Game } from '../../database/entities/Game'
+import { Possession } from '../../database/entities/Possession'
+import { ScoutedGame } from '../../database/entities/ScoutedGame'
+import { Trap } from '../../database/entities/Trap'
+import { findInTeam } from '../../database/findInTeam'
+import { putRow, type Put } from '../../database/putRow'
+import { faultsOf } from '../../http/faults'
+import { BadInput, Conflict, NeedsIfMatch, NotFound } from '../../http/problem'
+import { trapsOf, withParts } from './loadPossessions'
+import { bodyOfPossession, presentPossession, type WholePossession } from './possessions.presenter'
+
+interface Write {
+  id: string
+  teamId: string
+  ifMatch: number | null
+  now: Date
+}
+
+/** The rows of a game in the order they were played; deleted ones are not among them. */
+export async function listPossessions(
+  db: DataSource,
+  parent: { teamId: string } & ({ scoutedGameId: string } | { gameId: string }),
+): Promise<WholePossession[]> {
+  const rows = await db.getRepository(Possession).find({
+    where: { ...parent, deletedAt: IsNull() },
+    order: { number: 'ASC', createdAt: 'ASC' },
+  })
+  return withParts(db.manager, rows)
+}
+
+/** @throws NotFound, also for a deleted one */
+export async function getPossession(
+  manager: EntityManager,
+  teamId: string,
+  id: string,
+): Promise<WholePossession> {
+  const row = await findInTeam(manager, Possession, teamId, id, 'possession')
+  if (row.deletedAt !== null) throw new NotFound('possession')
+  const [whole] = await withParts(manager, [row])
+  if (!whole) throw new NotFound('possession')
+  return whole
+}
+
+/** The games and the counter that a body names must be the team's own. */
+async function checkParents(manager: EntityManager, teamId: string, body: PossessionBody): Promise<void> {
+  if (body.scoutedGameId !== null)
+    await findInTeam(manager, ScoutedGame, teamId, body.scoutedGameId, 'scouted game')
+  if (body.gameId !== null) await findInTeam(manager, Game, teamId, body.gameId, 'game')
+  if (body.counterId !== null) await findInTeam(manager, Counter, teamId, body.counterId, 'counter')
+}
+
+async function writeTraps(
+  manager: EntityManager,
+  possessionId: string,
+  traps: PossessionBody['traps'],
+  replace: boolean,
+) {
+  if (replace) await manager.delete(Trap, { possessionId })
+  const rows = trapColumns(possessionId, traps, randomUUID)
+  if (rows.length > 0) await manager.insert(Trap, rows)
+}
+
+async function put(manager: EntityManager, write: Write, body: PossessionBody): Promise<Put<Possession>> {
+  await checkParents(manager, write.teamId, body)
+  return putRow<Possession, PossessionBody>({
+    ...write,
+    manager,
+    entity: Possession,
+    what: 'possession',
+    body,
+    bodyOf: async (row) => {
+      if (row.deletedAt !== null)
+        throw new Conflict('This possession was deleted. Put it back first, or use a new id.')
+      return bodyOfPossession(row, await trapsOf(manager, row.id))
+    },
+    columnsOf: possessionColumns,
+    present: async (row) => presentPossession(await wholeOf(manager, row)),
+    after: (row, before) => writeTraps(manager, row.id, body.traps, before !== null),
+  })
+}
+
+async function wholeOf(manager: EntityManager, row: Possession): Promise<WholePossession> {
+  const [whole] = await withParts(manager, [row])
+  return whole ?? { row, traps: [], stills: [] }
+}
+
+/** @throws NotFound, Conflict, StaleVersion */
+export function putPossession(
+  db: DataSource,
+  write: Write,
+  body: PossessionBody,
+): Promise<{ put: Put<Possession>; whole: WholePossession }> {
+  return db.transaction(async (manager) => {
+    const done = await put(manager, write, body)
+    return { put: done, whole: await wholeOf(manager, done.row) }
+  })
+}
+
+/** Changes some fields; the whole row is checked again. @throws NotFound, NeedsIfMatch, BadInput, StaleVersion */
+export function patchPossession(
+  db: DataSource,
+  write: Write,
+  patch: PossessionPatch,
+): Promise<{ put: Put<Possession>; whole: WholePossession }> {
+  return db.transaction(async (manager) => {
+    const { row, traps } = await getPossession(manager, write.teamId, write.id)
+    if (write.ifMatch === null) throw new NeedsIfMatch()
+    const parsed = PossessionBody.safeParse(
+      { ...bodyOfPossession(row, traps), ...patch },
+      { reportInput: true },
+    )
+    if (!parsed.success) throw new BadInput(faultsOf(parsed.error))
+    const done = await put(manager, write, parsed.data)
+    return { put: done, whole: await wholeOf(manager, done.row) }
+  })
+}

@@ -1,0 +1,120 @@
+import { createHash } from 'node:crypto'
+import type { DataSource } from 'typeorm'
+import { LIMITS } from '@shared/limits'
+import type { StillFields } from '@shared/stills/schemas'
+import { PictureRefused, preparePicture } from '../../adapters/pictures'
+import type { StillFiles } from '../../adapters/stillFiles'
+import { Still } from '../../database/entities/Still'
+import { findInTeam } from '../../database/findInTeam'
+import { BadInput, Conflict, NotFound } from '../../http/problem'
+import { getPossession } from '../possessions/possessions.service'
+
+interface Upload {
+  teamId: string
+  possessionId: string
+  stillId: string
+  fields: StillFields
+  bytes: Buffer
+  now: Date
+}
+
+const REFUSALS: Record<PictureRefused['why'], string> = {
+  'not-an-image': 'This is not a picture that can be read. Send a JPEG, PNG or WebP.',
+  'too-many-pixels': 'This picture has too many pixels to be unpacked. Send a smaller one.',
+}
+
+async function prepare(bytes: Buffer) {
+  try {
+    return await preparePicture(bytes)
+  } catch (error) {
+    if (error instanceof PictureRefused)
+      throw new BadInput([{ field: 'still', message: REFUSALS[error.why] }])
+    throw error
+  }
+}
+
+/**
+ * Keeps a still of a possession. The same picture under the same id again changes nothing; another one
+ * is a conflict, for a picture is replaced by a new one, never in place.
+ * @throws NotFound, BadInput, Conflict
+ */
+export async function putStill(
+  db: DataSource,
+  files: StillFiles,
+  upload: Upload,
+): Promise<{ still: Still; created: boolean }> {
+  const { teamId, possessionId, stillId, fields, now } = upload
+  const digest = createHash('sha256').update(upload.bytes).digest('hex')
+  await getPossession(db.manager, teamId, possessionId)
+  const there = await same(db, upload, digest)
+  if (there) return { still: there, created: false }
+  await checkRoom(db, possessionId)
+  const picture = await prepare(upload.bytes)
+  await files.keep(teamId, stillId, picture)
+  try {
+    return await db.transaction(async (manager) => {
+      const { stills } = await getPossession(manager, teamId, possessionId)
+      if (stills.length >= LIMITS.stillsAPossession) throw full()
+      const still = manager.create(Still, {
+        id: stillId,
+        teamId,
+        possessionId,
+        position: Math.max(0, ...stills.map((other) => other.position)) + 1,
+        t: fields.t,
+        caption: fields.caption,
+        width: picture.width,
+        height: picture.height,
+        digest,
+        createdAt: now.toISOString(),
+      })
+      await manager.save(still, { reload: false })
+      return { still, created: true }
+    })
+  } catch (error) {
+    const winner = await db.getRepository(Still).findOneBy({ id: stillId })
+    if (!winner) await files.remove(teamId, stillId)
+    throw error
+  }
+}
+
+/** The still of this id when it is the same one; null when the id is new. */
+async function same(
+  db: DataSource,
+  { teamId, possessionId, stillId, fields }: Upload,
+  digest: string,
+): Promise<Still | null> {
+  const found = await db.getRepository(Still).findOneBy({ id: stillId })
+  if (!found) return null
+  if (found.teamId !== teamId) throw new NotFound('still')
+  if (
+    found.possessionId === possessionId &&
+    found.digest === digest &&
+    found.caption === fields.caption &&
+    found.t === fields.t
+  )
+    return found
+  throw new Conflict('Another picture has this id already. Send this one under a new id.')
+}
+
+const full = () =>
+  new Conflict(`A possession holds ${LIMITS.stillsAPossession} stills and these are there. Delete one first.`)
+
+async function checkRoom(db: DataSource, possessionId: string): Promise<void> {
+  if ((await db.getRepository(Still).countBy({ possessionId })) >= LIMITS.stillsAPossession) throw full()
+}
+
+/** Row and files go at once; a picture of minors is not kept for an undo. @throws NotFound */
+export async function deleteStill(
+  db: DataSource,
+  files: StillFiles,
+  which: { teamId: string; possessionId: string; stillId: string },
+): Promise<void> {
+  const still = await findInTeam(db.manager, Still, which.teamId, which.stillId, 'still')
+  if (still.possessionId !== which.possessionId) throw new NotFound('still')
+  await db.getRepository(Still).delete({ id: still.id })
+  await files.remove(still.teamId, still.id)
+}
+
+/** The still of an id, for serving its file. @throws NotFound */
+export const findStill = (db: DataSource, teamId: string, id: string): Promise<Still> =>
+  findInTeam(db.manager, Still, teamId, id, 'still')

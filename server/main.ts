@@ -1,0 +1,55 @@
+import { join } from 'node:path'
+import { createApp } from './app'
+import { boot, startHousekeeping } from './boot'
+import { serveClient } from './clientFiles'
+import { ConfigError, readConfig, type Config } from './config'
+import { DEMO_PASSWORD, DEMO_SIGN_INS } from './database/demo/people'
+
+const say = (line: string) => process.stdout.write(`${line}\n`)
+
+function configOrStop(): Config {
+  try {
+    return readConfig(process.env)
+  } catch (error) {
+    if (!(error instanceof ConfigError)) throw error
+    for (const fault of error.faults) process.stderr.write(`${fault}\n`)
+    process.exit(1)
+  }
+}
+
+const config = configOrStop()
+const { context } = await boot(config)
+const app = createApp(context)
+serveClient(app, join(import.meta.dirname, '../client'))
+const stopHousekeeping = startHousekeeping(context)
+
+const server = app.listen(config.port, config.host, () => {
+  const address = server.address()
+  const port = typeof address === 'object' && address !== null ? address.port : config.port
+  say(
+    `Overtop is at ${config.publicUrl ?? `http://${config.host === '0.0.0.0' ? 'localhost' : config.host}:${port}`}`,
+  )
+  if (config.demo) {
+    say(`Demo sign-ins, all with the password ${DEMO_PASSWORD}:`)
+    for (const { email, says } of DEMO_SIGN_INS) say(`  ${email.padEnd(30)} ${says}`)
+  }
+})
+server.on('error', (error: NodeJS.ErrnoException) => {
+  process.stderr.write(
+    error.code === 'EADDRINUSE'
+      ? `Port ${config.port} is taken. Set PORT to another one.\n`
+      : `Cannot listen on ${config.host}:${config.port}: ${error.code ?? error.message}\n`,
+  )
+  process.exit(1)
+})
+
+let stopping = false
+function stop(): void {
+  if (stopping) return
+  stopping = true
+  stopHousekeeping()
+  server.close(() => void context.db.destroy().then(() => process.exit(0)))
+  server.closeIdleConnections()
+}
+process.on('SIGINT', stop)
+process.on('SIGTERM', stop)
