@@ -1,5 +1,4 @@
 import type { Role } from '../vocabulary'
-import { walkDiagram } from '../court/diagramWalk'
 import { SHEET_BUDGET } from '../limits'
 import { pressDrawing, textsOf, wayCrop, wayDrawing } from './drawings'
 import { counterShown, wayShown, type WayShown } from './reader'
@@ -110,7 +109,7 @@ function named({ name, call }: FrozenCounter): string {
   return said ? `: ${name}` : ` “${call}”: ${name}`
 }
 
-/** The line of the change-up for a reader: her own, or that of whoever catches first. */
+/** The line of the change-up for a reader: her own, or what it is for whoever has no part in it. */
 function changeUpLine({ changeUp }: FrozenPlan, mine: SheetView['mine']): SheetContent['other'] {
   if (!changeUp) return null
   const call = `On “${changeUp.call || changeUp.name}”`
@@ -122,21 +121,19 @@ function changeUpLine({ changeUp }: FrozenPlan, mine: SheetView['mine']): SheetC
   }
   const someKnown = changeUp.roles.some(({ squadPlayerId }) => squadPlayerId !== null)
   if (mine?.firstCallRole && someKnown) return { lead: `${call}:`, line: 'you come off.' }
-  const first = firstCatch(changeUp)
-  return { lead: `${call}:`, line: `${first}, ${uncapitalised(lineOf(first))}` }
+  return { lead: `${call}:`, line: `${afterCall(changeUp)}.` }
+}
+
+/** "big in the middle" of "Box, big in the middle"; a name that does not begin so stays whole. */
+function afterCall({ name, call }: FrozenCounter): string {
+  const begins = call !== '' && name.toLowerCase().startsWith(`${call.toLowerCase()}, `)
+  return begins ? name.slice(call.length + 2) : name
 }
 
 const firstCallLine = ({ firstCall }: FrozenPlan): SheetContent['other'] => ({
   lead: 'First call:',
   line: `${firstCall.name}, without you.`,
 })
-
-/** The role that the throw-in goes to. */
-function firstCatch({ diagram }: FrozenCounter): Role {
-  for (const { moves } of walkDiagram(diagram))
-    for (const { move } of moves) if (move.kind === 'pass') return move.to
-  return diagram.start.ball
-}
 
 function sheetNumber(plan: number, { copy, copies }: Copy): string {
   if (copy === undefined) return `Sheet, plan ${plan}.`
