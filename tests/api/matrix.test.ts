@@ -1,0 +1,280 @@
+import { randomUUID } from 'node:crypto'
+import { afterAll, beforeAll, describe, expect, it } from 'vitest'
+import {
+  gameBody,
+  jpeg,
+  makeFixture,
+  opponentBody,
+  possessionBody,
+  scoutedGameBody,
+  type Fixture,
+} from '../support/fixture'
+import { OTHER_TEAM, PLAYER, startTestApp, TEAM, type Agent, type TestApp } from '../support/testApp'
+import { DEMO_RULES } from '@server/database/demo/rules'
+
+/**
+ * Every endpoint of the API's own description, with 401, 403, 400, another team's 404 and success. A
+ * route without a row here fails the test.
+ */
+interface Row {
+  /** Fills the path's parameters with rows of a team. */
+  at: (rows: Fixture) => Record<string, string>
+  /** Whether a player may. Staff always may unless `headOnly`. */
+  player?: boolean
+  headOnly?: boolean
+  success: number
+  body?: (rows: Fixture) => object
+  still?: boolean
+  ifMatch?: string
+  query?: string
+  /** A body or query that cannot be taken, and the field that must be named. */
+  bad: { body?: object; query?: string; field: string }
+}
+
+const badId = { field: 'id' }
+const rowsOf = {
+  opponent: (rows: Fixture) => ({ id: rows.opponent }),
+  scoutedGame: (rows: Fixture) => ({ id: rows.scoutedGame }),
+  possession: (rows: Fixture) => ({ id: rows.possession }),
+  game: (rows: Fixture) => ({ id: rows.game }),
+  still: (rows: Fixture) => ({ id: rows.possession, still: rows.still }),
+}
+const { key: _key, ...ruleBody } = DEMO_RULES[0] ?? { key: '' }
+const player = {
+  jersey: 44,
+  firstName: 'Wren',
+  skills: { handle: 1, 'throw-in': 1, 'long-arm': 1, decide: 1, sprint: 1, screen: 1 },
+}
+
+const TABLE: Record<string, Row> = {
+  'get /opponents': { at: () => ({}), success: 200, bad: { field: '' } },
+  'get /opponents/{id}': { at: rowsOf.opponent, success: 200, bad: badId },
+  'put /opponents/{id}': {
+    at: rowsOf.opponent,
+    success: 200,
+    body: () => opponentBody(),
+    bad: { body: { name: '', shortName: 'x' }, field: 'name' },
+  },
+  'get /opponents/{id}/scouted-games': { at: rowsOf.opponent, success: 200, bad: badId },
+  'get /opponents/{id}/tendencies': {
+    at: rowsOf.opponent,
+    success: 200,
+    bad: { query: 'trigger=sometimes', field: 'trigger.0' },
+  },
+  'get /opponents/{id}/evidence': {
+    at: rowsOf.opponent,
+    success: 200,
+    query: 'habit=press',
+    bad: { query: 'habit=whistling', field: 'habit' },
+  },
+  'get /scouted-games/{id}': { at: rowsOf.scoutedGame, success: 200, bad: badId },
+  'put /scouted-games/{id}': {
+    at: rowsOf.scoutedGame,
+    success: 200,
+    body: (rows) => scoutedGameBody(rows.opponent),
+    bad: { body: { playedOn: 'yesterday' }, field: 'playedOn' },
+  },
+  'get /scouted-games/{id}/possessions': { at: rowsOf.scoutedGame, success: 200, bad: badId },
+  'get /games/{id}/possessions': { at: rowsOf.game, success: 200, bad: badId },
+  'get /possessions/{id}': { at: rowsOf.possession, success: 200, bad: badId },
+  'put /possessions/{id}': {
+    at: rowsOf.possession,
+    success: 200,
+    body: (rows) => possessionBody(rows.scoutedGame),
+    bad: { body: { trigger: 'sometimes', number: 1 }, field: 'trigger' },
+  },
+  'patch /possessions/{id}': {
+    at: rowsOf.possession,
+    success: 200,
+    body: () => ({ outcome: 'through' }),
+    ifMatch: '"1"',
+    bad: { body: { outcome: 'victory' }, field: 'outcome' },
+  },
+  'post /possessions/{id}/restore': { at: rowsOf.possession, success: 200, body: () => ({}), bad: badId },
+  'put /possessions/{id}/stills/{still}': {
+    at: rowsOf.still,
+    success: 200,
+    still: true,
+    bad: { field: 'still' },
+  },
+  'get /stills/{id}': {
+    at: (rows) => ({ id: rows.still }),
+    success: 200,
+    bad: { query: 'size=huge', field: 'size' },
+  },
+  'delete /possessions/{id}/stills/{still}': { at: rowsOf.still, success: 204, bad: badId },
+  'get /counters': { at: () => ({}), success: 200, bad: { field: '' } },
+  'get /counters/{id}': { at: (rows) => ({ id: rows.counters[0] ?? '' }), success: 200, bad: badId },
+  'get /rules': { at: () => ({}), success: 200, bad: { field: '' } },
+  'put /rules/{id}': {
+    at: (rows) => ({ id: rows.rule }),
+    headOnly: true,
+    success: 200,
+    body: () => ruleBody,
+    bad: { body: { ...ruleBody, because: '' }, field: 'because' },
+  },
+  'get /squad': { at: () => ({}), success: 200, bad: { field: '' } },
+  'get /squad/{id}': { at: () => ({ id: PLAYER }), success: 200, bad: badId },
+  'put /squad/{id}': {
+    at: () => ({ id: PLAYER }),
+    headOnly: true,
+    success: 200,
+    body: () => player,
+    ifMatch: '"1"',
+    bad: { body: { ...player, jersey: 140 }, field: 'jersey' },
+  },
+  'get /games': { at: () => ({}), success: 200, bad: { field: '' } },
+  'get /games/{id}': { at: rowsOf.game, success: 200, bad: badId },
+  'put /games/{id}': {
+    at: rowsOf.game,
+    success: 200,
+    body: (rows) => gameBody(rows.opponent),
+    bad: { body: { tipOff: '20.3.2026' }, field: 'tipOff' },
+  },
+  'get /games/{id}/choices': { at: rowsOf.game, success: 200, bad: badId },
+  'get /games/{id}/plan': { at: rowsOf.game, success: 200, bad: badId },
+  'put /games/{id}/plan': {
+    at: rowsOf.game,
+    headOnly: true,
+    success: 201,
+    body: () => ({ id: randomUUID() }),
+    bad: { body: { id: randomUUID(), keys: ['a', 'b', 'c', 'd'] }, field: 'keys' },
+  },
+  'post /games/{id}/plan/sign-off': {
+    at: rowsOf.game,
+    headOnly: true,
+    success: 200,
+    body: (rows) => ({ planId: rows.plan, sheetId: rows.sheet }),
+    bad: { body: { planId: 'one', sheetId: randomUUID() }, field: 'planId' },
+  },
+  'get /games/{id}/sheets': { at: rowsOf.game, player: true, success: 200, bad: badId },
+  'get /sheets': { at: () => ({}), player: true, success: 200, bad: { field: '' } },
+  'get /sheets/{id}': { at: (rows) => ({ id: rows.sheet }), player: true, success: 200, bad: badId },
+  'get /sheets/{id}.pdf': {
+    at: (rows) => ({ id: rows.sheet }),
+    player: true,
+    success: 200,
+    bad: { query: 'paper=napkin', field: 'paper' },
+  },
+  'delete /possessions/{id}': { at: rowsOf.possession, success: 204, bad: badId },
+}
+
+/** Rows that change what later rows need go last, and in this order. */
+const LAST = [
+  'put /games/{id}/plan',
+  'delete /possessions/{id}/stills/{still}',
+  'delete /possessions/{id}',
+  'post /possessions/{id}/restore',
+]
+
+let test: TestApp
+let own: Fixture
+let other: Fixture
+
+beforeAll(async () => {
+  test = await startTestApp()
+  own = await makeFixture(test)
+  other = await makeFixture(test, OTHER_TEAM)
+}, 60_000)
+afterAll(() => test.stop())
+
+type Method = 'get' | 'put' | 'post' | 'patch' | 'delete'
+
+function fill(path: string, values: Record<string, string>): string {
+  return path.replace(/\{(\w+)\}/g, (_, name: string) => values[name] ?? '')
+}
+
+async function send(
+  agent: Pick<Agent, Method>,
+  key: string,
+  row: Row,
+  options: {
+    team?: string
+    values: Record<string, string>
+    body?: object
+    query?: string
+    picture?: Buffer | null
+  },
+) {
+  const [method = 'get', path = ''] = key.split(' ')
+  const query = options.query ? `?${options.query}` : ''
+  const sent = agent[method as Method](
+    `/api/teams/${options.team ?? TEAM}${fill(path, options.values)}${query}`,
+  )
+  if (row.ifMatch) void sent.set('If-Match', row.ifMatch)
+  if (row.still)
+    return options.picture
+      ? sent.attach('still', options.picture, 'a.jpg')
+      : sent.attach('wrong', Buffer.from('x'), 'a.jpg')
+  return options.body ? sent.send(options.body) : sent
+}
+
+const keys = [...Object.keys(TABLE).filter((key) => !LAST.includes(key)), ...LAST]
+
+describe('the endpoint matrix', () => {
+  it('has a row for every route of the description, and no other', async () => {
+    const answer = await test.anonymous().get('/api/openapi.json')
+    const described = Object.entries(answer.body.paths as Record<string, Record<string, unknown>>)
+      .filter(([path]) => path.startsWith('/teams/{team}'))
+      .flatMap(([path, methods]) =>
+        Object.keys(methods).map((method) => `${method} ${path.slice('/teams/{team}'.length)}`),
+      )
+    expect(Object.keys(TABLE).sort()).toEqual(described.sort())
+  })
+
+  describe.each(keys)('%s', (key) => {
+    const row = TABLE[key] as Row
+    const good = (rows: Fixture) => ({ values: row.at(rows), body: row.body?.(rows), query: row.query })
+
+    it('401 without a session', async () => {
+      const answer = await send(test.anonymous(), key, row, { ...good(own), picture: await jpeg() })
+      expect(answer.status).toBe(401)
+      expect(answer.type).toBe('application/problem+json')
+    })
+
+    it.runIf(!row.player)('403 for a player', async () => {
+      const answer = await send(await test.as('player'), key, row, { ...good(own), picture: await jpeg() })
+      expect(answer.status).toBe(403)
+    })
+
+    it.runIf(row.headOnly)('403 for an assistant coach', async () => {
+      expect((await send(await test.as('assistant'), key, row, good(own))).status).toBe(403)
+    })
+
+    it('400 names the field', async () => {
+      const head = await test.as('head')
+      if (row.bad.field === '') {
+        // Nothing but the team can be wrong here.
+        const answer = await send(head, key, row, { values: {}, team: 'herons' })
+        expect(answer.status).toBe(404)
+        return
+      }
+      const bad =
+        row.bad === badId
+          ? { values: { ...row.at(own), id: 'first' }, body: row.body?.(own) }
+          : { values: row.at(own), body: row.bad.body, query: row.bad.query }
+      const answer = await send(head, key, row, { ...bad, picture: null })
+      expect(answer.status).toBe(400)
+      const fields = (answer.body.errors as { field: string; message: string }[]).map((error) => error.field)
+      expect(fields).toContain(row.bad.field)
+    })
+
+    it('404 for a row of another team, and for another team’s address', async () => {
+      const head = await test.as('head')
+      const foreign = await send(head, key, row, { ...good(other), team: OTHER_TEAM, picture: await jpeg() })
+      expect(foreign.status).toBe(404)
+      if (Object.keys(row.at(own)).length === 0 || 'id' in row.at(own) === false) return
+      const values =
+        row.at(other).id === row.at(own).id ? { id: '44444444-4444-4444-8444-444444444444' } : row.at(other)
+      const smuggled = await send(head, key, row, { ...good(other), values, picture: await jpeg() })
+      expect(smuggled.status).toBe(404)
+      expect(smuggled.body.detail).not.toMatch(/other|another|foreign/i)
+    })
+
+    it(`${row.success} for ${row.headOnly ? 'the head coach' : row.player ? 'a player' : 'an assistant coach'}`, async () => {
+      const agent = await test.as(row.headOnly ? 'head' : row.player ? 'player' : 'assistant')
+      const answer = await send(agent, key, row, { ...good(own), picture: await jpeg() })
+      expect([answer.status, answer.status >= 400 ? answer.body : null]).toEqual([row.success, null])
+    })
+  })
+})
