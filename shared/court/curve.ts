@@ -92,8 +92,14 @@ interface Sample {
   point: Point
 }
 
+/** Curves never change, so what was measured once holds; a zigzag asks for its curve a hundred times. */
+const measured = new WeakMap<Curve, Sample[]>()
+
 function samples(curve: Curve): Sample[] {
+  const known = measured.get(curve)
+  if (known) return known
   const list: Sample[] = []
+  measured.set(curve, list)
   let s = 0
   curve.forEach((piece, index) => {
     for (let i = index === 0 ? 0 : 1; i <= SAMPLES; i += 1) {

@@ -27,7 +27,9 @@ export function placeWords(place: InFractions): string {
 }
 
 function betweenLanes(x: number, y: number, side: string): string {
-  const central = y > 0.33 && y < 0.67
+  // By the baskets the lane's edges have names of their own, so the middle is narrower there.
+  const aside = Math.abs(y - 0.5)
+  const central = aside < (x < 0.26 || x > 0.74 ? 0.1 : 0.17)
   if (x > 0.86 && central) return 'the basket'
   if (x < 0.16) return central ? 'our own basket' : `the ${side} block`
   if (x < 0.26) return central ? 'our free-throw line' : `the ${side} elbow`
