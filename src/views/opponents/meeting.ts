@@ -26,6 +26,15 @@ export const isSaid = (meeting: Meeting, slot: Slot): boolean => {
   return meeting.place !== ''
 }
 
+/** Reads a time as it is typed: "19:15", "19.15", "1915", "7:15", "19 h"; null when it is none. */
+export function timeOf(typed: string): string | null {
+  const found = /^\s*(\d{1,2})(?:\s*[:.h]?\s*(\d{2}))?\s*h?\s*$/i.exec(typed)
+  if (found === null) return null
+  const [hour, minute] = [Number(found[1]), Number(found[2] ?? 0)]
+  if (hour > 23 || minute > 59) return null
+  return `${String(hour).padStart(2, '0')}:${String(minute).padStart(2, '0')}`
+}
+
 /** The first slot still to say, or null when the sentence is whole. */
 export const nextSlot = (meeting: Meeting): Slot | null =>
   SLOTS.find((slot) => !isSaid(meeting, slot)) ?? null
