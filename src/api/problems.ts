@@ -53,5 +53,5 @@ export class UnreadableAnswer extends Error {
 
 /** True for the error that an aborted request ends with; it is nobody's trouble. */
 export function isAbort(error: unknown): boolean {
-  return error instanceof DOMException && error.name === 'AbortError'
+  return typeof error === 'object' && error !== null && 'name' in error && error.name === 'AbortError'
 }

@@ -2,6 +2,7 @@ import {
   createRouter,
   createWebHistory,
   START_LOCATION,
+  type RouteRecordRaw,
   type Router,
   type RouterHistory,
   type RouterScrollBehavior,
@@ -9,14 +10,18 @@ import {
 import type { SessionStore } from '@/stores/session'
 import { guard, homeOf } from './guard'
 import { focusPage } from './focusPage'
-import { routes } from './routes'
+import { routes as appRoutes } from './routes'
 
-/** The router with its guard, titles, focus and scroll; the session comes in so that tests can bring their own. */
-export function createAppRouter(session: SessionStore, history: RouterHistory = createWebHistory()): Router {
+/** The router with its guard, titles, focus and scroll; all it stands on comes in, so that tests can bring their own. */
+export function createAppRouter(
+  session: SessionStore,
+  history: RouterHistory = createWebHistory(),
+  routes: readonly RouteRecordRaw[] = appRoutes,
+): Router {
   const router = createRouter({
     history,
     scrollBehavior,
-    routes,
+    routes: [...routes],
   })
 
   router.beforeEach((to) => guard(to, session))
