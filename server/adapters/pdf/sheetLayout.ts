@@ -46,7 +46,7 @@ export function layOut(doc: Page, page: SheetContent, plan: FrozenPlan, frame: F
         texts.header,
         figureBlock(doc, press, frame, frame.width * shrink),
         texts.lines,
-        pairBlock(doc, frame, texts, figureBlock(doc, way, texts.left, texts.left.width * shrink)),
+        pairBlock(doc, frame, texts, figureBlock(doc, way, texts.left, texts.left.width * shrink, 'left')),
         texts.other,
         texts.keys,
         texts.foot,

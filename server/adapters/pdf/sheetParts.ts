@@ -7,10 +7,16 @@ import { STYLES, type Sizes } from './sheetSizes'
 import { artifact, tagged } from './tags'
 import { drawParagraph, paragraph, rule, widthOf, type Page } from './typeset'
 
-/** A drawing, in the middle of its column where it is narrower. */
-export function figureBlock(doc: Page, scene: Scene, column: Column, width: number): Block {
+/** A drawing; in the middle of its column, or at its left edge, where it is narrower. */
+export function figureBlock(
+  doc: Page,
+  scene: Scene,
+  column: Column,
+  width: number,
+  place: 'middle' | 'left' = 'middle',
+): Block {
   const height = sceneHeight(scene, width)
-  const x = column.x + (column.width - width) / 2
+  const x = place === 'left' ? column.x : column.x + (column.width - width) / 2
   return {
     height,
     draw: (y, tree) =>
@@ -90,8 +96,9 @@ function fiveBlock(doc: Page, reader: Five, { x, width }: Column, sizes: Sizes):
       1.2,
     ),
   }))
-  const pad = sizes.body * 0.42
-  const heightOf = ({ words }: (typeof rows)[number]) => Math.max(words.height, 2 * r) + 2 * pad
+  const pad = sizes.body * 0.4
+  const lift = Math.max(0, r - sizes.body * 0.345)
+  const heightOf = ({ words }: (typeof rows)[number]) => Math.max(words.height + lift, 2 * r) + 2 * pad
   return {
     height: heading.height + 8 + rows.reduce((sum, row) => sum + heightOf(row), 0) - pad,
     draw(y, tree) {
@@ -99,7 +106,6 @@ function fiveBlock(doc: Page, reader: Five, { x, width }: Column, sizes: Sizes):
       let top = y + heading.height + 8
       for (const row of rows) {
         const at = top
-        const lift = Math.max(0, r - sizes.body * 0.345)
         artifact(doc, () => rule(doc, x, at, width, 0.75, PRINT_INKS['court-line']))
         tagged(doc, tree, 'P', () => {
           token(doc, row.role, x + r, at + pad + r, r)

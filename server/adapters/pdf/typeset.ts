@@ -142,6 +142,9 @@ function joined(words: readonly Word[]): Run[] {
     if (last?.style === word.style) last.text += text
     else runs.push({ text, style: word.style })
   }
+  // Unseen, but without it a reading voice runs the last word of a line into the next.
+  const last = runs.at(-1)
+  if (last) last.text += ' '
   return runs
 }
 
