@@ -55,7 +55,10 @@ export function restorePossession(
   })
 }
 
-/** Rows whose ten minutes are over go for good, with their stills' files. Returns how many went. */
+/**
+ * Rows whose ten minutes are over go for good, with their stills' files. Returns how many went. Files go
+ * first: if that fails, the row is still there to try again from.
+ */
 export async function purgeDeleted(db: DataSource, files: StillFiles, now: Date): Promise<number> {
   const over = await db
     .getRepository(Possession)
@@ -65,8 +68,10 @@ export async function purgeDeleted(db: DataSource, files: StillFiles, now: Date)
     .getMany()
   for (const { id } of over) {
     const stills = await db.getRepository(Still).findBy({ possessionId: id })
-    await db.getRepository(Possession).delete({ id })
     for (const still of stills) await files.remove(still.teamId, still.id)
+    await db.getRepository(Possession).delete({ id })
   }
+  // What was overwritten in the database lives on in its log until that is emptied.
+  await db.query('PRAGMA wal_checkpoint(TRUNCATE)')
   return over.length
 }

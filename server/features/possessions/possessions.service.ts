@@ -10,7 +10,7 @@ import { Trap } from '../../database/entities/Trap'
 import { findInTeam } from '../../database/findInTeam'
 import { putRow, type Put } from '../../database/putRow'
 import { faultsOf } from '../../http/faults'
-import { BadInput, Conflict, NeedsIfMatch, NotFound } from '../../http/problem'
+import { BadInput, Conflict, NeedsIfMatch, NotFound, StaleVersion } from '../../http/problem'
 import { trapsOf, withParts } from './loadPossessions'
 import { bodyOfPossession, presentPossession, type WholePossession } from './possessions.presenter'
 
@@ -108,8 +108,11 @@ export function patchPossession(
   patch: PossessionPatch,
 ): Promise<{ put: Put<Possession>; whole: WholePossession }> {
   return db.transaction(async (manager) => {
-    const { row, traps } = await getPossession(manager, write.teamId, write.id)
+    const present = await getPossession(manager, write.teamId, write.id)
+    const { row, traps } = present
     if (write.ifMatch === null) throw new NeedsIfMatch()
+    // Before the check of the whole row: whoever changed an old version is to see the present one.
+    if (write.ifMatch !== row.version) throw new StaleVersion(presentPossession(present), row.version)
     const parsed = PossessionBody.safeParse(
       { ...bodyOfPossession(row, traps), ...patch },
       { reportInput: true },
