@@ -1,6 +1,6 @@
 import type { Role } from '../vocabulary'
 import { walkedWay, type Drawing } from './counterStep'
-import { bent, distance, pointAt, lengthOf, straight, through, trimmed, type Curve } from './curve'
+import { bent, distance, pointAt, lengthOf, startOf, straight, through, trimmed, type Curve } from './curve'
 import type { Diagram, Move } from './diagram'
 import { startOfDiagram, walkDiagram, type WalkedMove } from './diagramWalk'
 import { toMetres, type InMetres } from './frame'
@@ -75,6 +75,7 @@ class Trip {
   private readonly done: Walk[] = []
   private ballAt: InMetres
   private holder: Role
+  private carry: { kind: 'dribble' | 'cut'; curve: Curve } | null = null
 
   constructor(
     diagram: Diagram,
@@ -111,11 +112,13 @@ class Trip {
 
   /** Walks that are worth a line; short ones that end in a catch are told by the token there. */
   finish(): Walk[] {
+    this.drawCarry()
     const left = [...this.pending.values()].filter((walk) => !walk.passed)
     return [...this.done.filter((walk) => walkLength(walk) > SHORT_WALK), ...left]
   }
 
   private pass(move: Extract<Move, { kind: 'pass' }>, to: InMetres): void {
+    this.drawCarry()
     const walk = this.pending.get(move.to)
     if (walk) {
       this.pending.delete(move.to)
@@ -144,11 +147,20 @@ class Trip {
     this.holder = move.to
   }
 
+  /** Legs of one carry are drawn as one way, with one arrow. */
   private ballMove(kind: 'dribble' | 'cut', to: InMetres, bend: number): void {
-    const { size, pen } = this.drawing
-    const atToken = this.catches.some(({ at }) => distance(at, this.ballAt) < size.r)
-    this.push(kind, trimmed(bent(this.ballAt, to, bend), atToken ? size.r + pen.px(2) : 0, 0))
+    if (this.carry && this.carry.kind !== kind) this.drawCarry()
+    this.carry = { kind, curve: [...(this.carry?.curve ?? []), ...bent(this.ballAt, to, bend)] }
     this.ballAt = to
+  }
+
+  private drawCarry(): void {
+    if (!this.carry) return
+    const { size, pen } = this.drawing
+    const start = startOf(this.carry.curve)
+    const atToken = this.catches.some(({ at }) => distance(at, start) < size.r)
+    this.push(this.carry.kind, trimmed(this.carry.curve, atToken ? size.r + pen.px(2) : 0, 0))
+    this.carry = null
   }
 
   private push(kind: 'pass' | 'dribble' | 'cut', way: Curve): void {

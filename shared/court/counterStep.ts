@@ -3,7 +3,7 @@ import { bent, keptInside, straight, trimmed, type Curve } from './curve'
 import type { Diagram } from './diagram'
 import { stateAt, walkDiagram, type WalkedMove, type WalkedStep } from './diagramWalk'
 import { toMetres, type InFractions, type InMetres } from './frame'
-import { movement } from './movement'
+import { BESIDE, movement } from './movement'
 import type { Pen } from './pen'
 import type { RulePack } from './rulePacks'
 import type { GroupNode, SceneNode } from './scene'
@@ -36,12 +36,20 @@ export function counterStep(
     : []
   return [
     { kind: 'group', id: 'ghosts', nodes: drawing.ghosts ? ghosts(diagram, index, step, drawing) : [] },
-    { kind: 'group', id: 'moves', nodes: step.moves.flatMap((move) => stepMove(move, index, step, drawing)) },
+    {
+      kind: 'group',
+      id: 'moves',
+      nodes: oursOnTop(step.moves).flatMap((move) => stepMove(move, index, step, drawing)),
+    },
     { kind: 'group', id: 'theirs', nodes: theirs },
     { kind: 'group', id: 'tokens', nodes: tokens },
     ...(holder ? [ballAt(metres(holder), size, pen)] : []),
   ]
 }
+
+/** Our way lies over theirs. */
+const oursOnTop = (moves: readonly WalkedMove[]): WalkedMove[] =>
+  [...moves].sort((a, b) => Number(b.move.kind === 'theirs') - Number(a.move.kind === 'theirs'))
 
 /** Whoever has the ball at some moment of a step. */
 function ballWay(step: WalkedStep): Set<Role> {
@@ -91,7 +99,13 @@ function stepMove(
   const startGap = stands(from) ? size.r + pen.px(2) : move.kind === 'pass' ? size.r * 0.6 : 0
   const endGap = stands(to) ? size.r + pen.px(3) : meets ? size.r * 0.8 : 0
   const way = trimmed(walkedWay(pack, from, to, bend), startGap, endGap)
-  const nodes = movement(kind, way, pen, move.kind === 'theirs' ? 'their' : 'our')
+  const nodes = movement(
+    kind,
+    way,
+    pen,
+    move.kind === 'theirs' ? 'their' : 'our',
+    move.kind === 'theirs' ? BESIDE : 1,
+  )
   return nodes.length === 0 ? [] : [{ kind: 'group', id: `move-${step}-${walked.index}`, nodes }]
 }
 

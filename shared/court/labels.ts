@@ -28,6 +28,8 @@ export interface Label {
   wishes(size: LabelSize): readonly Spot[]
   /** Where it may cover a mark rather than stray from its own; labels are still kept apart. */
   fallbacks?(size: LabelSize): readonly Spot[]
+  /** The mark that it may lie on: one of those kept clear, by identity. */
+  own?: Box
   /** How far it may move from its first wish before it covers a mark instead, metres. Default: no limit. */
   stray?: number
 }
@@ -67,7 +69,8 @@ export function placeLabels(
     const taken = placed.map((other) => grown(other.box, gap))
     const boxAt = (at: Point): Box => ({ x: at.x, y: at.y, ...size })
     const free = (box: Box) => inside(box, area) && !taken.some((other) => overlaps(box, other))
-    const clear = (box: Box) => free(box) && !keepClear.some((other) => overlaps(box, other))
+    const clear = (box: Box) =>
+      free(box) && !keepClear.some((other) => other !== label.own && overlaps(box, other))
     const wishes = label.wishes(size)
     const wish = boxAt(wishes[0] ?? area)
     const near = () => nearest(wish, area, gap * 2, clear, label.stray)

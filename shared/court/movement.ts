@@ -46,6 +46,9 @@ export function movement(
   return [...casing(curve, kind, weight, pen), ...(d ? [line] : []), end]
 }
 
+/** How much wider than its line a casing is, px; less where many lines share a small court. */
+const casingPx = (pen: Pen): number => (pen.pxPerMetre < 18 ? 3 : 5)
+
 /** A floor-coloured band under the part of the way that lies on the court. */
 function casing(curve: Curve, kind: MovementKind, weight: number, pen: Pen): SceneNode[] {
   const length = lengthOf(curve)
@@ -60,7 +63,7 @@ function casing(curve: Curve, kind: MovementKind, weight: number, pen: Pen): Sce
       kind: 'path',
       d: curveD(onCourt),
       stroke: 'floor',
-      strokeWidth: weight + wide + pen.px(5),
+      strokeWidth: weight + wide + pen.px(casingPx(pen)),
       cap: 'butt',
     },
   ]

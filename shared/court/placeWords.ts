@@ -34,7 +34,7 @@ function betweenLanes(x: number, y: number, side: string): string {
   if (x < 0.16) return central ? 'our own basket' : `the ${side} block`
   if (x < 0.26) return central ? 'our free-throw line' : `the ${side} elbow`
   if (x < 0.46) return central ? 'the middle' : `the ${side} lane`
-  if (x < 0.54) return central ? 'half court, middle' : `half court, ${side}`
+  if (x < 0.54) return central ? 'the middle of half court' : `half court on the ${side}`
   if (x < 0.74) return central ? 'the front middle' : `the front ${side} lane`
   return central ? 'their free-throw line' : `the front ${side} elbow`
 }

@@ -39,6 +39,7 @@ export function pressLabels({ options, pen, room, front, denied }: Input): Label
       lines: lines(options.room, options.room.note ?? roomWords(options.room.lane), countPx * 1.08),
       wishes: (size) => [within(room, size), ...beside(room, gap, size)],
       fallbacks: (size) => [within(room, size)],
+      own: room,
       stray: 0,
     })
   }

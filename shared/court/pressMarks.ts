@@ -65,7 +65,7 @@ export function pickupFront(
   ]
   for (let i = 0; i < teeth; i += 1) {
     const y = top + ((bottom - top) * (i + 0.5)) / teeth
-    const half = pen.px(5.5)
+    const half = pen.px(6)
     nodes.push({
       kind: 'path',
       d: polygonD({ x, y: y - half }, { x: x - tooth, y }, { x, y: y + half }),
@@ -137,7 +137,7 @@ export function deniedLane(pack: RulePack, lane: Denied, side: BallSide, pen: Pe
 
 /** Where the room lies that a press leaves; fractions, for the ball on the right. */
 const ROOMS: Record<Lane, { x0: number; x1: number; y0: number; y1: number }> = {
-  middle: { x0: 0.24, x1: 0.395, y0: 0.335, y1: 0.665 },
+  middle: { x0: 0.25, x1: 0.4, y0: 0.335, y1: 0.665 },
   sideline: { x0: 0.23, x1: 0.45, y0: 0.76, y1: 0.97 },
   long: { x0: 0.66, x1: 0.84, y0: 0.33, y1: 0.67 },
   'pass-back': { x0: 0.02, x1: 0.15, y0: 0.35, y1: 0.65 },

@@ -64,6 +64,7 @@ export function pressScene(options: PressSceneOptions): Scene {
       ...boxes,
       ...standing,
       ...(front ? [front.box] : []),
+      ...(room ? [room] : []),
       ...denied.map(({ way }) => way.box),
     ]
     const wanted = pressLabels({ options, pen, room, front: front?.box ?? null, denied })
