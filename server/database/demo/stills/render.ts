@@ -1,0 +1,98 @@
+import sharp from 'sharp'
+import { toMetres } from '@shared/court/frame'
+import { rulePack } from '@shared/court/rulePacks'
+import { seeded } from '../random'
+import { cameraAt, type Vec } from './camera'
+import { figure, type Kit, type Pose } from './figures'
+import { arc, basket, boards, crowd, floor } from './hall'
+
+export interface StillPlayer {
+  /** Fractions of the court, as everywhere (RECORD.md section 2). */
+  x: number
+  y: number
+  kit: Kit
+  pose: Pose
+}
+
+/** An invented frame of film: where the camera looks and who stands where. */
+export interface StillSpec {
+  seed: number
+  look: { x: number; y: number }
+  /** 1 is a wide picture of a third of the floor; 2 is twice as near. */
+  zoom: number
+  players: StillPlayer[]
+  /** A white ring on the floor round this place. */
+  ring: { x: number; y: number } | null
+}
+
+const WIDTH = 1600
+const HEIGHT = 900
+/** Where the film camera stands: up in the seats behind the right sideline. */
+const CAMERA = { back: 5.2, high: 3.3 }
+const FIBA = rulePack('fiba')
+
+const metres = (place: { x: number; y: number }) => {
+  const { x, y } = toMetres(FIBA, { x: place.x, y: place.y })
+  return { x, y }
+}
+
+/** Draws a still: grey, 1600 by 900, JPEG; the same bytes for the same spec on one version of sharp. */
+export async function renderStill(spec: StillSpec): Promise<Buffer> {
+  const random = seeded(spec.seed)
+  const target = metres(spec.look)
+  const from: Vec = [target.x + random.between(1.5, 3), FIBA.court.width + CAMERA.back, CAMERA.high]
+  const camera = cameraAt(from, [target.x, target.y, 1.05], 0.95 * spec.zoom, WIDTH, HEIGHT)
+  const stands = svg(`<rect width="100%" height="100%" fill="#1b1b1d"/>${crowd(camera, random)}`)
+  const players = spec.players
+    .map((player) => ({ ...player, ...metres(player) }))
+    .sort((a, b) => a.y - b.y || a.x - b.x)
+    .map((player) => figure(camera, player, player.kit, player.pose, random))
+  const front = svg(
+    `<defs><linearGradient id="floor" x1="0" y1="0" x2="0" y2="1"><stop offset="0" stop-color="#a09f9c"/><stop offset="1" stop-color="#cfcdc8"/></linearGradient>` +
+      `<radialGradient id="dim" cx=".5" cy=".52" r=".75"><stop offset=".55" stop-color="#000" stop-opacity="0"/><stop offset="1" stop-color="#000" stop-opacity=".34"/></radialGradient></defs>` +
+      floor(camera) +
+      boards(camera) +
+      basket(camera) +
+      ringOn(spec, camera) +
+      players.join('') +
+      `<rect width="100%" height="100%" fill="url(#dim)"/>`,
+  )
+  const raw = { width: WIDTH, height: HEIGHT, channels: 4 } as const
+  const behind = await sharp(stands).blur(2.2).ensureAlpha().raw().toBuffer()
+  const ahead = await sharp(front).blur(0.8).ensureAlpha().raw().toBuffer()
+  return sharp(behind, { raw })
+    .composite([
+      { input: ahead, raw },
+      { input: grain(spec.seed), raw },
+    ])
+    .greyscale()
+    .jpeg({ quality: 74, mozjpeg: true })
+    .toBuffer()
+}
+
+const svg = (body: string) =>
+  Buffer.from(
+    `<svg xmlns="http://www.w3.org/2000/svg" width="${WIDTH}" height="${HEIGHT}" viewBox="0 0 ${WIDTH} ${HEIGHT}">${body}</svg>`,
+  )
+
+function ringOn({ ring }: StillSpec, camera: ReturnType<typeof cameraAt>): string {
+  if (!ring) return ''
+  const { x, y } = metres(ring)
+  const outline = camera.outline(arc(x, y, 1.25, 0, Math.PI * 2, 40).map(([a, b]): Vec => [a, b, 0]))
+  return (
+    `<polygon points="${outline}" fill="none" stroke="#222" stroke-width="11" opacity=".55"/>` +
+    `<polygon points="${outline}" fill="none" stroke="#fff" stroke-width="6.5" stroke-dasharray="26 15"/>`
+  )
+}
+
+/** Film grain: grey specks of little weight. */
+function grain(seed: number): Buffer {
+  const random = seeded(seed ^ 0x5eed)
+  const pixels = Buffer.alloc(WIDTH * HEIGHT * 4)
+  for (let i = 0; i < pixels.length; i += 4) {
+    const speck = random.next()
+    pixels[i] = pixels[i + 1] = pixels[i + 2] = speck < 0.5 ? 0 : 255
+    pixels[i + 3] = Math.round(Math.abs(speck - 0.5) * 34)
+  }
+  return pixels
+}
