@@ -39,7 +39,7 @@ export function listed(
   }
 }
 
-const NUMBERS = 'no one two three four five six seven eight nine ten eleven twelve'.split(' ')
+const NUMBERS = 'none one two three four five six seven eight nine ten eleven twelve'.split(' ')
 const inWords = (count: number) => NUMBERS[count] ?? String(count)
 const capital = (text: string) => text.charAt(0).toUpperCase() + text.slice(1)
 
@@ -47,9 +47,10 @@ const capital = (text: string) => text.charAt(0).toUpperCase() + text.slice(1)
 export function countedSentence(ahead: readonly Listed[], behind: readonly Listed[]): string {
   const sum = (key: 'possessions' | 'pressed' | 'scoutedGames') =>
     [...ahead, ...behind].reduce((total, row) => total + row.opponent.counts[key], 0)
-  const behindWords = behind.length === 0 ? '' : `, ${inWords(behind.length)} without a date`
+  const behindWords = behind.length === 0 ? '' : `, ${inWords(behind.length)} with none ahead`
   const games = sum('scoutedGames')
-  const met = capital(`${inWords(ahead.length)} ahead of us${behindWords}.`)
+  const aheadWords = ahead.length === 0 ? 'no one' : inWords(ahead.length)
+  const met = capital(`${aheadWords} ahead of us${behindWords}.`)
   if (sum('possessions') === 0) return `${met} Nothing counted yet.`
   return `${met} ${sum('possessions')} possessions counted in ${games} ${games === 1 ? 'game' : 'games'}, ${sum('pressed')} of them pressed.`
 }
