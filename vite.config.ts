@@ -33,7 +33,6 @@ export default defineConfig(({ command, isSsrBuild, mode }) => {
     publicDir: isSsrBuild ? false : 'public',
     build: isSsrBuild
       ? {
-          ssr: 'server/main.ts',
           outDir: 'dist/server',
           target: 'node20',
           minify: false,

@@ -52,6 +52,8 @@ export const Situation = z.object({
   n: z.number().int(),
 })
 
+export type Situation = z.infer<typeof Situation>
+
 export const TendencyRead = z.object({
   opponentId: z.uuid(),
   /** Rows in the filter that count, and rows left out because their stretch was not covered. */

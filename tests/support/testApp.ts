@@ -154,3 +154,12 @@ export async function startTestApp(
     },
   }
 }
+
+/** The session cookie of a person, for clients that are not supertest's. */
+export async function teamCookie(test: TestApp, who: Who): Promise<string> {
+  const answer = await request(test.app)
+    .post('/api/session')
+    .send({ email: `${who.toLowerCase()}@club.example`, password: PASSWORD })
+  const [cookie = ''] = (answer.headers['set-cookie'] as unknown as string[] | undefined) ?? []
+  return cookie.split(';')[0] ?? ''
+}
