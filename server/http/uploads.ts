@@ -39,7 +39,7 @@ export function oneFile(field: string, bytes: number): RequestHandler {
             message: 'The picture did not arrive whole. Send it again.',
           }),
         )
-      if (!req.file)
+      if (!req.file?.size)
         return next(
           refuse(400, 'bad-input', 'Cannot be taken', { field, message: 'There is no picture. Add one.' }),
         )

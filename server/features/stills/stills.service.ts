@@ -1,5 +1,5 @@
 import { createHash } from 'node:crypto'
-import type { DataSource } from 'typeorm'
+import type { DataSource, EntityManager } from 'typeorm'
 import { LIMITS } from '@shared/limits'
 import type { StillFields } from '@shared/stills/schemas'
 import { PictureRefused, preparePicture } from '../../adapters/pictures'
@@ -46,15 +46,19 @@ export async function putStill(
   const { teamId, possessionId, stillId, fields, now } = upload
   const digest = createHash('sha256').update(upload.bytes).digest('hex')
   await getPossession(db.manager, teamId, possessionId)
-  const there = await same(db, upload, digest)
+  const there = await same(db.manager, upload, digest)
   if (there) return { still: there, created: false }
-  await checkRoom(db, possessionId)
+  await checkRoom(db.manager, possessionId)
   const picture = await prepare(upload.bytes)
-  await files.keep(teamId, stillId, picture)
+  let kept = false
   try {
+    // Asked again, for meanwhile another request may have had its turn. Row first, then the files, before
+    // anybody else's: so the files under an id are always those of its row.
     return await db.transaction(async (manager) => {
       const { stills } = await getPossession(manager, teamId, possessionId)
-      if (stills.length >= LIMITS.stillsAPossession) throw full()
+      const winner = await same(manager, upload, digest)
+      if (winner) return { still: winner, created: false }
+      await checkRoom(manager, possessionId)
       const still = manager.create(Still, {
         id: stillId,
         teamId,
@@ -67,23 +71,24 @@ export async function putStill(
         digest,
         createdAt: now.toISOString(),
       })
-      await manager.save(still, { reload: false })
+      await manager.insert(Still, still)
+      await files.keep(teamId, stillId, picture)
+      kept = true
       return { still, created: true }
     })
   } catch (error) {
-    const winner = await db.getRepository(Still).findOneBy({ id: stillId })
-    if (!winner) await files.remove(teamId, stillId)
+    if (kept) await files.remove(teamId, stillId)
     throw error
   }
 }
 
 /** The still of this id when it is the same one; null when the id is new. */
 async function same(
-  db: DataSource,
+  manager: EntityManager,
   { teamId, possessionId, stillId, fields }: Upload,
   digest: string,
 ): Promise<Still | null> {
-  const found = await db.getRepository(Still).findOneBy({ id: stillId })
+  const found = await manager.findOneBy(Still, { id: stillId })
   if (!found) return null
   if (found.teamId !== teamId) throw new NotFound('still')
   if (
@@ -96,11 +101,11 @@ async function same(
   throw new Conflict('Another picture has this id already. Send this one under a new id.')
 }
 
-const full = () =>
-  new Conflict(`A possession holds ${LIMITS.stillsAPossession} stills and these are there. Delete one first.`)
-
-async function checkRoom(db: DataSource, possessionId: string): Promise<void> {
-  if ((await db.getRepository(Still).countBy({ possessionId })) >= LIMITS.stillsAPossession) throw full()
+async function checkRoom(manager: EntityManager, possessionId: string): Promise<void> {
+  if ((await manager.countBy(Still, { possessionId })) >= LIMITS.stillsAPossession)
+    throw new Conflict(
+      `A possession holds ${LIMITS.stillsAPossession} stills and these are there. Delete one first.`,
+    )
 }
 
 /** Row and files go at once; a picture of minors is not kept for an undo. @throws NotFound */
