@@ -104,7 +104,7 @@ export function mount(router: Router, spec: Endpoint, findCaller: FindCaller): v
   const check: RequestHandler = async (req, res, next) => {
     if (!req.user) throw new NotSignedIn()
     const caller = await findCaller(req, String(req.params['team']))
-    if (!caller) throw new NotFound('team')
+    if (!caller) throw new NotFound('team', '')
     if (!may(caller.role, spec.action)) throw new NotAllowed()
     const faults: FieldFault[] = []
     parse(spec.params, req.params, faults)

@@ -1,17 +1,40 @@
 import { z } from 'zod'
 import { Problem } from '@shared/http/common'
+import { Condition } from '@shared/rules/schemas'
 import { Session, SignIn } from '@shared/session/schemas'
 import type { Endpoint } from './endpoint'
 
 type Json = Record<string, unknown>
+type Io = 'input' | 'output'
 
-const schemaOf = (schema: z.ZodType, io: 'input' | 'output'): Json => {
-  const { $schema: _dialect, ...rest } = z.toJSONSchema(schema, {
-    io,
-    unrepresentable: 'any',
-    target: 'draft-2020-12',
+/** Schemas that contain themselves stand once among the components, under these names. */
+const NAMES = z.registry<{ id: string }>()
+NAMES.add(Condition, { id: 'Condition' })
+
+/** Zod's schemas as JSON Schema, and what they refer to by name, gathered for the components. */
+class Schemas {
+  readonly named: Json = {}
+
+  of(schema: z.ZodType, io: Io): Json {
+    const options = { io, metadata: NAMES, unrepresentable: 'any', target: 'draft-2020-12' } as const
+    const { $schema: _dialect, $defs = {}, ...rest } = z.toJSONSchema(schema, options) as Json
+    for (const [id, definition] of Object.entries($defs as Json)) {
+      if (id.startsWith('__')) throw new Error('a schema that contains itself has no name in the description')
+      this.named[nameOf(id, io)] = pointed(definition, io)
+    }
+    return pointed(rest, io)
+  }
+}
+
+/** A default makes a field optional in what is sent and sure in what is answered: two schemas. */
+const nameOf = (id: string, io: Io): string => (io === 'input' ? `${id}Input` : id)
+
+/** References into a schema's own definitions, turned to the components of the whole description. */
+function pointed(schema: unknown, io: Io): Json {
+  return JSON.parse(JSON.stringify(schema), (key, value: unknown) => {
+    if (key !== '$ref' || typeof value !== 'string') return value
+    return `#/components/schemas/${nameOf(value.replace('#/$defs/', ''), io)}`
   }) as Json
-  return rest
 }
 
 const json = (schema: Json): Json => ({ 'application/json': { schema } })
@@ -21,9 +44,9 @@ const problem = (description: string): Json => ({
 })
 
 /** Parameters of a path or a query, one by one. */
-function parameters(schema: z.ZodType | undefined, place: 'path' | 'query'): Json[] {
+function parameters(schemas: Schemas, schema: z.ZodType | undefined, place: 'path' | 'query'): Json[] {
   if (!schema) return []
-  const { properties = {}, required = [] } = schemaOf(schema, 'input') as {
+  const { properties = {}, required = [] } = schemas.of(schema, 'input') as {
     properties?: Json
     required?: string[]
   }
@@ -43,9 +66,9 @@ const IF_MATCH: Json = {
   schema: { type: 'string' },
 }
 
-function requestBody(spec: Endpoint): Json | undefined {
+function requestBody(schemas: Schemas, spec: Endpoint): Json | undefined {
   if (!spec.body) return undefined
-  const schema = schemaOf(spec.body, 'input')
+  const schema = schemas.of(spec.body, 'input')
   if (spec.media?.request && spec.media.field) {
     const properties = {
       ...(schema['properties'] as Json),
@@ -57,68 +80,69 @@ function requestBody(spec: Endpoint): Json | undefined {
   return { required: true, content: json(schema) }
 }
 
-function responses(spec: Endpoint): Json {
+function responses(schemas: Schemas, spec: Endpoint): Json {
   const success: Json = spec.media?.response
     ? { '200': { description: 'The file', content: { [spec.media.response]: {} } } }
     : spec.response
       ? {
           '200': {
             description: spec.method === 'put' ? 'Changed, or the same again' : 'Done',
-            content: json(schemaOf(spec.response, 'output')),
+            content: json(schemas.of(spec.response, 'output')),
           },
           ...(spec.method === 'put'
-            ? { '201': { description: 'Created', content: json(schemaOf(spec.response, 'output')) } }
+            ? { '201': { description: 'Created', content: json(schemas.of(spec.response, 'output')) } }
             : {}),
         }
       : { '204': { description: 'Done' } }
-  const edits = spec.method === 'put' || spec.method === 'patch' || spec.method === 'delete'
   return {
     ...success,
     '400': problem('A field is at fault'),
     '401': problem('Not signed in'),
     '403': problem('The role does not include this'),
     '404': problem('No such row in this team'),
-    ...(edits
+    ...(edits(spec)
       ? { '409': problem('Stands in the way'), '412': problem('Changed meanwhile; carries the present row') }
       : {}),
+    ...(spec.method === 'patch' || signsOff(spec) ? { '428': problem('If-Match is missing') } : {}),
   }
 }
 
-function operation(spec: Endpoint): Json {
-  const edits =
-    spec.method === 'put' ||
-    spec.method === 'patch' ||
-    spec.method === 'delete' ||
-    spec.path.endsWith('/sign-off')
-  const body = requestBody(spec)
+const signsOff = ({ path }: Endpoint): boolean => path.endsWith('/sign-off')
+
+/** What changes a row and so minds its version. */
+const edits = (spec: Endpoint): boolean =>
+  spec.method === 'put' || spec.method === 'patch' || spec.method === 'delete' || signsOff(spec)
+
+function operation(schemas: Schemas, spec: Endpoint): Json {
+  const body = requestBody(schemas, spec)
   return {
     summary: spec.summary,
     'x-action': spec.action,
     parameters: [
-      ...parameters(spec.params, 'path'),
-      ...parameters(spec.query, 'query'),
-      ...(edits ? [IF_MATCH] : []),
+      ...parameters(schemas, spec.params, 'path'),
+      ...parameters(schemas, spec.query, 'query'),
+      ...(edits(spec) ? [IF_MATCH] : []),
     ],
     ...(body ? { requestBody: body } : {}),
-    responses: responses(spec),
+    responses: responses(schemas, spec),
     security: [{ session: [] }],
   }
 }
 
-const SESSION_PATHS: Json = {
+const sessionPaths = (schemas: Schemas): Record<string, Json> => ({
   '/session': {
     get: {
       summary: 'Who is signed in and what they may do',
       responses: {
-        '200': { description: 'Done', content: json(schemaOf(Session, 'output')) },
+        '200': { description: 'Done', content: json(schemas.of(Session, 'output')) },
         '401': problem('Not signed in'),
       },
     },
     post: {
       summary: 'Sign in',
-      requestBody: { required: true, content: json(schemaOf(SignIn, 'input')) },
+      requestBody: { required: true, content: json(schemas.of(SignIn, 'input')) },
       responses: {
-        '201': { description: 'Signed in', content: json(schemaOf(Session, 'output')) },
+        '201': { description: 'Signed in', content: json(schemas.of(Session, 'output')) },
         '400': problem('A field is at fault'),
         '401': problem('Address and password do not fit'),
         '429': problem('Too many tries'),
@@ -126,14 +150,15 @@ const SESSION_PATHS: Json = {
     },
     delete: { summary: 'Sign out', responses: { '204': { description: 'Done' } } },
   },
-}
+})
 
 /** The API's description in OpenAPI 3.1, from the same values that mount it. */
 export function describeApi(endpoints: readonly Endpoint[]): Json {
-  const paths: Record<string, Json> = { ...(SESSION_PATHS as Record<string, Json>) }
+  const schemas = new Schemas()
+  const paths = sessionPaths(schemas)
   for (const spec of endpoints) {
     const path = spec.path.replace(/:(\w+)/g, '{$1}')
-    paths[path] = { ...paths[path], [spec.method]: operation(spec) }
+    paths[path] = { ...paths[path], [spec.method]: operation(schemas, spec) }
   }
   return {
     openapi: '3.1.0',
@@ -145,7 +170,7 @@ export function describeApi(endpoints: readonly Endpoint[]): Json {
     servers: [{ url: '/api' }],
     paths,
     components: {
-      schemas: { Problem: schemaOf(Problem, 'output') },
+      schemas: { Problem: schemas.of(Problem, 'output'), ...schemas.named },
       securitySchemes: { session: { type: 'apiKey', in: 'cookie', name: 'overtop' } },
     },
   }

@@ -38,8 +38,8 @@ export class NotAllowed extends HttpError {
 
 /** Also for a row of another team: its existence is not told. */
 export class NotFound extends HttpError {
-  constructor(what: string) {
-    super(404, 'not-found', 'Not found', `There is no such ${what} in this team.`)
+  constructor(what: string, where = ' in this team') {
+    super(404, 'not-found', 'Not found', `There is no such ${what}${where}.`)
   }
 }
 
