@@ -26,7 +26,7 @@ const CALLED: readonly (readonly Called[])[] = [
     { counterKey: 'one-four', shape: '1-2-1-1', k: 8, n: 11 },
     { counterKey: 'box', shape: '1-2-1-1', k: 7, n: 9 },
     { counterKey: 'stack', shape: '1-2-1-1', k: 2, n: 3 },
-    { counterKey: 'two-up', shape: '1-2-1-1', k: 1, n: 2 },
+    { counterKey: 'two-up', shape: '1-2-1-1', k: 3, n: 6 },
   ],
   [
     { counterKey: 'two-up', shape: '2-2-1', k: 7, n: 8 },
@@ -38,7 +38,7 @@ const CALLED: readonly (readonly Called[])[] = [
     { counterKey: 'one-four', shape: '1-2-1-1', k: 10, n: 11 },
     { counterKey: 'box', shape: '1-2-1-1', k: 6, n: 9 },
     { counterKey: 'stack', shape: '1-2-1-1', k: 2, n: 3 },
-    { counterKey: 'two-up', shape: '1-2-1-1', k: 1, n: 2 },
+    { counterKey: 'two-up', shape: '1-2-1-1', k: 2, n: 5 },
   ],
 ]
 /** Lowmoor leave our weaker dribblers room. */

@@ -42,14 +42,15 @@ export async function renderStill(spec: StillSpec): Promise<Buffer> {
   const target = metres(spec.look)
   const from: Vec = [target.x + random.between(1.5, 3), FIBA.court.width + CAMERA.back, CAMERA.high]
   const camera = cameraAt(from, [target.x, target.y, 1.05], 0.95 * spec.zoom, WIDTH, HEIGHT)
-  const stands = svg(`<rect width="100%" height="100%" fill="#1b1b1d"/>${crowd(camera, random)}`)
+  const stands = crowd(camera, random)
   const players = spec.players
     .map((player) => ({ ...player, ...metres(player) }))
     .sort((a, b) => a.y - b.y || a.x - b.x)
     .map((player) => figure(camera, player, player.kit, player.pose, random))
-  const front = svg(
+  const hall = svg(
     `<defs><linearGradient id="floor" x1="0" y1="0" x2="0" y2="1"><stop offset="0" stop-color="#a09f9c"/><stop offset="1" stop-color="#cfcdc8"/></linearGradient>` +
-      `<radialGradient id="dim" cx=".5" cy=".52" r=".75"><stop offset=".55" stop-color="#000" stop-opacity="0"/><stop offset="1" stop-color="#000" stop-opacity=".34"/></radialGradient></defs>` +
+      `<radialGradient id="dim" cx=".5" cy=".52" r=".75"><stop offset=".55" stop-color="#000" stop-opacity="0"/><stop offset="1" stop-color="#000" stop-opacity=".34"/></radialGradient>` +
+      `</defs>` +
       floor(camera) +
       boards(camera) +
       basket(camera) +
@@ -57,22 +58,31 @@ export async function renderStill(spec: StillSpec): Promise<Buffer> {
       players.join('') +
       `<rect width="100%" height="100%" fill="url(#dim)"/>`,
   )
-  const raw = { width: WIDTH, height: HEIGHT, channels: 4 } as const
-  const behind = await sharp(stands).blur(2.2).ensureAlpha().raw().toBuffer()
-  const ahead = await sharp(front).blur(0.8).ensureAlpha().raw().toBuffer()
-  return sharp(behind, { raw })
-    .composite([
-      { input: ahead, raw },
-      { input: grain(spec.seed), raw },
-    ])
-    .greyscale()
-    .jpeg({ quality: 74, mozjpeg: true })
+  // Drawn small and pulled up, the stands are out of focus as on film.
+  const far = await sharp(svg(`<rect width="100%" height="100%" fill="#1b1b1d"/>${stands}`, 1 / 3))
+    .flatten()
+    .resize(WIDTH, HEIGHT, { kernel: 'cubic' })
+    .raw()
+    .toBuffer()
+  const both = await sharp(far, { raw: { width: WIDTH, height: HEIGHT, channels: 3 } })
+    .composite([{ input: hall }])
+    .removeAlpha()
+    .raw()
+    .toBuffer()
+  const pixels = await sharp(both, { raw: { width: WIDTH, height: HEIGHT, channels: 3 } })
+    .blur(0.8)
+    .toColourspace('b-w')
+    .raw()
+    .toBuffer()
+  return sharp(grained(pixels, spec.seed), { raw: { width: WIDTH, height: HEIGHT, channels: 1 } })
+    .toColourspace('b-w')
+    .jpeg({ quality: 74 })
     .toBuffer()
 }
 
-const svg = (body: string) =>
+const svg = (body: string, size = 1) =>
   Buffer.from(
-    `<svg xmlns="http://www.w3.org/2000/svg" width="${WIDTH}" height="${HEIGHT}" viewBox="0 0 ${WIDTH} ${HEIGHT}">${body}</svg>`,
+    `<svg xmlns="http://www.w3.org/2000/svg" width="${Math.round(WIDTH * size)}" height="${Math.round(HEIGHT * size)}" viewBox="0 0 ${WIDTH} ${HEIGHT}">${body}</svg>`,
   )
 
 function ringOn({ ring }: StillSpec, camera: ReturnType<typeof cameraAt>): string {
@@ -85,14 +95,8 @@ function ringOn({ ring }: StillSpec, camera: ReturnType<typeof cameraAt>): strin
   )
 }
 
-/** Film grain: grey specks of little weight. */
-function grain(seed: number): Buffer {
+/** Film grain: every pixel a little lighter or darker. One byte a pixel. */
+function grained(pixels: Buffer, seed: number): Buffer {
   const random = seeded(seed ^ 0x5eed)
-  const pixels = Buffer.alloc(WIDTH * HEIGHT * 4)
-  for (let i = 0; i < pixels.length; i += 4) {
-    const speck = random.next()
-    pixels[i] = pixels[i + 1] = pixels[i + 2] = speck < 0.5 ? 0 : 255
-    pixels[i + 3] = Math.round(Math.abs(speck - 0.5) * 34)
-  }
-  return pixels
+  return pixels.map((value) => Math.max(0, Math.min(255, value + (random.next() - 0.5) * 20))) as Buffer
 }
