@@ -11,7 +11,7 @@ export interface LabelLine {
 }
 
 /** A place for a label: its top left corner, metres, and how its lines stand in it. */
-export interface Spot extends Point {
+export interface LabelSpot extends Point {
   align?: 'start' | 'middle' | 'end'
 }
 export interface LabelSize {
@@ -25,9 +25,9 @@ export interface Label {
   lines: readonly LabelLine[]
   ink: Ink
   /** Places worth trying, best first, that must keep clear of labels and marks. */
-  wishes(size: LabelSize): readonly Spot[]
+  wishes(size: LabelSize): readonly LabelSpot[]
   /** Where it may cover a mark rather than stray from its own; labels are still kept apart. */
-  fallbacks?(size: LabelSize): readonly Spot[]
+  fallbacks?(size: LabelSize): readonly LabelSpot[]
   /** The mark that it may lie on: one of those kept clear, by identity. */
   own?: Box
   /** How far it may move from its first wish before it covers a mark instead, metres. Default: no limit. */
@@ -93,7 +93,7 @@ function nearest(
   grid: number,
   fits: (box: Box) => boolean,
   stray = Infinity,
-): Spot | undefined {
+): LabelSpot | undefined {
   let best: { box: Box; far: number } | undefined
   const step = Math.max(grid, area.width / 120)
   for (let y = area.y; y + wish.height <= area.y + area.height; y += step) {

@@ -1,4 +1,4 @@
-import type { Label, LabelLine, LabelSize, Spot } from './labels'
+import type { Label, LabelLine, LabelSize, LabelSpot } from './labels'
 import type { Box } from './path'
 import type { Pen } from './pen'
 import { pickupWords, roomWords } from './pressWords'
@@ -85,14 +85,14 @@ export function pressLabels({ options, pen, room, front, denied }: Input): Label
   return labels
 }
 
-const within = (box: Box, { width, height }: LabelSize): Spot => ({
+const within = (box: Box, { width, height }: LabelSize): LabelSpot => ({
   x: box.x + (box.width - width) / 2,
   y: box.y + (box.height - height) / 2,
   align: 'middle',
 })
 
 /** Right, below, left and above a box; `low` hangs the label at the box's lower end. */
-function beside(box: Box, gap: number, { width, height }: LabelSize, low = false): Spot[] {
+function beside(box: Box, gap: number, { width, height }: LabelSize, low = false): LabelSpot[] {
   const top = box.y + gap / 2
   const middle = box.y + (box.height - height) / 2
   const bottom = box.y + box.height - height - gap / 2
@@ -102,7 +102,7 @@ function beside(box: Box, gap: number, { width, height }: LabelSize, low = false
   return [
     ...ys.map((y) => ({ x: box.x + box.width + gap, y })),
     low ? above : below,
-    ...ys.map((y): Spot => ({ x: box.x - gap - width, y, align: 'end' })),
+    ...ys.map((y): LabelSpot => ({ x: box.x - gap - width, y, align: 'end' })),
     low ? below : above,
   ]
 }

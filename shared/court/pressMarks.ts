@@ -86,7 +86,7 @@ const DENIED_WAYS: Record<Denied, { from: [number, number]; to: [number, number]
   near: { from: [-0.02, 0.6], to: [0.15, 0.74] },
   far: { from: [-0.02, 0.6], to: [0.17, 0.29] },
   middle: { from: [0.08, 0.8], to: [0.33, 0.5] },
-  'pass-back': { from: [0.12, 0.77], to: [0.12, 0.45] },
+  'pass-back': { from: [0.1, 0.77], to: [0.1, 0.45] },
   'best-handler': { from: [-0.02, 0.6], to: [0.22, 0.6] },
 }
 
@@ -137,7 +137,7 @@ export function deniedLane(pack: RulePack, lane: Denied, side: BallSide, pen: Pe
 
 /** Where the room lies that a press leaves; fractions, for the ball on the right. */
 const ROOMS: Record<Lane, { x0: number; x1: number; y0: number; y1: number }> = {
-  middle: { x0: 0.25, x1: 0.4, y0: 0.335, y1: 0.665 },
+  middle: { x0: 0.255, x1: 0.395, y0: 0.335, y1: 0.665 },
   sideline: { x0: 0.23, x1: 0.45, y0: 0.76, y1: 0.97 },
   long: { x0: 0.66, x1: 0.84, y0: 0.33, y1: 0.67 },
   'pass-back': { x0: 0.02, x1: 0.15, y0: 0.35, y1: 0.65 },

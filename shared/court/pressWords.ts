@@ -12,7 +12,9 @@ export const pickupWords = (at: Pickup | number): string =>
 export const roomWords = (lane: Lane): string => `${labelOf(LANES, lane).replace(/^the /, '')} left open`
 
 /** One or two sentences that say what the press court shows. */
-export function pressSentence(options: PressSceneOptions): string {
+export function pressSentence(
+  options: Pick<PressSceneOptions, 'zones' | 'pickup' | 'denied' | 'room'>,
+): string {
   const they: string[] = []
   if (options.pickup) they.push(`${pickupWords(options.pickup.at)}, ${ofN(options.pickup)}`)
   for (const zone of [...options.zones].sort((a, b) => b.k - a.k))
