@@ -30,8 +30,12 @@ export async function evidenceIds(
       ORDER BY s.day DESC, s.id, p.number LIMIT ? OFFSET ?`,
     [opponentId, opponentId, ...where.parameters, page.limit, page.offset],
   )
+  // A page past the end has no row to read the total from.
+  const beyond = rows.length === 0 && page.offset > 0
   return {
     rows: rows.map(({ total: _total, counted, ...row }) => ({ ...row, counted: counted === 1 })),
-    total: rows[0]?.total ?? 0,
+    total: beyond
+      ? (await evidenceIds(manager, opponentId, habit, filter, { limit: 1, offset: 0 })).total
+      : (rows[0]?.total ?? 0),
   }
 }
