@@ -21,11 +21,14 @@ async function opponentOf(rows: number): Promise<{ opponent: string; game: strin
 }
 
 console.log(`${'what'.padEnd(46)} ${'ours'.padStart(9)} ${'floor'.padStart(9)}`)
-for (const lines of [
-  () => benchWrites(test, fixture.scoutedGame, quick ? 50 : 400),
-  () => benchCounts(test, opponentOf),
-  () => benchPaper(test, fixture.sheet, quick ? 5 : 20),
-  () => benchFirstLoad(),
-])
-  for (const row of await lines()) console.log(row)
+const parts: Record<string, () => Promise<string[]>> = {
+  writes: () => benchWrites(test, fixture.scoutedGame, quick ? 50 : 400),
+  counts: () => benchCounts(test, opponentOf),
+  paper: () => benchPaper(test, fixture.sheet, quick ? 5 : 20),
+  firstLoad: () => benchFirstLoad(),
+}
+/** `npm run bench -- counts` runs that part alone. */
+const wanted = process.argv.slice(2).filter((name) => name in parts)
+for (const [name, run] of Object.entries(parts))
+  if (wanted.length === 0 || wanted.includes(name)) for (const row of await run()) console.log(row)
 await test.stop()

@@ -1,8 +1,8 @@
 import type { EntityManager } from 'typeorm'
 import type { TendencyFilter } from '@shared/tendencies/schemas'
-import { COVERED, JOINED, SOURCES } from './expressions'
+import { SOURCES } from './expressions'
 import { situation } from './filters'
-import { TRAP_LINE, type HabitSql } from './habitSql'
+import { habitRows, TRAP_LINE, type HabitSql } from './habitSql'
 
 export interface EvidenceId {
   id: string
@@ -24,10 +24,9 @@ export async function evidenceIds(
   const where = situation(filter)
   const rows: (Omit<EvidenceId, 'counted'> & { counted: number; total: number })[] = await manager.query(
     `WITH ${SOURCES}, ${TRAP_LINE}
-     SELECT p.id, ${habit.k} AS counted, s.kind, s.label AS foe, s.day, count(*) OVER () AS total
-       FROM ${JOINED} LEFT JOIN trap_line tr ON tr.possessionId = p.id
-      WHERE ${where.sql} AND ${COVERED} AND ${habit.n}
-      ORDER BY s.day DESC, s.id, p.number LIMIT ? OFFSET ?`,
+     SELECT p.id, ${habit.k} AS counted, p.kind, p.label AS foe, p.day, count(*) OVER () AS total
+       FROM (${habitRows(where.sql)}) p WHERE ${habit.n}
+      ORDER BY p.day DESC, p.gameId, p.number LIMIT ? OFFSET ?`,
     [opponentId, opponentId, ...where.parameters, page.limit, page.offset],
   )
   // A page past the end has no row to read the total from.

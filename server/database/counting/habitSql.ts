@@ -1,25 +1,61 @@
 import { SPOT_CELLS } from '@shared/court/trapSpots'
 import { HABITS } from '@shared/tendencies/habits'
 import { DENIED, GOT_OUT, LANES, NOT_PRESSED, SHAPES, SHAPE_VARIANTS, TRAP_CUES } from '@shared/vocabulary'
-import { HAS_SHAPE, holds, inSpot, is, NOT_STOPPED, PRESSED, seen, THROUGH, THROWN_IN } from './expressions'
+import {
+  HAS_SHAPE,
+  holds,
+  inSpot,
+  is,
+  NOT_STOPPED,
+  PRESSED,
+  seen,
+  THROUGH,
+  THROWN_IN,
+  JOINED,
+  COVERED,
+} from './expressions'
 
-/** What a habit's n and k count, as SQL over a possession `p`, its game `s` and its traps in one line `tr`. */
+/** What a habit's n and k count, as SQL over one row `p` of `habitRows`. */
 export interface HabitSql {
   n: string
   k: string
 }
 
-/** Columns of `tr`: one line per possession that has traps. Read as 0 where there is none. */
+/** Columns of a possession's traps in one line; there is none for a possession without traps. */
 export const TRAP_LINE = `trap_line AS (
   SELECT t.possessionId,
          max(CASE WHEN t.position = 1 THEN t.cue END) AS cue,
          max(t.position = 1 AND t.result IN (${GOT_OUT.map((result) => `'${result}'`).join(', ')})) AS gotOut,
          count(*) AS traps,
          ${SPOT_CELLS.map((cell) => `max${inSpot(cell.spot, cell.side)} AS ${column(cell.spot, cell.side)}`).join(',\n         ')}
-    FROM source s
-    JOIN possessions p ON (p.scoutedGameId = s.id OR p.gameId = s.id) AND p.deletedAt IS NULL
-    JOIN traps t ON t.possessionId = p.id
+    FROM ${JOINED} JOIN traps t ON t.possessionId = p.id
    GROUP BY t.possessionId)`
+
+const FIELDS = [
+  'shape',
+  'shapeVariant',
+  'pickup',
+  'trapsLogged',
+  'outcome',
+  'throwerGuard',
+  'denied',
+  'leftOpen',
+  'onBall',
+  'handler',
+  'goalie',
+  'shownShape',
+]
+
+/**
+ * The covered rows of a situation with everything that habits look at: possession, game and traps side by
+ * side. Needs the tables of SOURCES and TRAP_LINE; `where` is over `p` and `s`.
+ */
+export const habitRows = (
+  where: string,
+) => `SELECT p.id, p.number, p.trigger, ${FIELDS.map((field) => `p.${field}`).join(', ')},
+    s.id AS gameId, s.kind, s.day, s.label, tr.*
+  FROM ${JOINED} LEFT JOIN trap_line tr ON tr.possessionId = p.id
+ WHERE ${where} AND ${COVERED}`
 
 function column(spot: string, side: string): string {
   return `"${spot} ${side}"`
@@ -29,7 +65,7 @@ const yes = (expression: string) => `coalesce(${expression}, 0)`
 const and = (...parts: string[]) => `(${parts.join(' AND ')})`
 
 const TRAPS_LOGGED = is('p.trapsLogged', 'seen')
-const TRAPPED = and(PRESSED, TRAPS_LOGGED, yes('tr.traps > 0'))
+const TRAPPED = and(PRESSED, TRAPS_LOGGED, yes('p.traps > 0'))
 const BALL_SEEN = and(PRESSED, seen('p.onBall'))
 /** Light and all-out also need to know whom they denied. */
 const BALL_AND_DENIED_SEEN = and(BALL_SEEN, seen('p.denied'))
@@ -48,11 +84,11 @@ const SQL: Record<string, HabitSql> = {
   light: { n: BALL_AND_DENIED_SEEN, k: and(is('p.onBall', 'contained'), DENIED_NONE) },
   'all-out': { n: BALL_AND_DENIED_SEEN, k: and(is('p.onBall', 'pressured'), DENIED_TWO) },
   disguise: { n: and(PRESSED, 'p.shownShape IS NOT NULL'), k: yes('p.shownShape <> p.shape') },
-  trap: { n: and(PRESSED, TRAPS_LOGGED), k: yes('tr.traps > 0') },
-  'trap-again': { n: and(TRAPPED, yes('tr.gotOut')), k: yes('tr.traps > 1') },
+  trap: { n: and(PRESSED, TRAPS_LOGGED), k: yes('p.traps > 0') },
+  'trap-again': { n: and(TRAPPED, yes('p.gotOut')), k: yes('p.traps > 1') },
   'safety-leaves-early': { n: SAFETY_SEEN, k: is('p.goalie', 'left-early') },
   'safety-home': { n: SAFETY_SEEN, k: is('p.goalie', 'home') },
-  'others-through': { n: and(PRESSED, `s.kind = 'scouted'`, NOT_STOPPED), k: THROUGH },
+  'others-through': { n: and(PRESSED, `p.kind = 'scouted'`, NOT_STOPPED), k: THROUGH },
 }
 for (const { value } of SHAPES)
   if (!NOT_PRESSED.includes(value)) SQL[`shape:${value}`] = { n: PRESSED, k: is('p.shape', value) }
@@ -64,15 +100,15 @@ for (const { value, parent } of SHAPE_VARIANTS)
 for (const { value } of DENIED)
   SQL[`deny:${value}`] = { n: and(PRESSED, seen('p.denied')), k: holds('p.denied', value) }
 for (const { value } of TRAP_CUES)
-  SQL[`cue:${value}`] = { n: and(TRAPPED, seen('tr.cue')), k: is('tr.cue', value) }
+  SQL[`cue:${value}`] = { n: and(TRAPPED, seen('p.cue')), k: is('p.cue', value) }
 for (const { value } of LANES)
   SQL[`leave-open:${value}`] = { n: and(TRAPPED, seen('p.leftOpen')), k: holds('p.leftOpen', value) }
 for (const { spot, side } of SPOT_CELLS) {
-  SQL[`trap-at:${spot}:${side}`] = { n: and(PRESSED, TRAPS_LOGGED), k: yes(`tr.${column(spot, side)}`) }
+  SQL[`trap-at:${spot}:${side}`] = { n: and(PRESSED, TRAPS_LOGGED), k: yes(`p.${column(spot, side)}`) }
   if (side === 'left')
     SQL[`trap-at:${spot}:any`] = {
       n: and(PRESSED, TRAPS_LOGGED),
-      k: yes(`(tr.${column(spot, 'left')} OR tr.${column(spot, 'right')})`),
+      k: yes(`(p.${column(spot, 'left')} OR p.${column(spot, 'right')})`),
     }
 }
 

@@ -22,27 +22,31 @@ export async function countOpponents(
   now: Date,
   opponentId?: string,
 ): Promise<Map<string, OpponentCounts>> {
-  const only = opponentId ? 'AND opponentId = ?' : ''
+  const onlyOf = (table: string) => (opponentId ? `AND ${table}.opponentId = ?` : '')
   const scope = opponentId ? [teamId, opponentId] : [teamId]
   const shapes: ShapeCount[] = await manager.query(
     `WITH source AS (
-       SELECT id, opponentId, coverageKind, coverageFrom, coverageTo, rulePack FROM scouted_games WHERE teamId = ? ${only}
+       SELECT g.opponentId, g.coverageKind, g.coverageFrom, g.coverageTo, g.rulePack, p.rowid AS possession
+         FROM scouted_games g JOIN possessions p ON p.scoutedGameId = g.id
+        WHERE g.teamId = ? ${onlyOf('g')} AND +p.deletedAt IS NULL
        UNION ALL
-       SELECT id, opponentId, 'all', NULL, NULL, rulePack FROM games WHERE teamId = ? ${only})
+       SELECT g.opponentId, 'all', NULL, NULL, g.rulePack, p.rowid
+         FROM games g JOIN possessions p ON p.gameId = g.id
+        WHERE g.teamId = ? ${onlyOf('g')} AND +p.deletedAt IS NULL)
      SELECT s.opponentId, p.shape, count(*) AS possessions, sum(${PRESSED} AND ${COVERED}) AS pressed,
             sum(${HAS_SHAPE} AND ${COVERED}) AS pressable
-       FROM source s JOIN possessions p ON (p.scoutedGameId = s.id OR p.gameId = s.id) AND p.deletedAt IS NULL
+       FROM source s CROSS JOIN possessions p ON p.rowid = s.possession
       GROUP BY s.opponentId, p.shape`,
     [...scope, ...scope],
   )
   const games: { opponentId: string; scoutedGames: number }[] = await manager.query(
-    `SELECT opponentId, count(*) AS scoutedGames FROM scouted_games WHERE teamId = ? ${only} GROUP BY opponentId`,
+    `SELECT opponentId, count(*) AS scoutedGames FROM scouted_games g WHERE teamId = ? ${onlyOf('g')} GROUP BY opponentId`,
     scope,
   )
   const meetings: { opponentId: string; id: string; tipOff: string; place: 'home' | 'away' | 'neutral' }[] =
     await manager.query(
-      `SELECT opponentId, id, min(tipOff) AS tipOff, place FROM games
-        WHERE teamId = ? ${only} AND tipOff >= ? GROUP BY opponentId`,
+      `SELECT opponentId, id, min(tipOff) AS tipOff, place FROM games g
+        WHERE teamId = ? ${onlyOf('g')} AND tipOff >= ? GROUP BY opponentId`,
       [...scope, now.toISOString()],
     )
   const result = new Map<string, OpponentCounts>()

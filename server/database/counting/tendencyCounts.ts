@@ -4,7 +4,7 @@ import type { TendencyFilter } from '@shared/tendencies/schemas'
 import type { Pickup, Trigger } from '@shared/vocabulary'
 import { COVERED, HAS_SHAPE, inSpot, is, JOINED, PRESSED, seen, SOURCES } from './expressions'
 import { situation } from './filters'
-import { COUNTED_HABITS, TRAP_LINE } from './habitSql'
+import { COUNTED_HABITS, habitRows, TRAP_LINE } from './habitSql'
 
 /** Counts of one habit in one game after one trigger. */
 export interface CountCell {
@@ -34,13 +34,16 @@ export interface SpotCount {
   k: number
 }
 
-/** Aliases of the distinct n expressions: many habits share one, and SQLite need count it only once. */
+/** Aliases of the distinct n expressions: many habits share one, and each is worked out once a row. */
 const N_ALIAS = new Map<string, string>()
 for (const { n } of COUNTED_HABITS) if (!N_ALIAS.has(n)) N_ALIAS.set(n, `n${N_ALIAS.size}`)
 
+const N_FLAGS = [...N_ALIAS].map(([sql, alias]) => `${sql} AS ${alias}`).join(', ')
 const SUMS = [
-  ...[...N_ALIAS].map(([sql, alias]) => `sum(${sql}) AS ${alias}`),
-  ...COUNTED_HABITS.map(({ n, k }, index) => `sum(${n} AND ${k}) AS k${index}`),
+  ...[...N_ALIAS.values()].map((alias) => `sum(${alias}) AS ${alias}`),
+  ...COUNTED_HABITS.map(
+    ({ n, k }, index) => `sum(CASE WHEN ${N_ALIAS.get(n)} THEN ${k} ELSE 0 END) AS k${index}`,
+  ),
 ].join(',\n  ')
 
 /** Every habit, game by game and trigger by trigger; only cells with something in n come back. */
@@ -51,26 +54,17 @@ export async function countHabits(
 ): Promise<CountCell[]> {
   const where = situation(filter)
   const rows: Record<string, number | string>[] = await manager.query(
-    `WITH ${SOURCES}, ${TRAP_LINE}
-     SELECT s.id AS gameId, p.trigger AS "trigger", ${SUMS}
-       FROM ${JOINED} LEFT JOIN trap_line tr ON tr.possessionId = p.id
-      WHERE ${where.sql} AND ${COVERED}
-      GROUP BY s.id, p.trigger`,
+    `WITH ${SOURCES}, ${TRAP_LINE},
+     flagged AS MATERIALIZED (SELECT p.*, ${N_FLAGS} FROM (${habitRows(where.sql)}) p)
+     SELECT p.gameId, p.trigger AS "trigger", ${SUMS} FROM flagged p GROUP BY p.gameId, p.trigger`,
     [opponentId, opponentId, ...where.parameters],
   )
   return rows.flatMap((row) =>
     COUNTED_HABITS.flatMap(({ key, n: sql }, index): CountCell[] => {
       const n = Number(row[N_ALIAS.get(sql) ?? ''] ?? 0)
       if (n === 0) return []
-      return [
-        {
-          habitKey: key,
-          gameId: String(row['gameId']),
-          trigger: row['trigger'] as Trigger,
-          n,
-          k: Number(row[`k${index}`]),
-        },
-      ]
+      const k = Number(row[`k${index}`])
+      return [{ habitKey: key, gameId: String(row['gameId']), trigger: row['trigger'] as Trigger, n, k }]
     }),
   )
 }
