@@ -18,6 +18,9 @@ interface Look {
   crop?: Crop
 }
 
+/** CSS px: a narrower drawing has no room for the sheet's large letters. */
+const LARGE_LETTERS_FROM = 460
+
 /** Their press on the long court: the same scene for paper, the coach's preview and the phone. */
 export function pressDrawing(
   content: FrozenPlan,
@@ -35,7 +38,7 @@ export function pressDrawing(
     labels,
     medium,
     crop,
-    type: labels === 'letters' ? 1.2 : 1,
+    type: labels === 'letters' ? (width < LARGE_LETTERS_FROM ? 0.8 : 1.2) : 1,
   }
   const scene = pressScene({ ...options, pxPerMetre: pressScale(options, width) })
   const bare = [
