@@ -26,6 +26,7 @@ export type SlotField =
   | 'trapTime'
   | 'crossedAt'
   | 'note'
+  | 'trip'
   | 'more'
 
 /** A place in the sentence that can be said. */
@@ -75,6 +76,12 @@ export const hasVariants = (shape: Shape | null): boolean =>
 const endsSomewhere = (draft: Draft): boolean =>
   draft.outcome !== null && draft.outcome !== 'through' && draft.outcome !== 'through-with-numbers'
 
+/** The row before this one, of whose trip this may be a fresh throw-in. */
+export interface Before {
+  number: number
+  tripId: string
+}
+
 export interface FilmSlot {
   key: string
   slot: Slot
@@ -98,7 +105,7 @@ export function nextOfTraps(draft: Draft, from = 0): Slot | null {
  * What film can add, in two pages. Keys stay where they are from row to row, so that fingers learn them; what does
  * not apply to this row is left out.
  */
-export function filmSlots(draft: Draft, page: 1 | 2): FilmSlot[] {
+export function filmSlots(draft: Draft, page: 1 | 2, before: Before | null = null): FilmSlot[] {
   const pressed = isPressed(draft)
   const one = (key: string, field: SlotField, label: string, when: boolean, slot: Slot = { field }) =>
     when ? [{ key, slot, label }] : []
@@ -131,8 +138,6 @@ export function filmSlots(draft: Draft, page: 1 | 2): FilmSlot[] {
       trap: traps.length,
     }),
     ...one('6', 'outcome', 'How it ended', draft.shape !== null && !pressed),
-    ...one('7', 'period', 'Period', true),
-    ...one('8', 'clock', 'Clock', true),
-    ...one('9', 'margin', 'Score', true),
+    ...one('7', 'trip', 'Same trip', before !== null && draft.trigger === 'dead-ball'),
   ]
 }
