@@ -8,6 +8,7 @@ import './styles/base.css'
 import './styles/element.css'
 import App from './App.vue'
 import { onSignedOut } from './api/http'
+import { useLights } from './composables/useLights'
 import { createAppRouter } from './router/router'
 import { useSessionStore } from './stores/session'
 
@@ -27,4 +28,5 @@ onSignedOut(() => {
     void router.replace({ name: 'sign-in', query: { to: here.fullPath } })
 })
 
+useLights().recall()
 createApp(App).use(pinia).use(router).mount('#app')
