@@ -1,6 +1,7 @@
 import { reaches } from '@shared/stats/evidence'
 import { habitOf, type Habit } from '@shared/tendencies/habits'
 import type { Tendency } from '@shared/tendencies/schemas'
+import { isGiven, type Given } from './given'
 
 /** A tendency with what its habit is called and counts. */
 export interface HabitCount {
@@ -11,6 +12,15 @@ export interface HabitCount {
 export interface HabitGroup {
   title: string
   rows: HabitCount[]
+  /** Looked for and not seen once, by how often they were looked for. */
+  never: NeverSeen[]
+}
+
+/** Habits of 0 of n: never is weak, so it says how many in 100 that still allows (Wilson 95). */
+export interface NeverSeen {
+  n: number
+  upTo: number
+  labels: string[]
 }
 
 /** How many stand in the short list. */
@@ -70,10 +80,17 @@ function tier({ claim, grade, thin }: Tendency): number {
 
 /**
  * The habits to know first: of each question the answer counted most, in order of evidence and, where that
- * is alike, of the questions. A habit that was looked for and never seen is not among them.
+ * is alike, of the questions. A habit that was looked for and never seen is not among them, nor one that the
+ * situation itself asks for.
  */
-export function importantHabits(tendencies: readonly Tendency[], most = SHORT_LIST): HabitCount[] {
-  const seen = joined(tendencies).filter(({ tendency }) => tendency.k > 0 && !isOneSide(tendency.key))
+export function importantHabits(
+  tendencies: readonly Tendency[],
+  given: readonly Given[] = [],
+  most = SHORT_LIST,
+): HabitCount[] {
+  const seen = joined(tendencies).filter(
+    ({ tendency: { k, key } }) => k > 0 && !isOneSide(key) && !isGiven(key, given),
+  )
   const picked = QUESTIONS.flatMap(({ keys, take }, place) =>
     seen
       .filter(({ tendency }) => answers(tendency.key, keys))
@@ -92,8 +109,28 @@ export function groupedHabits(tendencies: readonly Tendency[]): HabitGroup[] {
   const rows = joined(tendencies).filter(({ tendency }) => tendency.n > 0)
   return (Object.keys(GROUP_TITLES) as Habit['group'][]).flatMap((group) => {
     const own = rows.filter(({ habit }) => habit.group === group)
-    return own.length === 0 ? [] : [{ title: GROUP_TITLES[group], rows: own }]
+    if (own.length === 0) return []
+    const seen = own.filter(({ tendency }) => tendency.k > 0)
+    return [{ title: GROUP_TITLES[group], rows: seen, never: neverSeen(own) }]
   })
+}
+
+/** The habits of 0 of n, those looked for most first; the sides of a spot that was never seen go with it. */
+function neverSeen(rows: readonly HabitCount[]): NeverSeen[] {
+  const byCount = new Map<number, NeverSeen>()
+  for (const { habit, tendency } of rows) {
+    if (tendency.k > 0) continue
+    const whole = rows.find(({ habit: { key } }) => key === habit.key.replace(/:(left|right)$/, ':any'))
+    if (isOneSide(habit.key) && whole?.tendency.k === 0) continue
+    const entry = byCount.get(tendency.n) ?? {
+      n: tendency.n,
+      upTo: Math.round((tendency.interval?.high ?? 1) * 100),
+      labels: [],
+    }
+    entry.labels.push(habit.label)
+    byCount.set(tendency.n, entry)
+  }
+  return [...byCount.values()].sort((a, b) => b.n - a.n)
 }
 
 /** The habits that nothing was logged for in this view. */

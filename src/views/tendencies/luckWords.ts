@@ -8,7 +8,7 @@ export function luckWords(luck: TendencyRead['luck'], inSituation: boolean): str
   const { inView, claimed, byChance } = luck
   if (inView === 0) return ''
   const chance = byChance < 0.5 ? 'less than one' : `about ${Math.round(byChance)}`
-  const habits = inView === 1 ? '1 habit in view' : `${inView} habits in view`
+  const habits = inView === 1 ? '1 habit counted here' : `${inView} habits counted here`
   const said = claimed === 0 ? 'none comes out' : claimed === 1 ? '1 comes out' : `${claimed} come out`
   const bar = inSituation ? ' In one situation a habit needs 10 rows over two games before it is called.' : ''
   return `Luck: of ${habits} ${said} usually or rarely; if each were even, chance alone would give ${chance}.${bar}`

@@ -1,6 +1,7 @@
-import { spotLabel } from '@shared/tendencies/habits'
+import { spotPhrase } from '@shared/tendencies/habits'
 import type { Tendency } from '@shared/tendencies/schemas'
 import { DENIED, labelOf, LANES, SHAPES, SHAPE_VARIANTS, TRAP_CUES } from '@shared/vocabulary'
+import { isGiven, type Given } from './given'
 import { capital, listed, our, plain, their, type Segment } from './segments'
 
 /** Under this many rows nothing is said but that it is too little (RECORD.md section 4: a sighting). */
@@ -8,18 +9,30 @@ const ENOUGH = 5
 /** Habits named in one sentence; the list has the rest. */
 const MOST = 4
 
+const SHAPE_PHRASES: Record<string, string> = {
+  person: 'take a player each',
+  'other-zone': 'stand in another zone',
+}
+
 type Counts = ReadonlyMap<string, Tendency>
 
 /**
  * The read as two or three sentences, written from the strongest claims. It says 'usually' and 'rarely' only
  * where a count is claimed so; where no claim holds it gives the count, and where too little was seen it says
- * that. `lead` names the situation ("After made free throws"); empty for all of them.
+ * that. `lead` names the situation ("After made free throws"); empty for all of them. `given`: what the situation
+ * itself asks for and so is no news.
  */
-export function readSentence(tendencies: readonly Tendency[], lead = ''): Segment[] {
+export function readSentence(
+  tendencies: readonly Tendency[],
+  lead = '',
+  given: readonly Given[] = [],
+): Segment[] {
   const counts: Counts = new Map(tendencies.map((tendency) => [tendency.key, tendency]))
   if (tendencies.every(({ n }) => n < ENOUGH))
     return [plain(opening(lead, 'not enough seen to say anything.'))]
-  return [...pressed(counts, lead), ...habits(tendencies), ...room(tendencies)]
+  const open = tendencies.filter(({ key }) => !isGiven(key, given))
+  if (isGiven('press', given)) return [...habits(open, lead), ...room(tendencies)]
+  return [...pressed(counts, lead), ...habits(open, null), ...room(tendencies)]
 }
 
 const opening = (lead: string, words: string): string => (lead === '' ? capital(words) : `${lead} ${words}`)
@@ -32,7 +45,8 @@ function pressed(counts: Counts, lead: string): Segment[] {
   const { claim, k, n } = press
   if (claim === 'unclear')
     return [plain(`${opening(lead, 'they')} `), their(`pressed ${k} of ${n}`), plain('.')]
-  return [plain(`${opening(lead, 'they')} ${claim} `), their('press'), plain('.')]
+  const start = press.thin ? 'a hint so far: they' : 'they'
+  return [plain(`${opening(lead, start)} ${claim} `), their('press'), plain('.')]
 }
 
 /** Every habit given pressed that can stand in the sentence, most telling first, as "they …". */
@@ -52,13 +66,15 @@ function phraseOf(key: string): { place: number; words: string } | null {
     case 'shape':
       return {
         place: 1,
-        words: value === 'person' ? 'take a player each' : `stand in a ${labelOf(SHAPES, value)}`,
+        words: SHAPE_PHRASES[value] ?? `stand in a ${labelOf(SHAPES, value)}`,
       }
     case 'variant':
       return { place: 2, words: `play it as ${labelOf(SHAPE_VARIANTS, value)}` }
     case 'trap-at':
-      if (side === 'left' || side === 'right') return null
-      return { place: 3, words: `trap in ${side === 'any' ? 'a' : 'the'} ${spotLabel(value, side)}` }
+      // One side of a spot is told under the spot itself.
+      return side === 'left' || side === 'right'
+        ? null
+        : { place: 3, words: `trap ${spotPhrase(value, side)}` }
     case 'trap':
       return { place: 4, words: 'trap' }
     case 'cue':
@@ -88,20 +104,21 @@ function phraseOf(key: string): { place: number; words: string } | null {
   }
 }
 
-function habits(tendencies: readonly Tendency[]): Segment[] {
+/** `lead` opens the first sentence; null when one about pressing stands before. */
+function habits(tendencies: readonly Tendency[], lead: string | null): Segment[] {
+  const they = lead === null ? 'when they press, they' : 'they'
   const all = phrases(tendencies)
   const claimed = all.filter(({ tendency }) => usual(tendency))
   const steady = claimed.filter(({ tendency }) => !tendency.thin)
   const used = merged(steady.length > 0 ? steady : claimed).slice(0, MOST)
   if (used.length === 0) {
-    const words = all.some(({ tendency }) => enough(tendency))
-      ? ' How they do it is not clear yet.'
-      : ' Not enough seen to say how.'
-    return [plain(words)]
+    const unclear = all.some(({ tendency }) => enough(tendency))
+    const words = unclear ? 'how they do it is not clear yet.' : 'not enough seen to say how.'
+    return [plain(lead === null ? ` ${capital(words)}` : opening(lead, words))]
   }
-  const start =
-    steady.length > 0 ? ' When they press, they usually ' : ' A hint so far: when they press, they usually '
-  return [plain(start), their(listed(used)), plain('.')]
+  const start = steady.length > 0 ? they : `a hint so far: ${they}`
+  const opened = lead === null ? ` ${capital(start)}` : opening(lead, start)
+  return [plain(`${opened} usually `), their(listed(used)), plain('.')]
 }
 
 /** "trap in a deep corner" and "trap on the catch" become one; "trap" alone goes when a place or cue says more. */

@@ -1,11 +1,12 @@
 import { periodLabel } from '@shared/court/gameTime'
 import type { RulePack } from '@shared/court/rulePacks'
 import { shapeLabel } from '@shared/tendencies/habits'
-import type { MARGINS, Situation, TendencyFilter } from '@shared/tendencies/schemas'
+import type { MARGINS, TendencyFilter, TendencyRead } from '@shared/tendencies/schemas'
 import { labelOf, PICKUPS, type Pickup, type Shape, type Trigger } from '@shared/vocabulary'
 import { capital, listed } from './segments'
 
 type Margin = (typeof MARGINS)[number]
+export type Situation = TendencyRead['situations'][number]
 
 /** What stands on a trigger's button. */
 const TRIGGER_NAMES: Record<Situation['trigger'], string> = {
@@ -41,7 +42,8 @@ export const shapeName = (shape: Shape): string => shapeLabel(shape)
 export const periodNames = (periods: readonly number[], pack: RulePack): string =>
   listed(periods.map((period) => periodLabel(pack, period)))
 
-const orList = (words: readonly string[]): string => listed(words).replace(/ and ([^,]*)$/, ' or $1')
+/** "a, b or c" */
+export const orList = (words: readonly string[]): string => listed(words).replace(/ and ([^,]*)$/, ' or $1')
 
 /**
  * The situation at the head of a sentence: "After made free throws, in Q4,"; empty when nothing narrows.
@@ -53,7 +55,18 @@ export function situationLead(filter: TendencyFilter, pack: RulePack): string {
     filter.period && `in ${periodNames(filter.period, pack)}`,
     filter.margin && orList(filter.margin.map(marginWords)),
     filter.pickup && `picked up at ${orList(filter.pickup.map(pickupName))}`,
-    filter.shape && `in ${orList(filter.shape.map(shapeName))}`,
+    filter.shape && `in their ${orList(filter.shape.map(shapeName))}`,
   ].filter((part) => part !== undefined)
-  return capital(parts.join(', '))
+  return capital(parts.join(', ')) + (parts.length > 1 ? ',' : '')
+}
+
+/** What narrows the view besides trigger and games, for a quiet line: "Q4, behind by 6 or more". */
+export function narrowWords(filter: TendencyFilter, pack: RulePack): string {
+  const parts = [
+    filter.period && periodNames(filter.period, pack),
+    filter.margin && orList(filter.margin.map(marginWords)),
+    filter.pickup && orList(filter.pickup.map(pickupName)),
+    filter.shape && orList(filter.shape.map(shapeName)),
+  ].filter((part) => part !== undefined)
+  return parts.join(', ')
 }
