@@ -1,5 +1,14 @@
 import { SPOT_NAMES } from '../court/trapSpots'
-import { DENIED, LANES, NOT_PRESSED, SHAPES, SHAPE_VARIANTS, TRAP_CUES, labelOf } from '../vocabulary'
+import {
+  DENIED,
+  LANES,
+  NOT_PRESSED,
+  SHAPES,
+  SHAPE_VARIANTS,
+  TRAP_CUES,
+  labelOf,
+  type Shape,
+} from '../vocabulary'
 
 /**
  * Every habit that is counted (RECORD.md section 3): its key, what stands on screen, what its n counts
@@ -44,25 +53,47 @@ export function spotLabel(spot: string, side: string): string {
   return side === 'left' || side === 'right' ? `${side} ${label}` : label
 }
 
+/** Spots that one is in; the others lie on a line. */
+const INSIDE = ['coffin-corner', 'front-wing', 'front-corner', 'middle-lane']
+
+/** Where a trap is, as a sentence has it: "in the left deep corner", "on an early sideline", "elsewhere". */
+export function spotPhrase(spot: string, side: string): string {
+  const label = spotLabel(spot, side)
+  if (spot === 'other') return label
+  const article = side !== 'any' ? 'the' : /^[aeiou]/.test(label) ? 'an' : 'a'
+  return `${INSIDE.includes(spot) ? 'in' : 'on'} ${article} ${label}`
+}
+
 const trapHabits = SPOT_NAMES.flatMap((spot): Habit[] => {
   const n = 'pressed, traps logged'
   if (spot === 'other') return []
   if (spot === 'middle-lane')
-    return [habit('trap-at:middle-lane:middle', 'trap', `Trap in the ${spotLabel(spot, 'middle')}`, n)]
+    return [habit('trap-at:middle-lane:middle', 'trap', `Trap ${spotPhrase(spot, 'middle')}`, n)]
   return [
-    habit(`trap-at:${spot}:any`, 'trap', `Trap in a ${spotLabel(spot, 'any')}`, n),
+    habit(`trap-at:${spot}:any`, 'trap', `Trap ${spotPhrase(spot, 'any')}`, n),
     ...(['left', 'right'] as const).map((side) =>
-      habit(`trap-at:${spot}:${side}`, 'trap', `Trap in the ${spotLabel(spot, side)}`, n),
+      habit(`trap-at:${spot}:${side}`, 'trap', `Trap ${spotPhrase(spot, side)}`, n),
     ),
   ]
 })
+
+/** How a shape stands after "Press", where its label alone would not read. */
+const SHAPE_PHRASES: Partial<Record<Shape, string>> = {
+  person: 'person to person',
+  'other-zone': 'in another zone',
+}
 
 export const HABITS: readonly Habit[] = [
   habit('press', 'press', 'Press', 'covered rows with a shape', 'their', false),
   habit('fake', 'press', 'Show a press and leave', 'covered rows with a shape', 'their', false),
   habit('pickup:full', 'press', 'Pick up full court', 'pressed, pick-up logged'),
   ...SHAPES.filter((shape) => !NOT_PRESSED.includes(shape.value)).map((shape) =>
-    habit(`shape:${shape.value}`, 'shape', `Press in a ${shape.label}`, 'pressed'),
+    habit(
+      `shape:${shape.value}`,
+      'shape',
+      `Press ${SHAPE_PHRASES[shape.value] ?? `in a ${shape.label}`}`,
+      'pressed',
+    ),
   ),
   ...SHAPE_VARIANTS.map((variant) =>
     habit(`variant:${variant.value}`, 'shape', `Play it as ${variant.label}`, 'pressed, the variant told'),
