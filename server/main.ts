@@ -20,7 +20,7 @@ function configOrStop(): Config {
 const config = configOrStop()
 const { context } = await boot(config)
 const app = createApp(context)
-serveClient(app, join(import.meta.dirname, '../client'))
+serveClient(app, join(import.meta.dirname, '../client'), context.log)
 const stopHousekeeping = startHousekeeping(context)
 
 const server = app.listen(config.port, config.host, () => {
