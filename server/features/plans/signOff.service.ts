@@ -25,12 +25,14 @@ export function signOff(
   { teamId, gameId, personId, body, ifMatch, now }: SignOff,
 ): Promise<void> {
   return db.transaction(async (manager) => {
-    const { newest } = await planState(manager, teamId, gameId)
-    if (!newest || newest.id !== body.planId) throw new NotFound('plan')
-    const sheet = await manager.getRepository(Sheet).findOneBy({ planId: newest.id })
-    if (newest.signedAt !== null) {
+    const { newest, versions } = await planState(manager, teamId, gameId)
+    const asked = versions.find((version) => version.id === body.planId)
+    if (!newest || !asked) throw new NotFound('plan')
+    if (asked.signedAt !== null) {
+      // A repeat may come late, when a newer version is open already.
+      const sheet = await manager.getRepository(Sheet).findOneBy({ planId: asked.id })
       if (sheet?.id === body.sheetId) return
-      throw new Conflict(`Version ${newest.number} is signed off already.`, presentPlan(newest))
+      throw new Conflict(`Version ${asked.number} is signed off already.`, presentPlan(newest))
     }
     if (ifMatch === null) throw new NeedsIfMatch()
     if (ifMatch !== newest.version) throw new StaleVersion(presentPlan(newest), newest.version)

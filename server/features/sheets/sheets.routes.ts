@@ -1,10 +1,11 @@
 import { SheetList, SheetPdfQuery, SheetView } from '@shared/sheets/schemas'
 import { sheetPdf } from '../../adapters/pdf/sheetPdf'
+import { SheetTooFull } from '../../adapters/pdf/sheetTooFull'
 import type { Context } from '../../context'
 import { endpoint, ok } from '../../http/endpoint'
 import { InTeam, OneRow } from '../../http/params'
 import { listReply } from '../../http/present'
-import { NotAllowed } from '../../http/problem'
+import { Conflict, NotAllowed } from '../../http/problem'
 import { mayDrawFor } from './sheets.policy'
 import { presentSheet } from './sheets.presenter'
 import { checkReader, getSheet, listSheets } from './sheets.service'
@@ -41,7 +42,9 @@ export const sheetRoutes = ({ db }: Context) => [
       if (!mayDrawFor(caller, reader)) throw new NotAllowed('You can open your own copy or the general one.')
       const whole = await getSheet(db, caller.teamId, params.id)
       if (query.player !== undefined) await checkReader(db, caller.teamId, query.player)
-      const pdf = await sheetPdf(presentSheet(whole, reader), { paper: query.paper, copy: query.copy })
+      const pdf = await sheetPdf(presentSheet(whole, reader), query).catch((error: unknown) => {
+        throw error instanceof SheetTooFull ? new Conflict(error.message) : error
+      })
       res.type('application/pdf').set('Content-Disposition', 'inline; filename="sheet.pdf"').send(pdf)
       return undefined
     },
