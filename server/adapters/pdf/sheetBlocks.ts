@@ -29,13 +29,13 @@ export function headerBlock(doc: Page, page: SheetContent, { x, width }: Column,
     ? paragraph(doc, [{ text: page.title, style: one }], width)
     : nameAlone(doc, page.title, width, sizes)
   const when = paragraph(doc, [{ text: page.when, style: whenStyle }], width)
-  const under = fits ? 0 : when.height + 6
+  const under = fits ? 0 : when.height + 7
   return {
     height: name.height + under + 9,
     draw(y, tree) {
       tagged(doc, tree, 'H1', () => drawParagraph(doc, name, x, y))
       const lift = one.size * 0.69 - whenStyle.size * 0.69
-      const whenY = fits ? y + lift : y + name.height + 4
+      const whenY = fits ? y + lift : y + name.height + 6
       tagged(doc, tree, 'P', () => drawParagraph(doc, when, x, whenY, fits ? { width } : undefined))
       artifact(doc, () => rule(doc, x, y + name.height + under + 7.5, width, 3))
     },

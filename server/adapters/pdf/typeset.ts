@@ -66,7 +66,7 @@ export function paragraph(doc: Page, runs: readonly Run[], width: number, leadin
   const size = Math.max(...runs.map((run) => run.style.size))
   const lines: Line[] = []
   let line: Line = { words: [], width: 0 }
-  const space = (word: Word) => (word.spaced && line.words.length > 0 ? widthOf(doc, ' ', word.style) : 0)
+  const space = (word: Word) => (word.spaced && line.words.length > 0 ? spaceWidth(doc, word.style) : 0)
   for (const word of wordsOf(doc, runs, width)) {
     const wide = widthOf(doc, word.text, word.style)
     if (line.words.length > 0 && word.spaced && line.width + space(word) + wide > width + 0.01) {
@@ -80,6 +80,10 @@ export function paragraph(doc: Page, runs: readonly Run[], width: number, leadin
   const height = lines.length === 0 ? 0 : size * (CAP + UNDER) + (lines.length - 1) * size * leading
   return { lines, height, leading: size * leading, size }
 }
+
+/** A space between two words, with the tracking on both its sides. */
+const spaceWidth = (doc: Page, style: Style): number =>
+  widthOf(doc, ' ', style) + 2 * (style.tracking ?? 0) * style.size * (style.stretch ?? 1)
 
 function wordsOf(doc: Page, runs: readonly Run[], width: number): Word[] {
   const words: Word[] = []
