@@ -1,6 +1,7 @@
 import { SheetList, SheetPdfQuery, SheetView } from '@shared/sheets/schemas'
 import { sheetPdf } from '../../adapters/pdf/sheetPdf'
 import { SheetTooFull } from '../../adapters/pdf/sheetTooFull'
+import { SheetTooFull } from '../../adapters/pdf/sheetTooFull'
 import type { Context } from '../../context'
 import { endpoint, ok } from '../../http/endpoint'
 import { InTeam, OneRow } from '../../http/params'
@@ -9,6 +10,16 @@ import { Conflict, NotAllowed } from '../../http/problem'
 import { mayDrawFor } from './sheets.policy'
 import { presentSheet } from './sheets.presenter'
 import { checkReader, getSheet, listSheets } from './sheets.service'
+
+/** A page that cannot hold its words is the coach's to shorten, not a failure of the server. */
+async function drawOrSay(draw: () => Promise<Buffer>): Promise<Buffer> {
+  try {
+    return await draw()
+  } catch (error) {
+    if (error instanceof SheetTooFull) throw new Conflict(error.message)
+    throw error
+  }
+}
 
 export const sheetRoutes = ({ db }: Context) => [
   endpoint({
