@@ -1,7 +1,6 @@
 import { SheetList, SheetPdfQuery, SheetView } from '@shared/sheets/schemas'
 import { sheetPdf } from '../../adapters/pdf/sheetPdf'
 import { SheetTooFull } from '../../adapters/pdf/sheetTooFull'
-import { SheetTooFull } from '../../adapters/pdf/sheetTooFull'
 import type { Context } from '../../context'
 import { endpoint, ok } from '../../http/endpoint'
 import { InTeam, OneRow } from '../../http/params'
@@ -10,16 +9,6 @@ import { Conflict, NotAllowed } from '../../http/problem'
 import { mayDrawFor } from './sheets.policy'
 import { presentSheet } from './sheets.presenter'
 import { checkReader, getSheet, listSheets } from './sheets.service'
-
-/** A page that cannot hold its words is the coach's to shorten, not a failure of the server. */
-async function drawOrSay(draw: () => Promise<Buffer>): Promise<Buffer> {
-  try {
-    return await draw()
-  } catch (error) {
-    if (error instanceof SheetTooFull) throw new Conflict(error.message)
-    throw error
-  }
-}
 
 export const sheetRoutes = ({ db }: Context) => [
   endpoint({
@@ -53,9 +42,8 @@ export const sheetRoutes = ({ db }: Context) => [
       if (!mayDrawFor(caller, reader)) throw new NotAllowed('You can open your own copy or the general one.')
       const whole = await getSheet(db, caller.teamId, params.id)
       if (query.player !== undefined) await checkReader(db, caller.teamId, query.player)
-      const pdf = await sheetPdf(presentSheet(whole, reader), query).catch((error: unknown) => {
-        throw error instanceof SheetTooFull ? new Conflict(error.message) : error
-      })
+      const { paper, copy } = query
+      const pdf = await drawOrSay(() => sheetPdf(presentSheet(whole, reader), { paper, copy }))
       res.type('application/pdf').set('Content-Disposition', 'inline; filename="sheet.pdf"').send(pdf)
       return undefined
     },
