@@ -59,7 +59,7 @@ export async function putStill(
       const winner = await same(manager, upload, digest)
       if (winner) return { still: winner, created: false }
       await checkRoom(manager, possessionId)
-      const still = manager.create(Still, {
+      const columns = {
         id: stillId,
         teamId,
         possessionId,
@@ -70,11 +70,11 @@ export async function putStill(
         height: picture.height,
         digest,
         createdAt: now.toISOString(),
-      })
-      await manager.insert(Still, still)
+      }
+      await manager.insert(Still, columns)
       await files.keep(teamId, stillId, picture)
       kept = true
-      return { still, created: true }
+      return { still: manager.create(Still, columns), created: true }
     })
   } catch (error) {
     if (kept) await files.remove(teamId, stillId)
