@@ -43,7 +43,10 @@ export const sheetRoutes = ({ db }: Context) => [
       const whole = await getSheet(db, caller.teamId, params.id)
       if (query.player !== undefined) await checkReader(db, caller.teamId, query.player)
       const { paper, copy } = query
-      const pdf = await drawOrSay(() => sheetPdf(presentSheet(whole, reader), { paper, copy }))
+      const view = presentSheet(whole, reader)
+      const pdf = await sheetPdf(view, { paper: query.paper, copy: query.copy }).catch((error: unknown) => {
+        throw error instanceof SheetTooFull ? new Conflict(error.message) : error
+      })
       res.type('application/pdf').set('Content-Disposition', 'inline; filename="sheet.pdf"').send(pdf)
       return undefined
     },
