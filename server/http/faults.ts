@@ -22,7 +22,7 @@ function remedy(issue: z.core.$ZodIssue): string {
       if (issue.origin === 'array') return `Give at most ${issue.maximum}.`
       return `The most this can be is ${issue.maximum}.`
     case 'invalid_value':
-      return `Choose one of: ${issue.values.map(String).join(', ')}.`
+      return choices(issue.values, issue.input === undefined)
     case 'unrecognized_keys':
       return `Take out ${issue.keys.join(', ')}: no such field.`
     case 'invalid_format':
@@ -33,6 +33,9 @@ function remedy(issue: z.core.$ZodIssue): string {
       return 'This cannot be taken as it is. Change it.'
   }
 }
+
+const choices = (values: readonly unknown[], missing = false): string =>
+  `${missing ? 'This is missing. ' : ''}Choose one of: ${values.map(String).join(', ')}.`
 
 function kindName(expected: string): string {
   const names: Record<string, string> = {
@@ -58,10 +61,23 @@ function formatRemedy(format: string): string {
   return remedies[format] ?? 'This is not written as it should be. Check it.'
 }
 
-/** zod's issues as field faults; nested fields are written traps.0.x. */
-export function faultsOf(error: z.ZodError, prefix = ''): FieldFault[] {
-  return error.issues.map((issue) => ({
-    field: [...(prefix ? [prefix] : []), ...issue.path.map(String)].join('.') || 'body',
-    message: remedy(issue),
-  }))
+/** A form fits in kind when its faults lie deeper inside, or are of size: a list with a wrong entry is a list. */
+const fitsInKind = (issues: readonly z.core.$ZodIssue[]): boolean =>
+  issues.every(
+    ({ code, path }) => path.length > 0 || !['invalid_type', 'invalid_value', 'invalid_union'].includes(code),
+  )
+
+/** An issue as field faults. Of several forms, the one that was meant speaks, where that can be told. */
+function faultsAt(issue: z.core.$ZodIssue, above: readonly string[]): FieldFault[] {
+  const path = [...above, ...issue.path.map(String)]
+  const fault = (message: string) => [{ field: path.join('.') || 'body', message }]
+  if (issue.code !== 'invalid_union') return fault(remedy(issue))
+  const [meant, ...others] = issue.errors.filter(fitsInKind)
+  if (meant && others.length === 0) return meant.flatMap((inner) => faultsAt(inner, path))
+  const values = issue.errors.flat().map((inner) => (inner.code === 'invalid_value' ? inner.values : null))
+  return fault(values.length > 0 && !values.includes(null) ? choices(values.flat()) : remedy(issue))
 }
+
+/** zod's issues as field faults; nested fields are written traps.0.x. */
+export const faultsOf = (error: z.ZodError, prefix = ''): FieldFault[] =>
+  error.issues.flatMap((issue) => faultsAt(issue, prefix ? [prefix] : []))
