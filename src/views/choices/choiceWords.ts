@@ -65,11 +65,10 @@ export function tripsWords(amount: number): string {
   return halves % 2 === 0 ? `${whole} trips` : `${whole} and a half trips`
 }
 
-function moveWords(who: string, plural: boolean, amount: number): string {
+function moveWords(who: string, amount: number): string {
   const trips = tripsWords(amount)
-  if (trips === '') return `${who} change${plural ? '' : 's'} next to nothing`
-  const verb = amount > 0 ? 'add' : 'take'
-  return `${who} ${verb}${plural ? '' : 's'} ${trips} in ten`
+  if (trips === '') return `${who} change next to nothing`
+  return `${who} ${amount > 0 ? 'add' : 'take'} ${trips} in ten`
 }
 
 /**
@@ -82,8 +81,8 @@ export function recordSentence(choice: Choice, choices: Pick<Choices, 'base' | '
   const counted = record.n === 0 ? `Not tried${against}` : `Record ${record.k} of ${record.n}${against}`
   if (choice.expected === null) return `${counted}.`
   const moved = movedBy(choice, choices.base.mean)
-  const squad = tripsWords(moved.squad) === '' ? '' : `, ${moveWords('the five', false, moved.squad)}`
-  return `${counted}, ${moveWords('the reasons', true, moved.reasons)}${squad}.`
+  const squad = tripsWords(moved.squad) === '' ? '' : `, ${moveWords('the five', moved.squad)}`
+  return `${counted}, ${moveWords('the reasons', moved.reasons)}${squad}.`
 }
 
 /** "Six parts of ten are record, four are reasons." */
