@@ -44,7 +44,7 @@ export const sheetRoutes = ({ db }: Context) => [
       if (query.player !== undefined) await checkReader(db, caller.teamId, query.player)
       const { paper, copy } = query
       const view = presentSheet(whole, reader)
-      const pdf = await sheetPdf(view, { paper: query.paper, copy: query.copy }).catch((error: unknown) => {
+      const pdf = await sheetPdf(view, { paper, copy }).catch((error: unknown) => {
         throw error instanceof SheetTooFull ? new Conflict(error.message) : error
       })
       res.type('application/pdf').set('Content-Disposition', 'inline; filename="sheet.pdf"').send(pdf)
