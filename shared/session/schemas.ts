@@ -32,7 +32,7 @@ export const Email = z
   .max(LIMITS.email)
   .pipe(z.email())
   .refine((address) => address.indexOf('@') <= LIMITS.emailLocalPart, {
-    message: 'too long before the @',
+    message: 'This is too long before the @. Check the address.',
   })
 
 export const SignIn = z.object({
