@@ -75,7 +75,10 @@ export function marksOf(read: TendencyRead, selected: string | null): ReadMarks 
     ]),
     rest: all
       .filter((spot) => spots.indexOf(spot) < 0 || spots.indexOf(spot) >= ZONES)
-      .map((spot) => `${spotLabel(spot.spot, spot.side)} ${spot.k} of ${spot.n}`),
+      .map(({ spot, side, k, n, order }) => {
+        const which = order === 'later' ? 'second trap ' : ''
+        return `${which}${spotLabel(spot, side)} ${k} of ${n}`
+      }),
   }
 }
 
