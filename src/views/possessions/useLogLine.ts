@@ -1,7 +1,7 @@
 import { computed, ref, shallowRef, watch, type Ref } from 'vue'
 import { bodyOfDraft } from './draft'
 import { halfRowsOf, isBegun, lineOfHalf, nextLine, readHalfRows, renumbered } from './halfRow'
-import { forget, keep, keyOf, recall } from './kept'
+import { forget, keep, keyOf, recall } from '@/composables/kept'
 import { applyAct, courtTap, isComplete, lineOf, openSlot, stepBack, type Act, type Line } from './line'
 import type { LogRow } from './logRows'
 import type { Slot } from './slots'

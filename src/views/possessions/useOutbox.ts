@@ -2,7 +2,7 @@ import { computed, onScopeDispose, ref, shallowRef } from 'vue'
 import { useEventListener } from '@vueuse/core'
 import type { PossessionBody, PossessionRow } from '@shared/possessions/schemas'
 import { OfflineError } from '@/api/problems'
-import { forget, keep, outboxKey, recallAll } from './kept'
+import { forget, keep, outboxKey, recallAll } from '@/composables/kept'
 import { readWaiting, verdictOf, type Waiting } from './outbox'
 
 const FIRST_WAIT_MS = 3000

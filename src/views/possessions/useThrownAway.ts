@@ -1,7 +1,7 @@
 import { computed, ref, shallowRef } from 'vue'
 import { useIntervalFn } from '@vueuse/core'
 import type { PossessionRow } from '@shared/possessions/schemas'
-import { forget, keep, keyOf, recall } from './kept'
+import { forget, keep, keyOf, recall } from '@/composables/kept'
 import type { LogRow } from './logRows'
 import { readThrown, stillThere, undoUntil, type Thrown } from './thrownAway'
 import type { Outbox } from './useOutbox'
