@@ -6,6 +6,7 @@ import { claim, grade, reaches, thin } from '@shared/stats/evidence'
 import { claimsByChance } from '@shared/stats/luck'
 import { betaBinomialPool } from '@shared/stats/pooling'
 import { wilson } from '@shared/stats/wilson'
+import type { Grade } from '@shared/vocabulary'
 import { ENGINE_DEFAULTS, type EngineSettings } from './settings'
 
 /** Rows of one habit in one game after one trigger: what the counting SQL returns. */
@@ -99,6 +100,9 @@ function posteriorOf(
   return betaAfter({ a: pool.mean * pool.strength, b: (1 - pool.mean) * pool.strength }, seen.k, seen.n)
 }
 
+/** A sighting is never claimed, whichever way its bound lies; a situation's cell needs lean (RECORD.md section 4). */
+const leastToClaim = (situation = false): Grade => (situation ? 'lean' : 'hint')
+
 function tendencyOf(
   habit: Habit,
   cells: readonly HabitCell[],
@@ -112,7 +116,7 @@ function tendencyOf(
   const { k, n } = total(inView)
   const games = new Set(inView.map((cell) => cell.gameId)).size
   const amount = grade(n, games)
-  const mayClaim = !options.situation || reaches(amount, 'lean')
+  const mayClaim = reaches(amount, leastToClaim(options.situation))
   const posterior = posteriorOf(habit, inView, others, settings)
   const range = posterior && betaInterval(posterior, 0.8)
   return {
@@ -144,12 +148,12 @@ export function tendencies(cells: readonly HabitCell[], options: TendencyOptions
 
 /**
  * How many counted habits are in view, how many of them are claimed, and how many claims chance alone
- * would give were every true rate one half (RECORD.md section 4, Luck). In a situation only cells from
- * lean up can be claimed, so only they are counted for chance.
+ * would give were every true rate one half (RECORD.md section 4, Luck). Only cells that can be claimed
+ * count for chance.
  */
 export function luckOf(list: readonly Tendency[], situation = false): TendencyRead['luck'] {
   const counted = list.filter((tendency) => tendency.n > 0)
-  const claimable = situation ? counted.filter((tendency) => reaches(tendency.grade, 'lean')) : counted
+  const claimable = counted.filter((tendency) => reaches(tendency.grade, leastToClaim(situation)))
   return {
     inView: counted.length,
     claimed: counted.filter((tendency) => tendency.claim !== 'unclear').length,

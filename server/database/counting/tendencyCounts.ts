@@ -124,7 +124,10 @@ const SPOT_CASE = SPOT_CELLS.map(
   ({ spot, side }) => `WHEN ${inSpot(spot, side)} THEN '${spot} ${side}'`,
 ).join(' ')
 
-/** Possessions with a trap in each spot, the first trap apart from later ones; for the court. */
+/**
+ * Possessions with a trap in each spot, for the court: the first trap of n logged ones, and later traps of
+ * the n in which the first was got out of.
+ */
 export async function countSpots(
   manager: EntityManager,
   opponentId: string,
@@ -132,10 +135,10 @@ export async function countSpots(
 ): Promise<SpotCount[]> {
   const where = situation(filter)
   const rows: { cell: string; first: number; k: number }[] = await manager.query(
-    `WITH ${SOURCES}
+    `WITH ${SOURCES}, ${TRAP_LINE}
      SELECT CASE ${SPOT_CASE} ELSE 'other middle' END AS cell, t.position = 1 AS first, count(DISTINCT p.id) AS k
-       FROM ${JOINED} JOIN traps t ON t.possessionId = p.id
-      WHERE ${where.sql} AND ${PRESSED} AND ${is('p.trapsLogged', 'seen')} AND ${COVERED}
+       FROM (${habitRows(where.sql)}) p JOIN traps t ON t.possessionId = p.id
+      WHERE ${PRESSED} AND ${is('p.trapsLogged', 'seen')} AND (t.position = 1 OR p.gotOut)
       GROUP BY 1, 2`,
     [opponentId, opponentId, ...where.parameters],
   )

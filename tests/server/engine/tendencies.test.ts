@@ -143,6 +143,14 @@ describe('tendencies as adjusted', () => {
   })
 })
 
+describe('a sighting', () => {
+  it('is not claimed, though all of it went one way', () => {
+    expect(of('trap', spread('trap', 4, 4, 2)).claim).toBe('unclear')
+    expect(of('trap', spread('trap', 0, 4, 2)).claim).toBe('unclear')
+    expect(of('trap', spread('trap', 5, 5, 1)).claim).toBe('usually')
+  })
+})
+
 describe('luckOf', () => {
   it('says how many are counted, claimed, and would be by chance', () => {
     const list = tendencies([
@@ -152,8 +160,8 @@ describe('luckOf', () => {
     ])
     const luck = luckOf(list)
     expect(luck).toMatchObject({ inView: 3, claimed: 2 })
-    // 5 rows: .1875 each way; 10 rows: 56 of 1,024 each way; 2 rows: only 2 of 2, a quarter each way
-    expect(luck.byChance).toBeCloseTo(2 * (0.1875 + 56 / 1024 + 0.25), 10)
+    // 5 rows: .1875 each way; 10 rows: 56 of 1,024 each way; 2 rows are a sighting and never claimed
+    expect(luck.byChance).toBeCloseTo(2 * (0.1875 + 56 / 1024), 10)
   })
 
   it('leaves cells under lean out of a situation', () => {
