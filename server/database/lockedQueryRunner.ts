@@ -39,10 +39,14 @@ class LockedQueryRunner extends BetterSqlite3QueryRunner {
   }
 
   override async rollbackTransaction(): Promise<void> {
+    const outermost = this.transactionDepth <= 1
     try {
       await super.rollbackTransaction()
     } finally {
-      this.handOnWhenDone()
+      // A full disk makes SQLite roll back by itself, and the ROLLBACK after it fails: the lock goes on all the
+      // same, or nobody would ever have the connection again.
+      if (outermost) this.letGo()
+      else this.handOnWhenDone()
     }
   }
 
@@ -57,7 +61,10 @@ class LockedQueryRunner extends BetterSqlite3QueryRunner {
   }
 
   private handOnWhenDone(): void {
-    if (this.isTransactionActive) return
+    if (!this.isTransactionActive) this.letGo()
+  }
+
+  private letGo(): void {
     this.handOn?.()
     this.handOn = null
   }

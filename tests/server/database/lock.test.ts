@@ -96,6 +96,17 @@ describe('transactions', () => {
     await db.transaction((manager) => manager.insert(Team, team('after')))
     expect(await db.manager.count(Team)).toBe(1)
   })
+
+  it('the lock is handed on where SQLite has undone everything by itself, as it does on a full disk', async () => {
+    const full = db.transaction(async (manager) => {
+      await manager.insert(Team, team('lost'))
+      await manager.query('ROLLBACK')
+      throw new Error('disk full')
+    })
+    await expect(full).rejects.toThrow('disk full')
+    await db.transaction((manager) => manager.insert(Team, team('after')))
+    expect((await db.manager.find(Team)).map((row) => row.name)).toEqual(['after'])
+  })
 })
 
 describe('migrations', () => {
