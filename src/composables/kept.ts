@@ -4,10 +4,25 @@ const ROOT = 'overtop.kept'
 
 export const keyOf = (...parts: readonly string[]): string => [ROOT, ...parts].join('.')
 
-/** False when the browser keeps nothing (private window, full). */
+/** False when the browser keeps nothing (private window), or no more even without the copies of pages. */
 export function keep(key: string, value: unknown): boolean {
+  const text = JSON.stringify(value)
+  if (tryKeep(key, text)) return true
+  // Copies can be fetched again; what somebody said cannot.
+  if (isCopy(key)) return false
   try {
-    localStorage.setItem(key, JSON.stringify(value))
+    for (const each of Object.keys(localStorage).filter(isCopy)) localStorage.removeItem(each)
+  } catch {
+    return false
+  }
+  return tryKeep(key, text)
+}
+
+const isCopy = (key: string): boolean => key.startsWith(`${ROOT}.copy.`)
+
+function tryKeep(key: string, text: string): boolean {
+  try {
+    localStorage.setItem(key, text)
     return true
   } catch {
     return false

@@ -33,7 +33,7 @@ export function stripOf(draft: Draft): Strip {
     case 'lost-dead':
       return at(
         'lost',
-        Math.min(0.97, stuck + (draft.outcomePlace === null && last !== undefined ? 0.06 : 0)),
+        Math.min(0.97, stuck + (draft.outcomePlace === null && last !== undefined ? 0.09 : 0)),
         'lost',
       )
     case 'count':

@@ -28,6 +28,15 @@ describe('what the device keeps', () => {
     expect(recall(keyOf('rows', 'a', '1'), text)).toBeNull()
   })
 
+  it('makes room for what was said by dropping copies, never the other way round', () => {
+    const large = 'x'.repeat(3_000_000)
+    expect(keep(keyOf('copy', 'a', '1'), large)).toBe(true)
+    expect(keep(keyOf('rows', 'a', '1', 'r'), large)).toBe(true)
+    expect(recall(keyOf('copy', 'a', '1'), text)).toBeNull()
+    expect(keep(keyOf('copy', 'a', '1'), large)).toBe(false)
+    expect(recall(keyOf('rows', 'a', '1', 'r'), text)).toBe(large)
+  })
+
   it('is passed over when it cannot be read', () => {
     localStorage.setItem(keyOf('rows', 'a', '1'), '{half')
     keep(keyOf('rows', 'a', '2'), 7)
