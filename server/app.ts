@@ -1,5 +1,6 @@
 import express, { Router, type Express } from 'express'
 import { pinoHttp } from 'pino-http'
+import { REQUEST_SERIALIZERS } from './adapters/log'
 import type { Context } from './context'
 import { choiceRoutes } from './features/choices/choices.routes'
 import { counterRoutes } from './features/counters/counters.routes'
@@ -54,6 +55,7 @@ export function createApp(context: Context): Express {
     pinoHttp({
       logger: context.log,
       quietReqLogger: true,
+      serializers: REQUEST_SERIALIZERS,
       customLogLevel: (_req, res, error) => (error || res.statusCode >= 500 ? 'error' : 'debug'),
     }),
   )

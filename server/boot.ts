@@ -1,8 +1,8 @@
 import { randomBytes } from 'node:crypto'
 import { mkdir, readFile, writeFile } from 'node:fs/promises'
 import { join } from 'node:path'
-import { pino } from 'pino'
 import { systemClock } from './adapters/clock'
+import { createLog } from './adapters/log'
 import { diskStillFiles } from './adapters/stillFiles'
 import type { Config } from './config'
 import type { Context } from './context'
@@ -31,7 +31,7 @@ export async function boot(config: Config): Promise<{ context: Context; demoLoad
     db: await openDatabase(join(config.dataDir, 'overtop.sqlite')),
     clock: systemClock,
     stillFiles: diskStillFiles(config.dataDir),
-    log: pino({ level: config.logLevel }),
+    log: createLog(config.logLevel),
     sessionSecret: await sessionSecret(config),
   }
   const demoLoaded = config.demo ? await loadDemo(context) : false
