@@ -5,6 +5,7 @@ import { afterEach, beforeEach, describe, expect, it } from 'vitest'
 import { Still } from '@server/database/entities/Still'
 import { Trap } from '@server/database/entities/Trap'
 import { purgeDeleted } from '@server/features/possessions/deletion.service'
+import { deleteStill } from '@server/features/stills/stills.service'
 import { jpeg, possessionBody, teamUrl } from '../support/fixture'
 import { listed, newGame, newOpponent, newPossession, newScoutedGame } from '../support/scouted'
 import { startTestApp, TEAM, type Agent, type TestApp } from '../support/testApp'
@@ -166,6 +167,15 @@ describe('after ten minutes', () => {
 })
 
 describe('a deleted still', () => {
+  it('whose picture could not be removed is still there, to be deleted again', async () => {
+    const busy = { ...test.context.stillFiles, remove: () => Promise.reject(new Error('the disk is busy')) }
+    const which = { teamId: TEAM, possessionId: id, stillId: still }
+    await expect(deleteStill(test.context.db, busy, which)).rejects.toThrow('the disk is busy')
+    expect((await scout.get(address())).body.stills).toHaveLength(1)
+    expect((await scout.delete(`${address()}/stills/${still}`)).status).toBe(204)
+    expect(await readdir(join(test.dataDir, 'stills', TEAM))).toEqual([])
+  })
+
   it('is gone at once, picture and thumbnail, and its caption with the next purge', async () => {
     const path = test.context.stillFiles.pathOf(TEAM, still, 'full')
     await access(path)

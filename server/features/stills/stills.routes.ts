@@ -68,7 +68,10 @@ export const stillRoutes = ({ db, clock, stillFiles }: Context) => [
         const options = { headers: { 'Cache-Control': 'private, no-cache' }, dotfiles: 'allow' as const }
         res
           .type('image/jpeg')
-          .sendFile(path, options, (error) => (error ? reject(new NotFound('still')) : resolve()))
+          // Once the answer has begun, a fault is a reader who has left.
+          .sendFile(path, options, (error) =>
+            error && !res.headersSent ? reject(new NotFound('still')) : resolve(),
+          )
       })
       return undefined
     },

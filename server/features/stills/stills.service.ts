@@ -108,16 +108,23 @@ async function checkRoom(manager: EntityManager, possessionId: string): Promise<
     )
 }
 
-/** Row and files go at once; a picture of minors is not kept for an undo. @throws NotFound */
-export async function deleteStill(
+/**
+ * Row and files go at once; a picture of minors is not kept for an undo. Files first, as in a purge: if that
+ * fails, the row is still there to try again from. In one transaction, so that a still sent anew under the
+ * same id waits and does not lose its files.
+ * @throws NotFound
+ */
+export function deleteStill(
   db: DataSource,
   files: StillFiles,
   which: { teamId: string; possessionId: string; stillId: string },
 ): Promise<void> {
-  const still = await findInTeam(db.manager, Still, which.teamId, which.stillId, 'still')
-  if (still.possessionId !== which.possessionId) throw new NotFound('still')
-  await db.getRepository(Still).delete({ id: still.id })
-  await files.remove(still.teamId, still.id)
+  return db.transaction(async (manager) => {
+    const still = await findInTeam(manager, Still, which.teamId, which.stillId, 'still')
+    if (still.possessionId !== which.possessionId) throw new NotFound('still')
+    await files.remove(still.teamId, still.id)
+    await manager.delete(Still, { id: still.id })
+  })
 }
 
 /** The still of an id, for serving its file. @throws NotFound */
