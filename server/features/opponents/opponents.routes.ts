@@ -27,7 +27,7 @@ export const opponentRoutes = ({ db, clock }: Context) => [
     response: OpponentRow,
     handle: async ({ caller, params }) => {
       const row = await findInTeam(db.manager, Opponent, caller.teamId, params.id, 'opponent')
-      return ok(presentOpponent(row, await countsOf(db, row, clock())), row.version)
+      return ok(presentOpponent(row, await countsOf(db.manager, row, clock())), row.version)
     },
   }),
   endpoint({
@@ -40,7 +40,7 @@ export const opponentRoutes = ({ db, clock }: Context) => [
     response: OpponentRow,
     handle: async ({ caller, params, body, ifMatch }) => {
       const put = await putOpponent(db, { id: params.id, teamId: caller.teamId, body, ifMatch, now: clock() })
-      return putReply(put, presentOpponent(put.row, await countsOf(db, put.row, clock())))
+      return putReply(put, presentOpponent(put.row, await countsOf(db.manager, put.row, clock())))
     },
   }),
 ]

@@ -1,4 +1,4 @@
-import type { DataSource } from 'typeorm'
+import type { DataSource, EntityManager } from 'typeorm'
 import type { OpponentBody } from '@shared/opponents/schemas'
 import { Opponent } from '../../database/entities/Opponent'
 import { putRow, type Put } from '../../database/putRow'
@@ -19,11 +19,11 @@ export async function listOpponents(db: DataSource, teamId: string, now: Date) {
 
 /** What is counted of one opponent. */
 export async function countsOf(
-  db: DataSource,
+  manager: EntityManager,
   opponent: Opponent,
   now: Date,
 ): Promise<OpponentCounts | undefined> {
-  const counts = await countOpponents(db.manager, opponent.teamId, now, opponent.id)
+  const counts = await countOpponents(manager, opponent.teamId, now, opponent.id)
   return counts.get(opponent.id)
 }
 
@@ -40,7 +40,7 @@ export function putOpponent(
       what: 'opponent',
       bodyOf: ({ name, shortName }) => ({ name, shortName }),
       columnsOf: (body) => body,
-      present: (row) => presentOpponent(row, undefined),
+      present: async (row) => presentOpponent(row, await countsOf(manager, row, options.now)),
     }),
   )
 }

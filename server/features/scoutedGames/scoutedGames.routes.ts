@@ -23,7 +23,7 @@ export const scoutedGameRoutes = ({ db, clock }: Context) => [
     params: OneRow,
     response: ScoutedGameRow,
     handle: async ({ caller, params }) => {
-      const row = await getScoutedGame(db, caller.teamId, params.id)
+      const row = await getScoutedGame(db.manager, caller.teamId, params.id)
       return ok(row, row.version)
     },
   }),
@@ -44,7 +44,7 @@ export const scoutedGameRoutes = ({ db, clock }: Context) => [
         ifMatch,
         now: clock(),
       })
-      return putReply(put, await getScoutedGame(db, caller.teamId, params.id))
+      return putReply(put, await getScoutedGame(db.manager, caller.teamId, params.id))
     },
   }),
 ]

@@ -40,12 +40,17 @@ export async function listScoutedGames(
 }
 
 /** One scouted game with its counts. @throws NotFound */
-export async function getScoutedGame(db: DataSource, teamId: string, id: string): Promise<ScoutedGameRow> {
-  const found = await findInTeam(db.manager, ScoutedGame, teamId, id, 'scouted game')
-  const row = await db
-    .getRepository(ScoutedGame)
-    .findOneOrFail({ where: { id: found.id }, relations: { scout: true } })
-  const counts = await countByGame(db.manager, row.opponentId)
+export async function getScoutedGame(
+  manager: EntityManager,
+  teamId: string,
+  id: string,
+): Promise<ScoutedGameRow> {
+  const found = await findInTeam(manager, ScoutedGame, teamId, id, 'scouted game')
+  const row = await manager.findOneOrFail(ScoutedGame, {
+    where: { id: found.id },
+    relations: { scout: true },
+  })
+  const counts = await countByGame(manager, row.opponentId)
   return presentScoutedGame(row, counts.get(row.id))
 }
 
@@ -71,7 +76,7 @@ export function putScoutedGame(
       what: 'scouted game',
       bodyOf: bodyOfScoutedGame,
       columnsOf: (body) => ({ ...scoutedGameColumns(body), scoutId: there?.scoutId ?? options.scoutId }),
-      present: (row) => presentScoutedGame(row),
+      present: (row) => getScoutedGame(manager, options.teamId, row.id),
     })
   })
 }

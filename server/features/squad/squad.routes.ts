@@ -27,7 +27,7 @@ export const squadRoutes = ({ db, clock }: Context) => [
     response: SquadPlayerRow,
     handle: async ({ caller, params }) => {
       const row = await findInTeam(db.manager, SquadPlayer, caller.teamId, params.id, 'player')
-      return ok(presentSquadPlayer(row, await teamDay(db, caller.teamId, clock())), row.version)
+      return ok(presentSquadPlayer(row, await teamDay(db.manager, caller.teamId, clock())), row.version)
     },
   }),
   endpoint({
@@ -46,7 +46,7 @@ export const squadRoutes = ({ db, clock }: Context) => [
         ifMatch,
         now: clock(),
       })
-      return putReply(put, presentSquadPlayer(put.row, await teamDay(db, caller.teamId, clock())))
+      return putReply(put, presentSquadPlayer(put.row, await teamDay(db.manager, caller.teamId, clock())))
     },
   }),
 ]

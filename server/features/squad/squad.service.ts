@@ -1,4 +1,4 @@
-import type { DataSource } from 'typeorm'
+import type { DataSource, EntityManager } from 'typeorm'
 import type { SquadPlayerBody, SquadPlayerRow } from '@shared/squad/schemas'
 import { SquadPlayer } from '../../database/entities/SquadPlayer'
 import { Team } from '../../database/entities/Team'
@@ -8,14 +8,14 @@ import { Conflict } from '../../http/problem'
 import { bodyOfSquadPlayer, presentSquadPlayer } from './squad.presenter'
 
 /** Today's calendar day where the team is. */
-export async function teamDay(db: DataSource, teamId: string, instant: Date): Promise<string> {
-  const team = await db.getRepository(Team).findOneByOrFail({ id: teamId })
+export async function teamDay(manager: EntityManager, teamId: string, instant: Date): Promise<string> {
+  const team = await manager.getRepository(Team).findOneByOrFail({ id: teamId })
   return dayInZone(instant, team.timeZone)
 }
 
 /** The squad by shirt number; availability as of today. */
 export async function listSquad(db: DataSource, teamId: string, now: Date): Promise<SquadPlayerRow[]> {
-  const day = await teamDay(db, teamId, now)
+  const day = await teamDay(db.manager, teamId, now)
   const rows = await db.getRepository(SquadPlayer).find({ where: { teamId }, order: { jersey: 'ASC' } })
   return rows.map((row) => presentSquadPlayer(row, day))
 }
@@ -41,7 +41,8 @@ export function putSquadPlayer(
       what: 'player',
       bodyOf: bodyOfSquadPlayer,
       columnsOf: (body) => body,
-      present: (row) => presentSquadPlayer(row, dayInZone(options.now, 'UTC')),
+      present: async (row) =>
+        presentSquadPlayer(row, await teamDay(manager, options.teamId, options.now)),
     })
   })
 }
