@@ -1,3 +1,4 @@
+import { readFileSync } from 'node:fs'
 import { createRequire } from 'node:module'
 import type PDFDocument from 'pdfkit'
 import type { Cut } from '@shared/court/scene'
@@ -38,9 +39,20 @@ export function fontFor(cut: Cut, weight: FontWeight): FontName {
   return cut === 'label' || cut === 'count' ? NARROW[weight] : WIDE[weight]
 }
 
-/** Makes every cut known to a document by its FontName; only those used are embedded. */
-export function registerFonts(doc: InstanceType<typeof PDFDocument>): void {
+/** The files are read once a process, when the first page is drawn. */
+let faces: [FontName, Buffer][] | null = null
+
+function facesOnce(): [FontName, Buffer][] {
   // Resolved from this module, so that the built server and the tests find the packages alike.
   const require = createRequire(import.meta.url)
-  for (const [name, file] of Object.entries(FILES)) doc.registerFont(name, require.resolve(file))
+  faces ??= Object.entries(FILES).map(([name, file]) => [
+    name as FontName,
+    readFileSync(require.resolve(file)),
+  ])
+  return faces
+}
+
+/** Makes every cut known to a document by its FontName; only those used are embedded. */
+export function registerFonts(doc: InstanceType<typeof PDFDocument>): void {
+  for (const [name, face] of facesOnce()) doc.registerFont(name, face)
 }

@@ -52,10 +52,25 @@ const options = (style: Style) => ({
   characterSpacing: (style.tracking ?? 0) * style.size,
 })
 
+/** Widths in em by font and word. A face opens anew with every document and measuring in it is slow. */
+const EMS = new Map<string, number>()
+/** Words kept; past it the memory starts anew. */
+const MOST_WORDS = 20_000
+
+function emsOf(doc: Page, text: string, font: FontName): number {
+  const key = `${font} ${text}`
+  const known = EMS.get(key)
+  if (known !== undefined) return known
+  if (EMS.size >= MOST_WORDS) EMS.clear()
+  const ems = doc.font(font).fontSize(1).widthOfString(text)
+  EMS.set(key, ems)
+  return ems
+}
+
 /** Width of a text in one line, points. */
 export function widthOf(doc: Page, text: string, style: Style): number {
-  doc.font(style.font).fontSize(style.size)
-  return doc.widthOfString(text, options(style))
+  const spacing = (style.tracking ?? 0) * style.size * Math.max(0, text.length - 1)
+  return (emsOf(doc, text, style.font) * style.size + spacing) * (style.stretch ?? 1)
 }
 
 /**
