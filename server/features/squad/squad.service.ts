@@ -41,8 +41,7 @@ export function putSquadPlayer(
       what: 'player',
       bodyOf: bodyOfSquadPlayer,
       columnsOf: (body) => body,
-      present: async (row) =>
-        presentSquadPlayer(row, await teamDay(manager, options.teamId, options.now)),
+      present: async (row) => presentSquadPlayer(row, await teamDay(manager, options.teamId, options.now)),
     })
   })
 }
