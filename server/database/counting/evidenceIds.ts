@@ -2,6 +2,7 @@ import type { EntityManager } from 'typeorm'
 import type { TendencyFilter } from '@shared/tendencies/schemas'
 import { SOURCES } from './expressions'
 import { situation } from './filters'
+import { onCalendarDays } from './gameDays'
 import { habitRows, TRAP_LINE, type HabitSql } from './habitSql'
 
 export interface EvidenceId {
@@ -31,8 +32,9 @@ export async function evidenceIds(
   )
   // A page past the end has no row to read the total from.
   const beyond = rows.length === 0 && page.offset > 0
+  const listed = rows.map(({ total: _total, counted, ...row }) => ({ ...row, counted: counted === 1 }))
   return {
-    rows: rows.map(({ total: _total, counted, ...row }) => ({ ...row, counted: counted === 1 })),
+    rows: await onCalendarDays(manager, opponentId, listed),
     total: beyond
       ? (await evidenceIds(manager, opponentId, habit, filter, { limit: 1, offset: 0 })).total
       : (rows[0]?.total ?? 0),

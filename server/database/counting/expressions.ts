@@ -41,7 +41,8 @@ export const COVERED = `(CASE s.coverageKind
 
 /**
  * Every row against an opponent with its game, watched (one parameter) and ours (one more), as the table
- * `s`. The plus keeps SQLite off the index on deletedAt, which nearly every row shares.
+ * `s`; `day` is the calendar day of the one and the tip-off of the other (gameDays.ts). The plus keeps SQLite
+ * off the index on deletedAt, which nearly every row shares.
  */
 export const SOURCES = `source AS (
   SELECT g.id, 'scouted' AS kind, g.playedOn AS day, g.foe AS label, g.coverageKind, g.coverageFrom, g.coverageTo,
@@ -49,7 +50,7 @@ export const SOURCES = `source AS (
     FROM scouted_games g JOIN possessions p ON p.scoutedGameId = g.id
    WHERE g.opponentId = ? AND +p.deletedAt IS NULL
   UNION ALL
-  SELECT g.id, 'ours', substr(g.tipOff, 1, 10), '', 'all', NULL, NULL, g.rulePack, p.rowid
+  SELECT g.id, 'ours', g.tipOff, '', 'all', NULL, NULL, g.rulePack, p.rowid
     FROM games g JOIN possessions p ON p.gameId = g.id
    WHERE g.opponentId = ? AND +p.deletedAt IS NULL)`
 

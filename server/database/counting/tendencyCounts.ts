@@ -4,6 +4,7 @@ import type { TendencyFilter } from '@shared/tendencies/schemas'
 import type { Pickup, Trigger } from '@shared/vocabulary'
 import { COVERED, HAS_SHAPE, inSpot, is, JOINED, PRESSED, seen, SOURCES } from './expressions'
 import { situation } from './filters'
+import { onCalendarDays } from './gameDays'
 import { COUNTED_HABITS, habitRows, TRAP_LINE } from './habitSql'
 
 /** Counts of one habit in one game after one trigger. */
@@ -21,7 +22,7 @@ export interface CountedGame {
   kind: 'scouted' | 'ours'
   /** Whom they played; empty for a game of ours. */
   foe: string
-  /** Calendar day. */
+  /** Calendar day in the team's zone. */
   day: string
   age: number
   rows: number
@@ -99,8 +100,9 @@ export async function countGames(
        FROM ${JOINED} WHERE ${where.sql} GROUP BY s.id ORDER BY s.day DESC, s.id`,
     [opponentId, opponentId, ...triggers.parameters, ...triggers.parameters, ...where.parameters],
   )
+  const games = rows.map(({ outside: _outside, ...game }, age) => ({ ...game, age }))
   return {
-    games: rows.map(({ outside: _outside, ...game }, age) => ({ ...game, age })),
+    games: await onCalendarDays(manager, opponentId, games),
     notCovered: rows.reduce((sum, row) => sum + row.outside, 0),
   }
 }
