@@ -59,7 +59,8 @@ function againLine(read: OpponentRead): Line | null {
   if (!again || again.k === 0 || !best) return null
   return {
     text: `They trap again ${WHERE[best.spot] ?? ''}`.trim() + '.',
-    k: again.k,
+    // Said of one place, so counted there. A third trap on the other side may count a possession twice.
+    k: Math.min(best.k, again.k),
     n: again.n,
     ink: 'their',
     habitKey: 'trap-again',
