@@ -2,6 +2,7 @@ import { randomUUID } from 'node:crypto'
 import { afterAll, beforeAll, beforeEach, describe, expect, it } from 'vitest'
 import { Sheet } from '@server/database/entities/Sheet'
 import type { PlanInput } from '@shared/plans/schemas'
+import type { SheetView } from '@shared/sheets/schemas'
 import { gameBody, possessionBody, seedBook, seedSquad, teamUrl } from '../support/fixture'
 import { created, faultsIn, newGame, newOpponent, newPossession, newScoutedGame } from '../support/scouted'
 import { OTHER_PLAYER, OTHER_TEAM, PLAYER, startTestApp, type Agent, type TestApp } from '../support/testApp'
@@ -186,11 +187,12 @@ describe('signing off', () => {
       expect(change.status).toBe(409)
       expect(change.body.detail).toBe('Version 1 is signed off. Start a new version to change it.')
     }
-    expect((await put()).status).toBe(200)
-    expect((await state()).plan).toMatchObject({ version: 2, keys: ['Look middle first.'] })
+    const again = await put()
+    expect([again.status, again.body]).toEqual([200, (await state()).plan])
+    expect(again.body).toMatchObject({ version: 2, keys: ['Look middle first.'], signedBy: 'Test head' })
   })
 
-  it('opens the way for version 2; version 1 stays, and its sign-off may still be repeated', async () => {
+  it('opens the way for version 2; version 1 stays, and its picks and sign-off may still be repeated', async () => {
     await put()
     const sheetId = randomUUID()
     await signOff(sheetId, '"1"')
@@ -203,6 +205,7 @@ describe('signing off', () => {
       { id: next, number: 2, signedAt: null },
     ])
     expect((await put({ keys: [] }, '"2"')).status).toBe(409)
+    expect([(await put()).status, (await state()).plan.id]).toEqual([200, next])
     const repeated = await signOff(sheetId, '"1"')
     expect(repeated.status).toBe(200)
     expect(repeated.body.versions).toHaveLength(2)
@@ -218,6 +221,49 @@ describe('signing off', () => {
     await put({ id: next })
     expect((await signOff(sheetId, '"1"', next)).status).toBe(409)
     expect((await state()).plan.signedAt).toBeNull()
+  })
+
+  it('is told nothing of a sheet of another team', async () => {
+    await put()
+    const sheetId = randomUUID()
+    const theirs = await test.as('otherHead')
+    const theirGame = await newGame(theirs, await newOpponent(theirs, 'Lowmoor', OTHER_TEAM), OTHER_TEAM)
+    const theirPlan = { id: randomUUID(), firstCallId: (await seedBook(test, OTHER_TEAM)).counters[0] }
+    const at = teamUrl(`/games/${theirGame}/plan`, OTHER_TEAM)
+    expect((await theirs.put(at).send(theirPlan)).status).toBe(201)
+    const signed = theirs.post(`${at}/sign-off`).set('If-Match', '"1"')
+    expect((await signed.send({ planId: theirPlan.id, sheetId })).status).toBe(200)
+    expect((await signOff(sheetId, '"1"')).status).toBe(404)
+    expect((await state()).plan.signedAt).toBeNull()
+  })
+
+  it('counts a second trap where it is said to be, also where the first was not got out of', async () => {
+    const trap = (x: number, y: number, result: 'passed-out' | null = null) => ({
+      x,
+      y,
+      t: null,
+      cue: null,
+      result,
+    })
+    const scouted = await newScoutedGame(head, opponent)
+    const rows = [
+      [trap(0.08, 0.9, 'passed-out'), trap(0.55, 0.9)],
+      [trap(0.08, 0.9, 'passed-out'), trap(0.55, 0.9)],
+      [trap(0.08, 0.9, 'passed-out'), trap(0.3, 0.5)],
+      [trap(0.08, 0.9), trap(0.55, 0.9)],
+    ]
+    for (const [index, traps] of rows.entries())
+      await newPossession(head, scouted, { number: index + 1, traps })
+    await put()
+    const sheetId = randomUUID()
+    expect((await signOff(sheetId, '"1"')).status).toBe(200)
+    const { content } = (await head.get(teamUrl(`/sheets/${sheetId}`))).body as SheetView
+    expect(content.press.lines.map(({ text, k, n }) => [text, k, n])).toEqual(
+      expect.arrayContaining([
+        ['They trap in the corner.', 4, 4],
+        ['They trap again just past half.', 2, 3],
+      ]),
+    )
   })
 })
 

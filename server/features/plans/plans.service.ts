@@ -1,3 +1,4 @@
+import { isDeepStrictEqual } from 'node:util'
 import { In, type DataSource, type EntityManager } from 'typeorm'
 import type { PlanBody, PlanState } from '@shared/plans/schemas'
 import { Counter } from '../../database/entities/Counter'
@@ -48,18 +49,21 @@ async function checkNamed(manager: EntityManager, teamId: string, body: PlanBody
     throw new NotFound('player')
 }
 
-/** A new version needs the last one signed; a signed one is never changed. */
-function checkVersion(newest: Plan | null, body: PlanBody, sameBody: boolean): void {
-  if (newest === null) return
-  if (newest.id !== body.id && newest.signedAt === null)
+/** A new version needs the last one signed; a signed one is never changed. `own` is the version written to. */
+function checkVersion(newest: Plan | null, own: Plan | undefined): void {
+  if (own === undefined) {
+    if (newest && newest.signedAt === null)
+      throw new Conflict(
+        `Version ${newest.number} is not signed off yet. Change that one.`,
+        presentPlan(newest),
+      )
+    return
+  }
+  if (own.id !== newest?.id) throw new Conflict('This is an older version and stays as it was signed off.')
+  if (own.signedAt !== null)
     throw new Conflict(
-      `Version ${newest.number} is not signed off yet. Change that one.`,
-      presentPlan(newest),
-    )
-  if (newest.id === body.id && newest.signedAt !== null && !sameBody)
-    throw new Conflict(
-      `Version ${newest.number} is signed off. Start a new version to change it.`,
-      presentPlan(newest),
+      `Version ${own.number} is signed off. Start a new version to change it.`,
+      presentPlan(own),
     )
 }
 
@@ -70,13 +74,15 @@ export function putPlan(
 ): Promise<Put<Plan>> {
   const { gameId, teamId, body } = options
   return db.transaction(async (manager) => {
-    const { newest, versions } = await planState(manager, teamId, gameId)
-    const known = versions.some((version) => version.id === body.id)
-    if (known && newest?.id !== body.id)
-      throw new Conflict('This is an older version and stays as it was signed off.')
-    checkVersion(newest, body, newest !== null && JSON.stringify(bodyOfPlan(newest)) === JSON.stringify(body))
+    await findInTeam(manager, Game, teamId, gameId, 'game')
+    const versions = await versionsOf(manager, gameId)
+    const newest = versions.at(-1) ?? null
+    const own = versions.find(({ id }) => id === body.id)
+    // A repeat may come late, when its version is signed or a newer one is open: it changes nothing.
+    const again = own !== undefined && isDeepStrictEqual(bodyOfPlan(own), body)
+    if (!again) checkVersion(newest, own)
     await checkNamed(manager, teamId, body)
-    return putRow<Plan, PlanBody>({
+    const put = await putRow<Plan, PlanBody>({
       ...options,
       id: body.id,
       manager,
@@ -87,7 +93,7 @@ export function putPlan(
         return bodyOfPlan(row)
       },
       columnsOf: ({ id: _id, ...columns }) =>
-        known
+        own
           ? columns
           : {
               ...columns,
@@ -99,5 +105,7 @@ export function putPlan(
             },
       present: presentPlan,
     })
+    // Loaded with whoever signed it.
+    return own && put.outcome === 'unchanged' ? { ...put, row: own } : put
   })
 }

@@ -39,8 +39,9 @@ export function signOff(
     const { firstCallId } = newest
     if (firstCallId === null)
       throw new BadInput([{ field: 'firstCallId', message: 'Pick a first call before you sign off.' }])
-    if (await manager.getRepository(Sheet).findOneBy({ id: body.sheetId }))
-      throw new Conflict('Another sheet has this id already. Use a new one.')
+    const taken = await manager.getRepository(Sheet).findOneBy({ id: body.sheetId })
+    if (taken && taken.teamId !== teamId) throw new NotFound('sheet')
+    if (taken) throw new Conflict('Another sheet has this id already. Use a new one.')
     const stamp = now.toISOString()
     const frozen = await freezePlan(manager, Object.assign(newest, { firstCallId }))
     await manager
