@@ -1,9 +1,7 @@
 import { randomUUID } from 'node:crypto'
 import type { EntityManager } from 'typeorm'
-import { CounterBody } from '@shared/counters/schemas'
 import { GameBody } from '@shared/games/schemas'
 import { PossessionBody } from '@shared/possessions/schemas'
-import { RuleBody } from '@shared/rules/schemas'
 import { ScoutedGameBody } from '@shared/scoutedGames/schemas'
 import { SquadPlayerBody } from '@shared/squad/schemas'
 import type { Clock } from '../../adapters/clock'
@@ -11,17 +9,16 @@ import { hashPassword } from '../../adapters/passwords'
 import type { StillFiles } from '../../adapters/stillFiles'
 import type { DataSource } from 'typeorm'
 import { possessionColumns, scoutedGameColumns, trapColumns } from '../columnsOf'
-import { Counter } from '../entities/Counter'
 import { Game } from '../entities/Game'
 import { Membership } from '../entities/Membership'
 import { Opponent } from '../entities/Opponent'
 import { Person } from '../entities/Person'
 import { Possession } from '../entities/Possession'
-import { Rule } from '../entities/Rule'
 import { ScoutedGame } from '../entities/ScoutedGame'
 import { SquadPlayer } from '../entities/SquadPlayer'
 import { Team } from '../entities/Team'
 import { Trap } from '../entities/Trap'
+import { insertBook, unused } from '../insertBook'
 import { DEMO_COUNTERS } from './counters'
 import { loadDemoStills } from './loadStills'
 import { DEMO_PEOPLE, DEMO_TEAM_KEY, DEMO_TIME_ZONE, demoTeams } from './people'
@@ -85,31 +82,18 @@ async function loadTeamsAndPeople(load: Load, timeZone: string): Promise<void> {
   }
 }
 
-/** Every demo team gets the counters and the rules: they are where a new club starts from. */
-async function loadBook(load: Load): Promise<void> {
-  for (const { key: teamKey } of demoTeams(load.now)) {
-    const own = (kind: string, key: string) =>
-      teamKey === DEMO_TEAM_KEY ? `${kind} ${key}` : `${teamKey} ${kind} ${key}`
-    for (const { key, ...counter } of DEMO_COUNTERS) {
-      const body = CounterBody.parse(
-        teamKey === DEMO_TEAM_KEY ? counter : { ...counter, liveReps: 0, practice: { k: 0, n: 0 } },
-      )
-      await load.manager.insert(Counter, {
-        ...meta(load, teamKey, own('counter', key)),
-        name: body.name,
-        family: body.family,
-        body,
-      })
-    }
-    for (const { key, ...rule } of DEMO_RULES) {
-      const body = RuleBody.parse(rule)
-      await load.manager.insert(Rule, {
-        ...meta(load, teamKey, own('rule', key)),
-        number: body.number,
-        on: body.on,
-        body,
-      })
-    }
+/** Every demo team gets the counters and the rules; only the scenario's own team has used them. */
+async function loadBook({ manager, now, ids }: Load): Promise<void> {
+  for (const { key } of demoTeams(now)) {
+    const teamId = ids.of(key)
+    const ours = key === DEMO_TEAM_KEY
+    await insertBook(manager, {
+      teamId,
+      now,
+      counters: ours ? DEMO_COUNTERS : unused(DEMO_COUNTERS),
+      rules: DEMO_RULES,
+      idOf: (kind, rowKey) => ids.of(ours ? `${kind} ${rowKey}` : `${key} ${kind} ${rowKey}`),
+    })
   }
 }
 
