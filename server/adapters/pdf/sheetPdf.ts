@@ -19,7 +19,10 @@ export interface SheetPdfOptions {
  * @returns the whole PDF file
  * @throws SheetTooFull when it does not fit on one page at the smallest type that may be printed
  */
-export async function sheetPdf(view: SheetView, { paper, copy, copies }: SheetPdfOptions): Promise<Buffer> {
+export async function sheetPdf(
+  view: Omit<SheetView, 'budget'>,
+  { paper, copy, copies }: SheetPdfOptions,
+): Promise<Buffer> {
   const page = sheetContent(view, { copy, copies })
   const { size, margin } = PAPERS[paper]
   const [width, height] = size

@@ -1,4 +1,5 @@
 import { budgetOf } from '@shared/sheets/budget'
+import { readBy } from '@shared/sheets/reader'
 import type { FrozenPlan, SheetRow, SheetView } from '@shared/sheets/schemas'
 import type { Sheet } from '../../database/entities/Sheet'
 
@@ -29,28 +30,24 @@ export const presentSheetRow = ({
   createdAt: sheet.createdAt,
 })
 
-const roleIn = (counter: FrozenPlan['changeUp'], squadPlayerId: string) =>
-  counter?.roles.find((role) => role.squadPlayerId === squadPlayerId)?.role ?? null
+/** What stands on the sheet of one reader; `readerId` is a squad player, or null for the general sheet. */
+export const pageOfSheet = (whole: WholeSheet, readerId: string | null): Omit<SheetView, 'budget'> =>
+  readBy(
+    {
+      id: whole.sheet.id,
+      gameId: whole.gameId,
+      planNumber: whole.planNumber,
+      createdAt: whole.sheet.createdAt,
+      timeZone: whole.timeZone,
+      content: whole.content,
+      players: whole.players,
+      mine: null,
+    },
+    readerId,
+  )
 
-/** The sheet for one reader; `readerId` is a squad player, or null for the general sheet. */
+/** The same with its word budget, for the screen. */
 export function presentSheet(whole: WholeSheet, readerId: string | null): SheetView {
-  const { sheet, content } = whole
-  const view: Omit<SheetView, 'budget'> = {
-    id: sheet.id,
-    gameId: whole.gameId,
-    planNumber: whole.planNumber,
-    createdAt: sheet.createdAt,
-    timeZone: whole.timeZone,
-    content,
-    players: whole.players,
-    mine:
-      readerId === null
-        ? null
-        : {
-            squadPlayerId: readerId,
-            firstCallRole: roleIn(content.firstCall, readerId),
-            changeUpRole: roleIn(content.changeUp, readerId),
-          },
-  }
-  return { ...view, budget: budgetOf(view) }
+  const page = pageOfSheet(whole, readerId)
+  return { ...page, budget: budgetOf(page) }
 }

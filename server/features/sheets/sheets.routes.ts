@@ -7,7 +7,7 @@ import { InTeam, OneRow } from '../../http/params'
 import { listReply } from '../../http/present'
 import { Conflict, NotAllowed } from '../../http/problem'
 import { mayDrawFor } from './sheets.policy'
-import { presentSheet } from './sheets.presenter'
+import { pageOfSheet, presentSheet } from './sheets.presenter'
 import { checkReader, getSheet, listSheets } from './sheets.service'
 
 export const sheetRoutes = ({ db }: Context) => [
@@ -43,8 +43,7 @@ export const sheetRoutes = ({ db }: Context) => [
       const whole = await getSheet(db, caller.teamId, params.id)
       if (query.player !== undefined) await checkReader(db, caller.teamId, query.player)
       const { paper, copy } = query
-      const view = presentSheet(whole, reader)
-      const pdf = await sheetPdf(view, { paper, copy }).catch((error: unknown) => {
+      const pdf = await sheetPdf(pageOfSheet(whole, reader), { paper, copy }).catch((error: unknown) => {
         throw error instanceof SheetTooFull ? new Conflict(error.message) : error
       })
       res.type('application/pdf').set('Content-Disposition', 'inline; filename="sheet.pdf"').send(pdf)
