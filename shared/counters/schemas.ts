@@ -39,9 +39,9 @@ export const CounterBody = z.object({
   rulePacks: z.array(RulePackKey).min(1),
   /** Live repetitions in practice to date. */
   liveReps: z.number().int().min(0).max(9999),
-  /** Actions in it that the squad has not yet run; breaks ties. */
   /** Practice trips against a press, and how many got through. */
   practice: z.object({ k: z.number().int().min(0), n: z.number().int().min(0) }).default({ k: 0, n: 0 }),
+  /** Actions in it that the squad has not yet run; breaks ties. */
   newActions: z.number().int().min(0).max(20),
 })
 export type CounterBody = z.infer<typeof CounterBody>

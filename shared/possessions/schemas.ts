@@ -7,6 +7,7 @@ import {
   GOALIES,
   HANDLERS,
   LANES,
+  NOT_PRESSED,
   NOT_VISIBLE,
   ON_BALL,
   OUTCOMES,
@@ -115,7 +116,7 @@ function crossCheck(row: z.infer<typeof PossessionFields>, ctx: z.RefinementCtx)
   const fault = (path: string, message: string) => ctx.addIssue({ code: 'custom', path: [path], message })
   if ((row.scoutedGameId === null) === (row.gameId === null))
     fault('scoutedGameId', 'Give either scoutedGameId or gameId, and only one of them.')
-  const pressed = row.shape !== null && row.shape !== 'fake' && row.shape !== 'dropped-back'
+  const pressed = row.shape !== null && !NOT_PRESSED.includes(row.shape)
   if (!pressed && row.pickup !== null) fault('pickup', 'Pick-up is asked only when they press. Take it out.')
   if (!pressed && Array.isArray(row.traps) && row.traps.length > 0)
     fault('traps', 'They did not press here. Take the traps out or change the shape.')

@@ -2,6 +2,7 @@ import { z } from 'zod'
 import { Diagram, Role } from '../court/diagram'
 import { RulePackKey } from '../court/rulePacks'
 import { SpotName, SpotSide } from '../court/trapSpots'
+import { Id } from '../http/common'
 
 export const Paper = z.enum(['a4', 'letter'])
 export type Paper = z.infer<typeof Paper>
@@ -81,7 +82,7 @@ export const SheetView = z.object({
   createdAt: z.iso.datetime(),
   timeZone: z.string(),
   content: FrozenPlan,
-  /** Who has which role, by first name and number; absent players are told as a number of people short. */
+  /** Who has a role, by first name and number; somebody who was erased since is not among them. */
   players: z.array(z.object({ squadPlayerId: z.uuid(), firstName: z.string(), jersey: z.number().int() })),
   mine: z
     .object({ squadPlayerId: z.uuid(), firstCallRole: Role.nullable(), changeUpRole: Role.nullable() })
@@ -106,7 +107,7 @@ export type SheetList = z.infer<typeof SheetList>
 export const SheetPdfQuery = z.object({
   paper: Paper.default('a4'),
   /** Whose copy; staff may ask for anyone's, a player's own is taken by itself. */
-  player: z.uuid().optional(),
+  player: Id.optional(),
   /** Copy number, printed small at the foot. */
   copy: z.coerce.number().int().min(1).max(99).optional(),
 })
