@@ -13,7 +13,7 @@ import { ScoutedGameBody } from '@shared/scoutedGames/schemas'
 import { OUTCOMES, PICKUPS, SHAPES, TRIGGERS } from '@shared/vocabulary'
 import { scoutedGameBody } from '../support/fixture'
 import { TEAM, teamCookie, type TestApp } from '../support/testApp'
-import { byTurns, line } from './measure'
+import { byTurns, line, processor } from './measure'
 
 const ROWS_A_GAME = 25
 
@@ -121,12 +121,14 @@ export async function benchCounts(
     const rounds = rows > 5000 ? 10 : 30
     const read = await byTurns(
       rounds,
+      processor,
       () => get(`/opponents/${opponent}/tendencies`),
       async () => bare.run(),
     )
     lines.push(line(`tendencies of ${rows} rows`, read.ours.median, read.floor.median, 'ms'))
     const chosen = await byTurns(
       rounds,
+      processor,
       () => get(`/games/${game}/choices`),
       async () => bare.run(),
     )

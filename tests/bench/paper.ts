@@ -2,7 +2,7 @@ import PDFDocument from 'pdfkit'
 import request from 'supertest'
 import { fontFor, registerFonts } from '@server/adapters/pdf/fonts'
 import { TEAM, teamCookie, type TestApp } from '../support/testApp'
-import { byTurns, line } from './measure'
+import { byTurns, line, processor } from './measure'
 
 const PATH_OPERATOR = /^(.*\s)?(m|l|c|re|h|S|f|B)$/
 
@@ -59,6 +59,7 @@ export async function benchPaper(test: TestApp, sheetId: string, rounds: number)
   const operators = Math.max(...streams.map(countPaths))
   const times = await byTurns(
     rounds,
+    processor,
     () => get('a4'),
     () => barePage(operators),
   )

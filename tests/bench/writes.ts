@@ -8,7 +8,7 @@ import { applyPragmas } from '@server/database/dataSource'
 import { signInWith } from '@server/http/passport'
 import { possessionBody } from '../support/fixture'
 import { TEAM, teamCookie, type TestApp } from '../support/testApp'
-import { byTurns, line } from './measure'
+import { byTurns, line, wall } from './measure'
 
 const keepAlive = new Agent({ keepAlive: true, maxSockets: 1 })
 
@@ -115,6 +115,7 @@ export async function benchWrites(test: TestApp, scoutedGameId: string, rounds: 
   }
   const times = await byTurns(
     rounds,
+    wall,
     async () =>
       expect201(await put(ours.port, `/api/teams/${TEAM}/possessions/${randomUUID()}`, cookie, body)),
     async () => expect201(await put(floor.port, `/possessions/${randomUUID()}`, cookie, body)),

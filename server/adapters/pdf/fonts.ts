@@ -1,5 +1,5 @@
-import { readFileSync } from 'node:fs'
 import { createRequire } from 'node:module'
+import { openSync, type Font } from 'fontkit'
 import type PDFDocument from 'pdfkit'
 import type { Cut } from '@shared/court/scene'
 
@@ -39,20 +39,22 @@ export function fontFor(cut: Cut, weight: FontWeight): FontName {
   return cut === 'label' || cut === 'count' ? NARROW[weight] : WIDE[weight]
 }
 
-/** The files are read once a process, when the first page is drawn. */
-let faces: [FontName, Buffer][] | null = null
+let faces: [FontName, Font][] | null = null
 
-function facesOnce(): [FontName, Buffer][] {
+/** The faces, opened once a process: what the library works out of a font's tables then serves every page. */
+function facesOnce(): [FontName, Font][] {
   // Resolved from this module, so that the built server and the tests find the packages alike.
   const require = createRequire(import.meta.url)
   faces ??= Object.entries(FILES).map(([name, file]) => [
     name as FontName,
-    readFileSync(require.resolve(file)),
+    openSync(require.resolve(file)) as Font,
   ])
   return faces
 }
 
 /** Makes every cut known to a document by its FontName; only those used are embedded. */
 export function registerFonts(doc: InstanceType<typeof PDFDocument>): void {
-  for (const [name, face] of facesOnce()) doc.registerFont(name, face)
+  // pdfkit takes an opened font as well; its types name only files and bytes.
+  for (const [name, face] of facesOnce())
+    doc.registerFont(name, face as unknown as PDFKit.Mixins.PDFFontSource)
 }
