@@ -1,8 +1,9 @@
 import type { Choice, Choices } from '@shared/choices/schemas'
+import { rulePack } from '@shared/court/rulePacks'
 import { habitOf } from '@shared/tendencies/habits'
 import type { Count } from '@shared/stats/clusters'
 import { reaches } from '@shared/stats/evidence'
-import { factsOf, type EnginePack, type EnginePlayer } from './facts'
+import { factsOf, type EnginePack, type EnginePlayer, type GivenFacts } from './facts'
 import { baseOf, estimate, rank, weightedRecord, type Contender, type EngineCounter } from './ranking'
 import { banOn, reasonsFor, warningsFor, warningsForAll } from './reasons'
 import { assignRoles } from './roles'
@@ -19,6 +20,8 @@ export interface ChooseInput {
   pack: EnginePack
   /** Our own trips against pressure in our games, and how many got through. */
   own: Count
+  /** What else the record and the book say; a rule that asks what is left out stays silent. */
+  given?: Partial<GivenFacts>
   settings?: Partial<EngineSettings>
 }
 
@@ -122,6 +125,11 @@ export async function chooseCounters(input: ChooseInput): Promise<ChosenCounters
     squad: input.squad,
     pressedRows: countOf(input.tendencies, 'press').k,
     backcourtCount: input.pack.backcourtCount,
+    given: {
+      timeOutWhileThrowing: Number(rulePack(input.pack.key).timeOutWhileThrowing),
+      disguised: countOf(input.tendencies, 'disguise').k,
+      ...input.given,
+    },
   })
   const { fired, silenced } = await runRules(input.rules, input.tendencies, facts)
   const base = baseOf(input.own, settings)

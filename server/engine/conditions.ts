@@ -105,8 +105,11 @@ export function held(
     }
   }
   const name = tree.fact ?? ''
-  if (isFact(name))
-    return { facts: [{ kind: 'fact', fact: name, value: facts[name], credence: 1 }], credence: 1 }
+  if (isFact(name)) {
+    // A condition on a fact without an answer does not hold, so that there is one here.
+    const value = facts[name] ?? 0
+    return { facts: [{ kind: 'fact', fact: name, value, credence: 1 }], credence: 1 }
+  }
   const habit = habits.get(String(tree.params?.key))
   if (habit === undefined) return { facts: [], credence: 0 }
   const { key, k, n, games, thin } = habit

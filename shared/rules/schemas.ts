@@ -3,7 +3,7 @@ import { RowMeta } from '../http/common'
 import { LIMITS } from '../limits'
 import { GRADES, STRENGTHS, TRAITS, valuesOf } from '../vocabulary'
 
-/** Facts that are not habits: our squad, the rule set, the counter itself. */
+/** Facts that are not habits: counts of the record, our squad, the rule set, the book. */
 export const FACTS = [
   /** Pressed rows counted for the opponent. */
   'pressedRows',
@@ -17,6 +17,32 @@ export const FACTS = [
   'backcourtCount',
   /** Available players in all. */
   'available',
+  /** Available players who throw in under pressure (throw-in 2 or more) and dribble at least when free. */
+  'dribblingThrowers',
+  /** Available players who handle best of all (handle 3). */
+  'bestHandlers',
+  /** Available long arms besides our best handlers: those of the highest handle among the available. */
+  'otherLongArms',
+  /** Available players who sprint (sprint 2 or more). */
+  'sprinters',
+  /** 1 where the thrower's team gets a time-out once the thrower has the ball, else 0. */
+  'timeOutWhileThrowing',
+  /** Pressed rows of the opponent after a made basket or a made free throw. */
+  'pressedAfterScore',
+  /** Pressed rows after the last free throw. */
+  'pressedAfterFreeThrow',
+  /** Pressed rows after a whistle. */
+  'pressedAfterDeadBall',
+  /** Pressed rows on the first ball after a time-out or a new period. */
+  'pressedAfterBreak',
+  /** Pressed rows in which they showed one shape and played another. */
+  'disguised',
+  /** Throw-ins of our own games on which the count ran out. */
+  'ownThrowInCounts',
+  /** Days from the newest counted game of theirs to our game; no answer while none is counted. */
+  'filmDays',
+  /** Counters of the book with a screen that its defender cannot see. */
+  'blindScreens',
 ] as const
 export const FactName = z.enum(FACTS)
 export type FactName = z.infer<typeof FactName>

@@ -1,5 +1,5 @@
 import type { EntityManager } from 'typeorm'
-import { NOT_STOPPED, PRESSED, THROUGH } from './expressions'
+import { is, NOT_STOPPED, PRESSED, THROUGH } from './expressions'
 
 /** Our own game trips with a counter against a shape: n counts pressed rows that were not stopped. */
 export interface RecordCell {
@@ -32,4 +32,15 @@ export async function countOwnSuccess(
     [teamId],
   )
   return { k: row?.k ?? 0, n: row?.n ?? 0 }
+}
+
+/** Throw-ins of our own games on which the count ran out. */
+export async function countOwnThrowInCounts(manager: EntityManager, teamId: string): Promise<number> {
+  const [row]: { n: number }[] = await manager.query(
+    `SELECT count(*) AS n FROM possessions p
+      WHERE p.teamId = ? AND p.gameId IS NOT NULL AND p.deletedAt IS NULL
+        AND ${is('p.outcome', 'count')} AND ${is('p.outcomePlace', 'entry')}`,
+    [teamId],
+  )
+  return row?.n ?? 0
 }

@@ -68,14 +68,27 @@ describe('facts and groups', () => {
       player('b', { handle: 1, 'long-arm': 3, decide: 0 }),
       player('c', { handle: 3, 'long-arm': 3, decide: 3 }, false),
     ]
-    expect(factsOf({ squad, pressedRows: 7, backcourtCount: 10 })).toEqual({
+    expect(factsOf({ squad, pressedRows: 7, backcourtCount: 10 })).toMatchObject({
       pressedRows: 7,
       handlers: 1,
       longArms: 1,
       middlePlayers: 1,
       backcourtCount: 10,
       available: 2,
+      dribblingThrowers: 2,
+      bestHandlers: 1,
+      otherLongArms: 1,
+      sprinters: 2,
     })
+  })
+
+  it('never holds on a fact without an answer, either way', async () => {
+    const fact = 'filmDays'
+    for (const is of ['equal', 'at-least', 'at-most'] as const)
+      expect(await fires({ fact, is, value: 0 }, {}), is).toBe(false)
+    const given = factsOf({ squad: six(), pressedRows: 20, backcourtCount: 8, given: { filmDays: 0 } })
+    const asked = rule('r', { when: { fact, is: 'at-most', value: 0 } })
+    expect((await runRules([asked], read({}), given)).fired).toHaveLength(1)
   })
 
   it('all needs every part, any needs one, and they nest', async () => {

@@ -164,6 +164,12 @@ describe('the game at Choose', () => {
     }
   })
 
+  it('puts 1-4 across first against the Gulls', async () => {
+    const { choices } = (await maren.get(url(`/games/${gulls.id}/choices`))).body as Choices
+    const counters = (await maren.get(url('/counters'))).body.rows as { id: string; name: string }[]
+    expect(counters.find(({ id }) => id === choices[0]?.counterId)?.name).toBe('1-4 across')
+  })
+
   it('can be signed off as it stands, and both papers are one page without a last name', async () => {
     const { choices } = (await maren.get(url(`/games/${gulls.id}/choices`))).body as Choices
     const [planId, sheetId] = [randomUUID(), randomUUID()]

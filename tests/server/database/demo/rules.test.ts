@@ -10,8 +10,11 @@ const habitsIn = (condition: Condition): string[] => {
 }
 
 describe('DEMO_RULES', () => {
-  it('are the thirteen of the first season, each once', () => {
-    expect(DEMO_RULES.map((rule) => rule.number)).toEqual([2, 6, 10, 11, 14, 17, 20, 25, 28, 30, 47, 48, 56])
+  it('are those that can be answered today, in order, 8 and 51 in two parts', () => {
+    expect(DEMO_RULES.map((rule) => rule.number)).toEqual([
+      1, 2, 3, 4, 5, 6, 8, 8, 9, 10, 11, 12, 14, 15, 16, 17, 18, 19, 20, 21, 22, 24, 25, 26, 27, 28, 29, 30,
+      32, 33, 36, 37, 39, 40, 41, 42, 47, 48, 50, 51, 51, 52, 56, 57,
+    ])
     expect(new Set(DEMO_RULES.map((rule) => rule.key)).size).toBe(DEMO_RULES.length)
   })
 
@@ -19,7 +22,7 @@ describe('DEMO_RULES', () => {
     '%s is a whole rule as it stands',
     (_, rule) => {
       const { key, ...body } = rule
-      expect(key).toBe(`rule-${rule.number}`)
+      expect(key).toMatch(new RegExp(`^rule-${rule.number}(-[a-z-]+)?$`))
       expect(RuleBody.parse(body)).toEqual(body)
     },
   )
@@ -40,6 +43,16 @@ describe('DEMO_RULES', () => {
   })
 
   it('star exactly the rules that act on one sighting', () => {
-    expect(DEMO_RULES.filter((rule) => rule.starred).map((rule) => rule.number)).toEqual([10, 28])
+    expect(DEMO_RULES.filter((rule) => rule.starred).map((rule) => rule.number)).toEqual([10, 28, 29, 41, 42])
+  })
+
+  it('ask each trait once, the first the most', () => {
+    const order = ['strong', 'medium', 'light']
+    for (const rule of DEMO_RULES) {
+      const demands = rule.then.flatMap((demand) => ('strength' in demand ? [demand] : []))
+      const ranks = demands.map(({ strength }) => order.indexOf(strength))
+      expect(ranks, rule.key).toEqual([...ranks].sort())
+      expect(new Set(demands.map(({ trait }) => trait)).size).toBe(demands.length)
+    }
   })
 })

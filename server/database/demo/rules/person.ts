@@ -1,0 +1,85 @@
+import { above, atLeast, plain, seen, type DemoRule } from './terms'
+
+/** DOMAIN.md section 4, rules 24 to 30: person to person. */
+export const PERSON_RULES: DemoRule[] = [
+  {
+    ...plain,
+    key: 'rule-24',
+    number: 24,
+    title: 'Jump-switch: five metres apart, pass early',
+    when: above('variant:jump-switch'),
+    then: [
+      { effect: 'want', trait: 'clear-path', strength: 'strong' },
+      { effect: 'warn', text: 'Pass early, to the player whose defender jumped.' },
+    ],
+    because: 'From five metres the jump comes late, and the player it leaves is free for a moment.',
+  },
+  {
+    ...plain,
+    key: 'rule-25',
+    number: 25,
+    title: 'Jump-trap: clear the path, stay behind',
+    when: above('variant:jump-trap'),
+    then: [
+      { effect: 'want', trait: 'clear-path', strength: 'strong' },
+      { effect: 'want', trait: 'valve-behind', strength: 'medium' },
+      { effect: 'want', trait: 'middle-entry', strength: 'medium' },
+    ],
+    because: 'A teammate near the dribbler brings the second defender along.',
+  },
+  {
+    ...plain,
+    key: 'rule-26',
+    number: 26,
+    title: 'Straight, and our handler wins: clear out',
+    when: { all: [above('variant:straight'), atLeast('bestHandlers', 1)] },
+    then: [
+      { effect: 'want', trait: 'clear-out', strength: 'strong' },
+      { effect: 'warn', text: 'Not with a tired handler.' },
+    ],
+    because: 'No help comes, so one who beats one is over half.',
+    unless: above('trap', 0.2),
+    unlessBecause: 'They trap more than two times in ten.',
+  },
+  {
+    ...plain,
+    key: 'rule-27',
+    number: 27,
+    title: 'They switch: slip the screen, seal the smaller one',
+    when: above('variant:switch'),
+    then: [
+      { effect: 'want', trait: 'ball-side-screens', strength: 'medium' },
+      { effect: 'warn', text: 'Slip the screen as they switch, and seal the smaller defender.' },
+    ],
+    because: 'While they exchange, the screener is free for a step and has a smaller defender after it.',
+  },
+  {
+    ...plain,
+    key: 'rule-28',
+    number: 28,
+    title: 'They trap a turned back: no spin',
+    when: seen('cue:turned-back'),
+    then: [{ effect: 'warn', text: 'Never spin with the ball: retreat, face them, change in front.' }],
+    because: 'They have come on a turned back, when the dribbler cannot see the second defender.',
+    starred: true,
+  },
+  {
+    ...plain,
+    key: 'rule-29',
+    number: 29,
+    title: 'They trap a dead dribble: keep it alive',
+    when: seen('cue:dead-dribble'),
+    then: [{ effect: 'warn', text: 'Keep the dribble alive; once it is picked up, two come to the ball.' }],
+    because: 'They have come once the ball was picked up, when only a pass is left.',
+    starred: true,
+  },
+  {
+    ...plain,
+    key: 'rule-30',
+    number: 30,
+    title: 'They sag on a weak handler: take the bait away',
+    when: above('sag'),
+    then: [{ effect: 'want', trait: 'screening-handler', strength: 'medium' }],
+    because: 'They leave the weak handler free to have the ball there: let that player screen or stay deep.',
+  },
+]
