@@ -5,17 +5,20 @@ import type { Logger } from 'pino'
 
 const YEAR_MS = 31_536_000_000
 
-/** Express would print a stack; a browser gets one plain line. */
+const NOTHING_HERE = 'There is nothing here.'
+
+/** Express would print a stack; a browser gets one plain line. An address that cannot be read is nowhere. */
 const plainFault =
   (log: Logger): ErrorRequestHandler =>
   (error, req, res, next) => {
     if (res.headersSent) return next(error)
-    const missing = (error as { status?: number }).status === 404
+    const status = (error as { status?: number }).status ?? 500
+    const missing = status >= 400 && status < 500
     if (!missing) log.error({ err: error, path: req.path }, 'a file could not be served')
     res
       .status(missing ? 404 : 500)
       .type('text/plain')
-      .send(missing ? 'There is nothing here.' : 'This did not load. Try again.')
+      .send(missing ? NOTHING_HERE : 'This did not load. Try again.')
   }
 
 /** Serves the built client; every address that is not a file is the client's own route. */
@@ -29,6 +32,9 @@ export function serveClient(app: Express, folder: string, log: Logger): void {
   app.use(express.static(folder, { index: false, maxAge: 0 }))
   app.get('/{*path}', (_req, res) => {
     res.set('Cache-Control', 'no-cache').sendFile('index.html', { root: folder })
+  })
+  app.use((_req, res) => {
+    res.status(404).type('text/plain').send(NOTHING_HERE)
   })
   app.use(plainFault(log))
 }
