@@ -1,6 +1,6 @@
+import { resolve } from 'node:path'
 import PDFDocument from 'pdfkit'
 import request from 'supertest'
-import { fontFor, registerFonts } from '@server/adapters/pdf/fonts'
 import { TEAM, teamCookie, type TestApp } from '../support/testApp'
 import { byTurns, line, processor } from './measure'
 
@@ -10,20 +10,27 @@ const PATH_OPERATOR = /^(.*\s)?(m|l|c|re|h|S|f|B)$/
 const countPaths = (content: string) => content.split('\n').filter((row) => PATH_OPERATOR.test(row)).length
 
 function collect(doc: PDFKit.PDFDocument): Promise<Buffer> {
-  return new Promise((resolve) => {
+  return new Promise((done) => {
     const parts: Buffer[] = []
     doc.on('data', (part: Buffer) => parts.push(part))
-    doc.on('end', () => resolve(Buffer.concat(parts)))
+    doc.on('end', () => done(Buffer.concat(parts)))
     doc.end()
   })
 }
 
-/** A page with as many path operators and a line in each font, and nothing else. */
+/** The faces that a sheet embeds, as pdffonts lists them. */
+const FACES = [
+  '@expo-google-fonts/archivo/400Regular/Archivo_400Regular.ttf',
+  '@expo-google-fonts/archivo/500Medium/Archivo_500Medium.ttf',
+  '@expo-google-fonts/archivo/700Bold/Archivo_700Bold.ttf',
+  '@expo-google-fonts/archivo/800ExtraBold/Archivo_800ExtraBold.ttf',
+  '@expo-google-fonts/archivo-narrow/700Bold/ArchivoNarrow_700Bold.ttf',
+].map((file) => resolve('node_modules', file))
+
+/** A plain pdfkit page with as many path operators and one line in each face that a sheet embeds. */
 async function barePage(operators: number): Promise<Buffer> {
   const doc = new PDFDocument({ size: 'A4' })
-  registerFonts(doc)
-  for (const cut of ['label', 'count', 'text', 'name'] as const)
-    doc.font(fontFor(cut, 700)).text('Look middle first', 40, 40)
+  for (const face of FACES) doc.font(face).text('Look middle first', 40, 40)
   for (let index = 0; index < operators / 3; index++)
     doc
       .moveTo(index % 500, 60)
