@@ -16,6 +16,7 @@ import { sheetRoutes } from './features/sheets/sheets.routes'
 import { squadRoutes } from './features/squad/squad.routes'
 import { stillRoutes } from './features/stills/stills.routes'
 import { tendencyRoutes } from './features/tendencies/tendencies.routes'
+import { notTooDeep } from './http/depth'
 import { mount, type Endpoint } from './http/endpoint'
 import { health } from './http/health'
 import { describeApi } from './http/openapi'
@@ -64,7 +65,7 @@ export function createApp(context: Context): Express {
     res.set('Cache-Control', 'private, no-store')
     next()
   })
-  api.use(express.json({ limit: LIMITS.jsonBytes }))
+  api.use(express.json({ limit: LIMITS.jsonBytes }), notTooDeep)
   const endpoints = endpointsOf(context)
   const description = describeApi(endpoints)
   api.get('/openapi.json', (_req, res) => void res.json(description))

@@ -24,7 +24,11 @@ export const SESSION_MS = 14 * 24 * 60 * 60 * 1000
 export const SESSION_COOKIE = 'overtop'
 
 /** The session and sign-in middleware of one app, and its store. */
-export function signInWith(context: Context) {
+export function signInWith(context: Context): {
+  passport: InstanceType<typeof Passport>
+  store: SessionStore
+  middleware: RequestHandler[]
+} {
   const { db, clock, config } = context
   const store = new SessionStore(db, clock, SESSION_MS)
   const passport = new Passport()

@@ -66,6 +66,27 @@ describe('writes from another site', () => {
   })
 })
 
+describe('a body that is nested too deep', () => {
+  const rule = (depth: number) =>
+    `{"number":null,"title":"Deep","because":"It is.","then":[{"effect":"warn","text":"Deep."}],"when":${'{"all":['.repeat(depth)}{"fact":"handlers","is":"at-most","value":1}${']}'.repeat(depth)}}`
+  const sent = (depth: number) =>
+    head
+      .put(teamUrl(`/rules/${randomUUID()}`))
+      .set('Content-Type', 'application/json')
+      .send(rule(depth))
+
+  it('is 400 and says so, however deep; one that a coach could mean is taken', async () => {
+    expect((await sent(8)).status).toBe(201)
+    for (const depth of [40, 1000, 20_000]) {
+      const { status, body } = await sent(depth)
+      expect([status, body.errors]).toEqual([
+        400,
+        [{ field: 'body', message: 'This is nested too deep. Make it simpler.' }],
+      ])
+    }
+  })
+})
+
 describe('headers', () => {
   const policyOf = (header: string) =>
     Object.fromEntries(
