@@ -4,12 +4,13 @@ import { PossessionRow } from '../possessions/schemas'
 import { SpotName, SpotSide } from '../court/trapSpots'
 import { CLAIMS, GRADES, PICKUPS, SHAPES, TRIGGERS, valuesOf } from '../vocabulary'
 
-/** The situation; every filter may be left out. Lists come as comma-separated text in the query. */
+/** The situation; every filter may be left out or empty. Lists come as comma-separated text in the query. */
 const list = <T extends z.ZodType<unknown, unknown>>(item: T) =>
   z
     .string()
     .transform((text): unknown[] => text.split(',').filter(Boolean))
     .pipe(z.array(item).max(60) as z.ZodType<z.output<T>[], unknown[]>)
+    .transform((values) => (values.length > 0 ? values : undefined))
     .optional()
 
 export const MARGINS = ['behind', 'level', 'ahead'] as const

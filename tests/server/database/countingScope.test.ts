@@ -167,6 +167,13 @@ describe('the situation', () => {
     ])
   })
 
+  it('an empty filter is none at all, whichever it is', async () => {
+    await log(ALL, [{ margin: 0 }])
+    const whole = await read()
+    for (const name of ['trigger', 'period', 'margin', 'pickup', 'shape', 'game'])
+      expect(await read(`${name}=`), name).toEqual(whole)
+  })
+
   it('evidence follows the same situation, page by page, and keeps saying how many there are', async () => {
     const rows = Array.from({ length: 7 }, (_, index) => ({ trigger: index < 5 ? 'live' : 'break' }) as const)
     await log(ALL, rows)
