@@ -51,6 +51,8 @@ interface Shape<P extends Schema, Q, B> {
   response?: Schema
   /** Middleware between the checks and the handler (uploads). */
   before?: RequestHandler[]
+  /** Refusals of its own beside those that every endpoint has, for the description. */
+  problems?: Record<number, string>
   /** Media types other than JSON: what a request brings and an answer holds. */
   media?: { request?: string; response?: string; field?: string }
 }

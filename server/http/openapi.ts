@@ -103,6 +103,8 @@ function responses(schemas: Schemas, spec: Endpoint): Json {
     ...(edits(spec)
       ? { '409': problem('Stands in the way'), '412': problem('Changed meanwhile; carries the present row') }
       : {}),
+    ...(spec.body ? { '413': problem('Too large') } : {}),
+    ...Object.fromEntries(Object.entries(spec.problems ?? {}).map(([status, why]) => [status, problem(why)])),
     ...(spec.method === 'patch' || signsOff(spec) ? { '428': problem('If-Match is missing') } : {}),
   }
 }

@@ -122,6 +122,13 @@ describe('the API’s description', () => {
     }
   })
 
+  it('says what is too large, and that a page may hold no more', () => {
+    for (const [path, method, { requestBody, responses }] of operations)
+      if (path.startsWith('/teams'))
+        expect('413' in responses, `${method} ${path}`).toBe(requestBody !== undefined)
+    expect(document.paths['/teams/{team}/sheets/{id}.pdf']?.['get']?.responses).toHaveProperty('409')
+  })
+
   it('asks for If-Match where a change needs it, and says what a stale or missing one answers', () => {
     for (const [path, method, { parameters = [], responses }] of operations) {
       const has = parameters.some((one) => one.in === 'header' && one.name === 'If-Match')

@@ -37,6 +37,7 @@ export const sheetRoutes = ({ db }: Context) => [
     params: OneRow,
     query: SheetPdfQuery,
     media: { response: 'application/pdf' },
+    problems: { 409: 'Holds more than one page can' },
     handle: async ({ caller, params, query, res }) => {
       const reader = query.player ?? (caller.role === 'player' ? caller.squadPlayerId : null)
       if (!mayDrawFor(caller, reader)) throw new NotAllowed('You can open your own copy or the general one.')
