@@ -1,27 +1,43 @@
 import { describe, it, expect } from 'vitest'
 import { CounterBody } from '@shared/counters/schemas'
 import { diagramFaults } from '@shared/court/diagramFaults'
+import { startOfDiagram, walkDiagram } from '@shared/court/diagramWalk'
 import { rulePack } from '@shared/court/rulePacks'
+import { budgetOf } from '@shared/sheets/budget'
+import { FAMILIES, TRAITS, valuesOf } from '@shared/vocabulary'
 import { DEMO_COUNTERS } from '@server/database/demo/counters'
+import { FIVE, frozenCounter, frozenPlan, sheetView } from '../../support/sheetFixture'
 import { walk } from './walk'
 
 const words = (text: string) => text.split(/\s+/).filter(Boolean).length
 
 describe('the invented library', () => {
-  it('holds six counters of six families', () => {
-    expect(DEMO_COUNTERS).toHaveLength(6)
-    expect(new Set(DEMO_COUNTERS.map((counter) => counter.family)).size).toBe(6)
-    expect(new Set(DEMO_COUNTERS.map((counter) => counter.key)).size).toBe(6)
-    expect(new Set(DEMO_COUNTERS.map((counter) => counter.call)).size).toBe(6)
+  it('holds sixteen counters over all ten families, none to be taken for another', () => {
+    expect(DEMO_COUNTERS).toHaveLength(16)
+    expect(new Set(DEMO_COUNTERS.map(({ family }) => family))).toEqual(new Set(valuesOf(FAMILIES)))
+    for (const field of ['key', 'name', 'signal'] as const)
+      expect(new Set(DEMO_COUNTERS.map((counter) => counter[field])).size).toBe(16)
+    // A call is one word, shouted: no two begin with the same sound.
+    for (const { call } of DEMO_COUNTERS) expect(call).toMatch(/^[A-Z][a-z]+$/)
+    expect(new Set(DEMO_COUNTERS.map(({ call }) => call.slice(0, 2))).size).toBe(16)
   })
 
-  it('has one universal counter, one that starts in a corner and one that is not game-ready', () => {
+  it('offers every trait that a rule may ask for', () => {
+    const offered = new Set(DEMO_COUNTERS.flatMap(({ traits }) => traits))
+    expect(valuesOf(TRAITS).filter((trait) => !offered.has(trait))).toEqual([])
+  })
+
+  it('has one universal counter, one that starts in a corner and three that are not game-ready', () => {
     const having = (trait: string) =>
       DEMO_COUNTERS.filter((counter) => counter.traits.some((own) => own === trait)).map(({ key }) => key)
     expect(having('universal')).toEqual(['two-up'])
     expect(having('corner-entry')).toEqual(['middle-three'])
     expect(having('deep-first-look')).toEqual(['stack'])
-    expect(DEMO_COUNTERS.filter((counter) => counter.liveReps < 10).map(({ key }) => key)).toEqual(['clear'])
+    expect(DEMO_COUNTERS.filter((counter) => counter.liveReps < 10).map(({ key }) => key)).toEqual([
+      'clear',
+      'echo',
+      'island',
+    ])
   })
 })
 
@@ -36,8 +52,34 @@ describe.each(DEMO_COUNTERS)('$name', (body) => {
     expect(walked.faults).toEqual([])
   })
 
-  it('has nothing that the drawing board would call a fault', () => {
-    expect(diagramFaults(body.diagram, rulePack('fiba'))).toEqual([])
+  it('is drawn in three to six steps, in which their five move too', () => {
+    expect(body.diagram.steps.length).toBeGreaterThanOrEqual(3)
+    expect(body.diagram.steps.length).toBeLessThanOrEqual(6)
+    for (const { moves } of body.diagram.steps) expect(moves.some(({ kind }) => kind === 'theirs')).toBe(true)
+  })
+
+  it.each(body.rulePacks)(
+    'has nothing that the drawing board would call a fault on a court of %s',
+    (pack) => {
+      expect(diagramFaults(body.diagram, rulePack(pack))).toEqual([])
+    },
+  )
+
+  it('says what the book allows: a run along the line after a basket only, a blind screen one step off', () => {
+    const cautions = body.cautions.join(' ')
+    if (walked.lineRun > 0) expect(body.traits).toContain('end-line-run')
+    if (body.traits.includes('end-line-run')) expect(cautions).toMatch(/after a (basket|whistle)/i)
+    const blind = body.diagram.steps.some(({ moves }) => moves.some((m) => m.kind === 'screen' && m.blind))
+    expect(/blind.*one step/.test(cautions)).toBe(blind)
+  })
+
+  it('keeps every player’s sheet within its words, as first call and as change-up', () => {
+    const players = FIVE.map(({ squadPlayerId }) => squadPlayerId)
+    const own = frozenCounter(body.key, players)
+    for (const plan of [{ firstCall: own }, { changeUp: own }]) {
+      const { words: used, over } = budgetOf(sheetView(frozenPlan(plan)))
+      expect([over, used], JSON.stringify(Object.keys(plan))).toEqual([false, used])
+    }
   })
 
   it('is in within five seconds and over half well within eight', () => {
@@ -58,6 +100,29 @@ describe.each(DEMO_COUNTERS)('$name', (body) => {
     if (traits.has('deep-first-look')) expect(walked.firstCatch?.x).toBeGreaterThan(0.5)
     if (traits.has('return-to-thrower'))
       expect(kinds.some((move) => move.kind === 'pass' && move.to === walked.thrower)).toBe(true)
+    const catches = walked.catches
+    if (traits.has('catch-off-lines')) expect(catches[0]?.at.x).toBeGreaterThan(0.0715)
+    if (traits.has('quick-entry')) expect(walked.throwInAt).toBeLessThan(1)
+    if (traits.has('two-guard-front'))
+      for (const side of [(y: number) => y < 0.45, (y: number) => y > 0.55])
+        expect(
+          [...startOfDiagram(body.diagram).ours.values(), ...catches.map(({ at }) => at)].some(
+            ({ x, y }) => x > 0 && x < 0.25 && side(y),
+          ),
+        ).toBe(true)
+    const passes = walkDiagram(body.diagram)
+      .flatMap(({ moves }) => moves)
+      .filter(({ move }) => move.kind === 'pass')
+    if (traits.has('far-diagonal'))
+      expect(passes.some(({ from, to }) => to.x > from.x + 0.05 && Math.abs(to.y - from.y) > 0.2)).toBe(true)
+    if (traits.has('far-side-reversal'))
+      expect(
+        passes.some(({ from, to }, i) => {
+          const across = passes[i + 1]
+          return across && to.x < from.x && (from.y - 0.5) * (across.to.y - 0.5) < 0
+        }),
+      ).toBe(true)
+    if (traits.has('sideline-entry')) expect(body.looks.some((look) => look.includes('line'))).toBe(true)
     if (traits.has('middle-entry'))
       expect(
         kinds.some(

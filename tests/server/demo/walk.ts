@@ -34,7 +34,11 @@ export interface Walk {
   catches: { who: string; at: Place; behind: boolean; middle: boolean; deep: boolean }[]
   thrower: string
   holder: string
+  /** Metres that the thrower runs along the line with the ball in hand. */
+  lineRun: number
 }
+
+const outside = ({ x, y }: Place) => x < 0 || x > 1 || y < 0 || y > 1
 
 const where = (map: Map<string, Place>, who: string): Place => {
   const at = map.get(who)
@@ -56,14 +60,14 @@ export function walk(diagram: Diagram): Walk {
     catches: [],
     thrower: diagram.start.ball,
     holder: diagram.start.ball,
+    lineRun: 0,
   }
   if (ours.size !== 5) faults.push('not five of ours')
   if (defenders.size !== 5) faults.push('not five of theirs')
-  const spot = where(ours, result.thrower)
-  if (spot.x >= 0) faults.push('the thrower stands in court')
-  if (Math.abs(spot.y - 0.5) < 0.08) faults.push('the thrower stands under the backboard')
+  if (!outside(where(ours, result.thrower))) faults.push('the thrower stands in court')
   for (const [role, at] of ours)
-    if (role !== result.thrower && at.x < 0) faults.push(`${role} starts out of bounds`)
+    if (role !== result.thrower && outside(at)) faults.push(`${role} starts out of bounds`)
+  for (const [id, at] of defenders) if (outside(at)) faults.push(`${id} starts out of bounds`)
 
   let live = false
   let clock = 0
@@ -91,8 +95,13 @@ export function walk(diagram: Diagram): Walk {
             result.overHalfAt = clock + (length * ((HALF - from.x) / (move.to.x - from.x))) / SPEED.dribble
         } else if (move.who === result.holder && live) faults.push(`${name}: ${move.who} walks with the ball`)
         if (move.kind !== 'theirs') {
-          if (!live && move.who === result.thrower && move.to.x >= 0)
-            faults.push(`${name}: the thrower steps in before throwing`)
+          if (outside(move.to) && (live || move.who !== result.thrower))
+            faults.push(`${name}: ${move.who} leaves the court`)
+          if (!live && move.who === result.thrower) {
+            if (!outside(move.to)) faults.push(`${name}: the thrower steps in before throwing`)
+            if (from.x >= 0) faults.push(`${name}: the thrower runs along a sideline`)
+            result.lineRun += length
+          }
           longest = Math.max(longest, length / SPEED[move.kind])
         }
         steps.push({ who: move.who, length })
@@ -135,6 +144,7 @@ export function walk(diagram: Diagram): Walk {
     }
     if (!live) {
       live = true
+      if (from.x < 0 && Math.abs(from.y - 0.5) < 0.08) faults.push(`${name}: thrown from under the backboard`)
       result.firstCatch = to
       result.firstCatchInCoffin = spotAt(to).spot === 'coffin-corner'
       result.throwInAt = clock

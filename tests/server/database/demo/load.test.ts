@@ -170,6 +170,25 @@ describe('the game at Choose', () => {
     expect(counters.find(({ id }) => id === choices[0]?.counterId)?.name).toBe('1-4 across')
   })
 
+  it('puts 1-4 across first and keeps Box among the first three, and leaves Middle three out by rule 10', async () => {
+    const { choices, leftOut } = (await maren.get(url(`/games/${gulls.id}/choices`))).body as Choices
+    const { manager } = test.context.db
+    const nameOf = async (id: string) => (await manager.findOneByOrFail(Counter, { id })).name
+    const names = await Promise.all(choices.map(({ counterId }) => nameOf(counterId)))
+    expect(names[0]).toBe('1-4 across')
+    expect(names.slice(0, 3)).toContain('Box, big in the middle')
+    expect(names).not.toContain('Middle three')
+    const out = await Promise.all(
+      leftOut.map(async ({ counterId, ruleId }) => {
+        const rule = ruleId === null ? null : await manager.findOneByOrFail(Rule, { id: ruleId })
+        return [await nameOf(counterId), rule?.number ?? null]
+      }),
+    )
+    expect(out).toContainEqual(['Middle three', 10])
+    // What we have hardly run stands last, whatever speaks for it.
+    expect(choices.slice(-3).map(({ gameReady }) => gameReady)).toEqual([false, false, false])
+  })
+
   it('can be signed off as it stands, and both papers are one page without a last name', async () => {
     const { choices } = (await maren.get(url(`/games/${gulls.id}/choices`))).body as Choices
     const [planId, sheetId] = [randomUUID(), randomUUID()]
