@@ -2,8 +2,10 @@ import { randomBytes } from 'node:crypto'
 import { mkdir, readFile, writeFile } from 'node:fs/promises'
 import { join } from 'node:path'
 import { systemClock } from './adapters/clock'
+import { lockFolder } from './adapters/folderLock'
 import { createLog } from './adapters/log'
 import { diskStillFiles } from './adapters/stillFiles'
+import { pruneBackups } from './backup/prune'
 import type { Config } from './config'
 import type { Context } from './context'
 import { openDatabase } from './database/dataSource'
@@ -23,9 +25,34 @@ async function sessionSecret(config: Config): Promise<string> {
   return made
 }
 
-/** Opens everything that the app stands on; fills an empty database with the demo where that is wanted. */
-export async function boot(config: Config): Promise<{ context: Context; demoLoaded: boolean }> {
+export interface Booted {
+  context: Context
+  demoLoaded: boolean
+  /** Closes the database and lets go of the data folder. */
+  close: () => Promise<void>
+}
+
+/**
+ * Opens everything that the app stands on; fills an empty database with the demo where that is wanted.
+ * @throws FolderInUse when another server has the data folder, or a restore is under way there.
+ */
+export async function boot(config: Config): Promise<Booted> {
   await mkdir(config.dataDir, { recursive: true })
+  const letGo = lockFolder(config.dataDir)
+  try {
+    const { context, demoLoaded } = await open(config)
+    const close = async () => {
+      await context.db.destroy()
+      letGo()
+    }
+    return { context, demoLoaded, close }
+  } catch (error) {
+    letGo()
+    throw error
+  }
+}
+
+async function open(config: Config): Promise<{ context: Context; demoLoaded: boolean }> {
   const context: Context = {
     config,
     db: await openDatabase(join(config.dataDir, 'overtop.sqlite')),
@@ -40,12 +67,13 @@ export async function boot(config: Config): Promise<{ context: Context; demoLoad
 
 const EVERY_MS = 60_000
 
-/** What has to go goes every minute: deletions past their undo, sessions past their time. */
+/** What has to go goes every minute: deletions past their undo, sessions and backups past their time. */
 export function startHousekeeping(context: Context): () => void {
   const sessions = new SessionStore(context.db, context.clock, SESSION_MS)
   const sweep = async () => {
     await purgeDeleted(context.db, context.stillFiles, context.clock())
     await sessions.sweep()
+    await pruneBackups(context.config, context.clock())
   }
   const report = (error: unknown) => context.log.error({ err: error }, 'housekeeping failed')
   void sweep().catch(report)

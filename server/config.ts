@@ -28,6 +28,12 @@ const Settings = z.object({
     .enum(['on', 'off'], { error: 'DEMO must be on or off' })
     .default('on')
     .transform((value) => value === 'on'),
+  BACKUP_DAYS: z.coerce
+    .number({ error: 'BACKUP_DAYS must be a number of days, e.g. 30' })
+    .int('BACKUP_DAYS must be a whole number of days, e.g. 30')
+    .min(1, 'BACKUP_DAYS must be 1 or more')
+    .max(3650, 'BACKUP_DAYS must be at most 3650')
+    .default(30),
   LOG_LEVEL: z
     .enum(['fatal', 'error', 'warn', 'info', 'debug', 'silent'], {
       error: 'LOG_LEVEL must be one of fatal, error, warn, info, debug, silent',
@@ -44,6 +50,8 @@ export interface Config {
   publicUrl: string | null
   sessionSecret: string | null
   demo: boolean
+  /** How long a backup is kept. */
+  backupDays: number
   logLevel: string
 }
 
@@ -72,6 +80,7 @@ export function readConfig(env: Record<string, string | undefined>): Config {
     publicUrl: settings.PUBLIC_URL ?? null,
     sessionSecret: settings.SESSION_SECRET ?? null,
     demo: settings.DEMO,
+    backupDays: settings.BACKUP_DAYS,
     logLevel: settings.LOG_LEVEL,
   }
 }

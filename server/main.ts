@@ -1,6 +1,7 @@
 import { join } from 'node:path'
+import { FolderInUse } from './adapters/folderLock'
 import { createApp } from './app'
-import { boot, startHousekeeping } from './boot'
+import { boot, startHousekeeping, type Booted } from './boot'
 import { serveClient } from './clientFiles'
 import { ConfigError, readConfig, type Config } from './config'
 import { DEMO_PASSWORD, DEMO_SIGN_INS } from './database/demo/people'
@@ -17,8 +18,16 @@ function configOrStop(): Config {
   }
 }
 
+function bootOrStop(config: Config): Promise<Booted> {
+  return boot(config).catch((error: unknown) => {
+    if (!(error instanceof FolderInUse)) throw error
+    process.stderr.write(`${error.message} Stop it first, or set DATA_DIR to another folder.\n`)
+    process.exit(1)
+  })
+}
+
 const config = configOrStop()
-const { context } = await boot(config)
+const { context, close } = await bootOrStop(config)
 const app = createApp(context)
 serveClient(app, join(import.meta.dirname, '../client'), context.log)
 const stopHousekeeping = startHousekeeping(context)
@@ -48,7 +57,7 @@ function stop(): void {
   if (stopping) return
   stopping = true
   stopHousekeeping()
-  server.close(() => void context.db.destroy().then(() => process.exit(0)))
+  server.close(() => void close().then(() => process.exit(0)))
   server.closeIdleConnections()
 }
 process.on('SIGINT', stop)

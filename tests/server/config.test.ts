@@ -22,6 +22,7 @@ describe('settings', () => {
       publicUrl: null,
       sessionSecret: null,
       demo: true,
+      backupDays: 30,
       logLevel: 'warn',
     })
   })
@@ -34,6 +35,7 @@ describe('settings', () => {
       PUBLIC_URL: 'https://overtop.club.example',
       SESSION_SECRET: 'x'.repeat(32),
       DEMO: 'off',
+      BACKUP_DAYS: '14',
       LOG_LEVEL: 'silent',
       PATH: '/usr/bin',
       HOME: undefined,
@@ -45,6 +47,7 @@ describe('settings', () => {
       publicUrl: 'https://overtop.club.example',
       sessionSecret: 'x'.repeat(32),
       demo: false,
+      backupDays: 14,
       logLevel: 'silent',
     })
     expect(isAbsolute(config.dataDir)).toBe(true)
@@ -58,6 +61,7 @@ describe('settings', () => {
       PUBLIC_URL: '',
       SESSION_SECRET: '',
       DEMO: '',
+      BACKUP_DAYS: '',
       LOG_LEVEL: '',
     }
     expect(readConfig(empty)).toEqual(readConfig({}))
@@ -77,6 +81,10 @@ describe('settings', () => {
       'SESSION_SECRET must be at least 32 characters; leave it out to have one made and kept in DATA_DIR',
     ],
     [{ DEMO: 'yes' }, 'DEMO must be on or off'],
+    [{ BACKUP_DAYS: 'a month' }, 'BACKUP_DAYS must be a number of days, e.g. 30'],
+    [{ BACKUP_DAYS: '1.5' }, 'BACKUP_DAYS must be a whole number of days, e.g. 30'],
+    [{ BACKUP_DAYS: '0' }, 'BACKUP_DAYS must be 1 or more'],
+    [{ BACKUP_DAYS: '4000' }, 'BACKUP_DAYS must be at most 3650'],
     [{ LOG_LEVEL: 'loud' }, 'LOG_LEVEL must be one of fatal, error, warn, info, debug, silent'],
   ])('a wrong %o is told in one line of ours', (env, line) => {
     expect(faultsOf(env)).toEqual([line])

@@ -116,6 +116,7 @@ export async function startTestApp(
       publicUrl: options.publicUrl ?? null,
       sessionSecret: null,
       demo: false,
+      backupDays: 30,
       logLevel: 'silent',
     },
     db: await openDatabase(join(dataDir, 'overtop.sqlite')),

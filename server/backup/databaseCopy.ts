@@ -1,0 +1,122 @@
+import Database from 'better-sqlite3'
+import { LIMITS } from '@shared/limits'
+
+type Connection = Database.Database
+
+/** One step for the whole file: pages are copied under one read lock, so no writer can make it start again. */
+const ALL_PAGES = 0x7fff_ffff
+
+/**
+ * Copies the database at `from`, which a server may have open and be writing to, as of one instant, with
+ * what stands only in its log. Writers are not held up.
+ */
+export async function copyDatabase(from: string, to: string): Promise<void> {
+  const source = new Database(from, { fileMustExist: true })
+  try {
+    await source.backup(to, { progress: () => ALL_PAGES })
+  } finally {
+    source.close()
+  }
+}
+
+/**
+ * Takes out of a copy what a backup does not keep: who is signed in, and possessions whose time to be put
+ * back is over. What was taken out is gone from the file's bytes too, and the file needs no log beside it.
+ */
+export function clearCopy(file: string, now: Date): void {
+  withConnection(file, (connection) => {
+    connection.pragma('journal_mode = DELETE')
+    connection.pragma('foreign_keys = ON')
+    connection.pragma('secure_delete = ON')
+    connection.exec('DELETE FROM "sessions"')
+    const until = new Date(now.getTime() - LIMITS.undoMinutes * 60_000).toISOString()
+    connection.prepare('DELETE FROM "possessions" WHERE "deletedAt" <= ?').run(until)
+    connection.exec('VACUUM')
+  })
+}
+
+/** What is wrong with a database file, in words; empty when nothing is. */
+export function databaseFaults(file: string): string[] {
+  try {
+    return withConnection(file, (connection) => {
+      const integrity = connection.pragma('integrity_check', { simple: true })
+      const orphans = connection.pragma('foreign_key_check') as unknown[]
+      return [
+        ...(integrity === 'ok' ? [] : ['the database file is damaged']),
+        ...(orphans.length === 0 ? [] : [`${orphans.length} rows are without the row they belong to`]),
+      ]
+    })
+  } catch (error) {
+    if (error instanceof Database.SqliteError) return ['the database file is damaged']
+    throw error
+  }
+}
+
+/** Rows of every table, by its name. */
+export function countRows(file: string): Record<string, number> {
+  return withConnection(file, (connection) => {
+    const tables = connection
+      .prepare(
+        `SELECT name FROM sqlite_schema WHERE type = 'table' AND name NOT LIKE 'sqlite~_%' ESCAPE '~' ORDER BY name`,
+      )
+      .pluck()
+      .all() as string[]
+    return Object.fromEntries(
+      tables.map((table) => [
+        table,
+        connection.prepare(`SELECT count(*) FROM "${table}"`).pluck().get() as number,
+      ]),
+    )
+  })
+}
+
+/** The name of the newest migration that a database has had; empty for one that has had none. */
+export function newestMigration(file: string): string {
+  return withConnection(
+    file,
+    (connection) =>
+      (connection
+        .prepare('SELECT "name" FROM "migrations" ORDER BY "timestamp" DESC LIMIT 1')
+        .pluck()
+        .get() as string | undefined) ?? '',
+  )
+}
+
+/** Ids of every still and its team. */
+export function stillsOf(file: string): { id: string; teamId: string }[] {
+  return withConnection(
+    file,
+    (connection) =>
+      connection.prepare('SELECT "id", "teamId" FROM "stills" ORDER BY "id"').all() as {
+        id: string
+        teamId: string
+      }[],
+  )
+}
+
+/** Whether a still's row is there. */
+export function hasStill(file: string, id: string): boolean {
+  return withConnection(
+    file,
+    (connection) => connection.prepare('SELECT 1 FROM "stills" WHERE "id" = ?').get(id) !== undefined,
+  )
+}
+
+/** Takes stills out of a copy that were deleted after it was made. */
+export function forgetStills(file: string, ids: readonly string[]): void {
+  withConnection(file, (connection) => {
+    connection.pragma('secure_delete = ON')
+    const forget = connection.prepare('DELETE FROM "stills" WHERE "id" = ?')
+    for (const id of ids) forget.run(id)
+    connection.exec('VACUUM')
+  })
+}
+
+function withConnection<T>(file: string, use: (connection: Connection) => T): T {
+  const connection = new Database(file, { fileMustExist: true })
+  try {
+    return use(connection)
+  } finally {
+    connection.close()
+  }
+}
