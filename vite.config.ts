@@ -38,6 +38,7 @@ export default defineConfig(({ command, isSsrBuild, mode }) => {
           minify: false,
           sourcemap: true,
           emptyOutDir: true,
+          rolldownOptions: { input: ['server/main.ts', 'server/cli.ts'] },
         }
       : { outDir: 'dist/client', emptyOutDir: true },
     test: {

@@ -34,7 +34,8 @@ export function build() {
   console.log('Building ...')
   const vite = 'node_modules/vite/bin/vite.js'
   execFileSync(process.execPath, [vite, 'build', '--logLevel', 'warn'], { stdio: 'inherit' })
-  execFileSync(process.execPath, [vite, 'build', '--ssr', 'server/main.ts', '--logLevel', 'warn'], { stdio: 'inherit' })
+  // The server and the commands, as vite.config.ts lists them.
+  execFileSync(process.execPath, [vite, 'build', '--ssr', '--logLevel', 'warn'], { stdio: 'inherit' })
   writeFileSync(STAMP, wanted)
 }
 
