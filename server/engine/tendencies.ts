@@ -40,10 +40,14 @@ type Settings = Pick<EngineSettings, 'halfLifeGames' | 'icc' | 'iccFromGames' | 
 /** Jeffreys: half a row each way before anything was counted. */
 const UNKNOWN: Beta = { a: 0.5, b: 0.5 }
 
-const total = (cells: readonly Count[]): Count => ({
-  k: cells.reduce((sum, cell) => sum + cell.k, 0),
-  n: cells.reduce((sum, cell) => sum + cell.n, 0),
-})
+function total(cells: readonly Count[]): Count {
+  const sum = { k: 0, n: 0 }
+  for (const cell of cells) {
+    sum.k += cell.k
+    sum.n += cell.n
+  }
+  return sum
+}
 
 function groupBy<T>(list: readonly T[], key: (member: T) => string): Map<string, T[]> {
   const groups = new Map<string, T[]>()
@@ -55,8 +59,18 @@ function groupBy<T>(list: readonly T[], key: (member: T) => string): Map<string,
   return groups
 }
 
-const perGame = (cells: readonly HabitCell[]): Count[] =>
-  [...groupBy(cells, (cell) => cell.gameId).values()].map(total)
+/** Counts of each game; a season of cells goes through here, so nothing is copied on the way. */
+function perGame(cells: readonly HabitCell[]): Count[] {
+  const games = new Map<string, Count>()
+  for (const { gameId, k, n } of cells) {
+    const game = games.get(gameId)
+    if (game) {
+      game.k += k
+      game.n += n
+    } else games.set(gameId, { k, n })
+  }
+  return [...games.values()]
+}
 
 /** k of n with recent games weighing more, divided by the design effect of rows that share a game. */
 function weighted(cells: readonly HabitCell[], settings: Settings): Count {
@@ -110,11 +124,11 @@ function tendencyOf(
   settings: Settings,
 ): EngineTendency {
   const triggers = options.triggers ?? null
-  const counted = cells.filter((cell) => cell.n > 0)
-  const inView = counted.filter((cell) => triggers === null || triggers.includes(cell.trigger))
-  const others = counted.filter((cell) => !inView.includes(cell))
+  const isInView = (cell: HabitCell) => triggers === null || triggers.includes(cell.trigger)
+  const inView = cells.filter((cell) => cell.n > 0 && isInView(cell))
+  const others = triggers === null ? [] : cells.filter((cell) => cell.n > 0 && !isInView(cell))
   const { k, n } = total(inView)
-  const games = new Set(inView.map((cell) => cell.gameId)).size
+  const games = perGame(inView).length
   const amount = grade(n, games)
   const mayClaim = reaches(amount, leastToClaim(options.situation))
   const posterior = posteriorOf(habit, inView, others, settings)

@@ -1,7 +1,6 @@
 import { randomUUID } from 'node:crypto'
 import { join } from 'node:path'
 import Database from 'better-sqlite3'
-import request from 'supertest'
 import { COUNTED_HABITS } from '@server/database/counting/habitSql'
 import { Possession } from '@server/database/entities/Possession'
 import { ScoutedGame } from '@server/database/entities/ScoutedGame'
@@ -13,6 +12,7 @@ import { ScoutedGameBody } from '@shared/scoutedGames/schemas'
 import { OUTCOMES, PICKUPS, SHAPES, TRIGGERS } from '@shared/vocabulary'
 import { scoutedGameBody } from '../support/fixture'
 import { TEAM, teamCookie, type TestApp } from '../support/testApp'
+import { serve } from './loopback'
 import { byTurns, line, processor } from './measure'
 
 const ROWS_A_GAME = 25
@@ -109,14 +109,15 @@ export async function benchCounts(
   opponentOf: (rows: number) => Promise<{ opponent: string; game: string }>,
 ): Promise<string[]> {
   const cookie = await teamCookie(test, 'head')
+  const { send, close } = await serve(test.app)
   const lines: string[] = [`(${COUNTED_HABITS.length} habits)`]
   for (const rows of [100, 1000, 10_000]) {
     const { opponent, game } = await opponentOf(rows)
     await fill(test, opponent, rows)
     const bare = bareCounts(test, opponent)
     const get = async (path: string) => {
-      const answer = await request(test.app).get(`/api/teams/${TEAM}${path}`).set('Cookie', cookie)
-      if (answer.status !== 200) throw new Error(`${path} answered ${answer.status}`)
+      const status = await send('GET', `/api/teams/${TEAM}${path}`, cookie)
+      if (status !== 200) throw new Error(`${path} answered ${status}`)
     }
     const rounds = rows > 5000 ? 10 : 30
     const read = await byTurns(
@@ -135,5 +136,6 @@ export async function benchCounts(
     lines.push(line(`choices from ${rows} rows`, chosen.ours.median, chosen.floor.median, 'ms'))
     bare.close()
   }
+  await close()
   return lines
 }

@@ -1,5 +1,4 @@
 import { randomUUID } from 'node:crypto'
-import { request as httpRequest, Agent } from 'node:http'
 import { join } from 'node:path'
 import type { Express } from 'express'
 import Database from 'better-sqlite3'
@@ -8,42 +7,8 @@ import { applyPragmas } from '@server/database/dataSource'
 import { signInWith } from '@server/http/passport'
 import { possessionBody } from '../support/fixture'
 import { TEAM, teamCookie, type TestApp } from '../support/testApp'
+import { serve } from './loopback'
 import { byTurns, line, wall } from './measure'
-
-const keepAlive = new Agent({ keepAlive: true, maxSockets: 1 })
-
-/** One PUT over loopback; resolves with the status. */
-function put(port: number, path: string, cookie: string, body: string): Promise<number> {
-  return new Promise((resolve, reject) => {
-    const sent = httpRequest(
-      {
-        port,
-        host: '127.0.0.1',
-        path,
-        method: 'PUT',
-        agent: keepAlive,
-        headers: { cookie, 'content-type': 'application/json', 'content-length': Buffer.byteLength(body) },
-      },
-      (answer) => {
-        answer.resume()
-        answer.on('end', () => resolve(answer.statusCode ?? 0))
-      },
-    )
-    sent.on('error', reject)
-    sent.end(body)
-  })
-}
-
-const listen = (app: Express): Promise<{ port: number; close: () => Promise<void> }> =>
-  new Promise((resolve) => {
-    const server = app.listen(0, '127.0.0.1', () => {
-      const address = server.address()
-      resolve({
-        port: typeof address === 'object' && address ? address.port : 0,
-        close: () => new Promise((done) => server.close(() => done())),
-      })
-    })
-  })
 
 /**
  * The floor of a possession write: a bare Express route with the same session check, the same row and its
@@ -108,7 +73,7 @@ function bareApp(test: TestApp): { app: Express; close: () => void } {
 export async function benchWrites(test: TestApp, scoutedGameId: string, rounds: number): Promise<string[]> {
   const cookie = await teamCookie(test, 'assistant')
   const bare = bareApp(test)
-  const [ours, floor] = await Promise.all([listen(test.app), listen(bare.app)])
+  const [ours, floor] = await Promise.all([serve(test.app), serve(bare.app)])
   const body = JSON.stringify(possessionBody(scoutedGameId))
   const expect201 = (status: number) => {
     if (status !== 201) throw new Error(`a write answered ${status}`)
@@ -117,10 +82,9 @@ export async function benchWrites(test: TestApp, scoutedGameId: string, rounds: 
     rounds,
     wall,
     async () =>
-      expect201(await put(ours.port, `/api/teams/${TEAM}/possessions/${randomUUID()}`, cookie, body)),
-    async () => expect201(await put(floor.port, `/possessions/${randomUUID()}`, cookie, body)),
+      expect201(await ours.send('PUT', `/api/teams/${TEAM}/possessions/${randomUUID()}`, cookie, body)),
+    async () => expect201(await floor.send('PUT', `/possessions/${randomUUID()}`, cookie, body)),
   )
-  keepAlive.destroy()
   await Promise.all([ours.close(), floor.close()])
   bare.close()
   return [

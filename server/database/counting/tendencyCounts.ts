@@ -1,16 +1,17 @@
 import type { EntityManager } from 'typeorm'
 import { SPOT_CELLS, type SpotName, type SpotSide } from '@shared/court/trapSpots'
 import type { TendencyFilter } from '@shared/tendencies/schemas'
-import type { Pickup, Trigger } from '@shared/vocabulary'
+import { GOT_OUT, type Pickup, type Trigger } from '@shared/vocabulary'
 import { COVERED, HAS_SHAPE, inSpot, is, JOINED, PRESSED, seen, SOURCES } from './expressions'
 import { situation } from './filters'
 import { onCalendarDays } from './gameDays'
 import { COUNTED_HABITS, habitRows, TRAP_LINE } from './habitSql'
 
-/** Counts of one habit in one game after one trigger. */
+/** Counts of one habit in one game after one trigger; `gameAge` is 0 for their newest game. */
 export interface CountCell {
   habitKey: string
   gameId: string
+  gameAge: number
   trigger: Trigger
   k: number
   n: number
@@ -40,18 +41,26 @@ const N_ALIAS = new Map<string, string>()
 for (const { n } of COUNTED_HABITS) if (!N_ALIAS.has(n)) N_ALIAS.set(n, `n${N_ALIAS.size}`)
 
 const N_FLAGS = [...N_ALIAS].map(([sql, alias]) => `${sql} AS ${alias}`).join(', ')
+const COLUMNS = COUNTED_HABITS.map(({ key, n, k }, index) => ({
+  key,
+  k,
+  nAlias: N_ALIAS.get(n) ?? '',
+  kAlias: `k${index}`,
+}))
 const SUMS = [
   ...[...N_ALIAS.values()].map((alias) => `sum(${alias}) AS ${alias}`),
-  ...COUNTED_HABITS.map(
-    ({ n, k }, index) => `sum(CASE WHEN ${N_ALIAS.get(n)} THEN ${k} ELSE 0 END) AS k${index}`,
-  ),
+  ...COLUMNS.map(({ k, nAlias, kAlias }) => `sum(CASE WHEN ${nAlias} THEN ${k} ELSE 0 END) AS ${kAlias}`),
 ].join(',\n  ')
 
-/** Every habit, game by game and trigger by trigger; only cells with something in n come back. */
+/**
+ * Every habit, game by game and trigger by trigger; only cells with something in n come back.
+ * `ages` says how many games ago each game was.
+ */
 export async function countHabits(
   manager: EntityManager,
   opponentId: string,
   filter: TendencyFilter,
+  ages: ReadonlyMap<string, number>,
 ): Promise<CountCell[]> {
   const where = situation(filter)
   const rows: Record<string, number | string>[] = await manager.query(
@@ -60,14 +69,17 @@ export async function countHabits(
      SELECT p.gameId, p.trigger AS "trigger", ${SUMS} FROM flagged p GROUP BY p.gameId, p.trigger`,
     [opponentId, opponentId, ...where.parameters],
   )
-  return rows.flatMap((row) =>
-    COUNTED_HABITS.flatMap(({ key, n: sql }, index): CountCell[] => {
-      const n = Number(row[N_ALIAS.get(sql) ?? ''] ?? 0)
-      if (n === 0) return []
-      const k = Number(row[`k${index}`])
-      return [{ habitKey: key, gameId: String(row['gameId']), trigger: row['trigger'] as Trigger, n, k }]
-    }),
-  )
+  const cells: CountCell[] = []
+  for (const row of rows) {
+    const gameId = String(row['gameId'])
+    const gameAge = ages.get(gameId) ?? 0
+    const trigger = row['trigger'] as Trigger
+    for (const { key, nAlias, kAlias } of COLUMNS) {
+      const n = Number(row[nAlias])
+      if (n > 0) cells.push({ habitKey: key, gameId, gameAge, trigger, k: Number(row[kAlias]), n })
+    }
+  }
+  return cells
 }
 
 /** Per trigger: covered rows with a shape and how many of them pressed, whatever the trigger filter says. */
@@ -122,6 +134,10 @@ export async function countPickups(
   )
 }
 
+const FIRST_GOT_OUT = `EXISTS (SELECT 1 FROM traps f WHERE f.possessionId = p.id AND f.position = 1 AND f.result IN (${GOT_OUT.map(
+  (result) => `'${result}'`,
+).join(', ')}))`
+
 const SPOT_CASE = SPOT_CELLS.map(
   ({ spot, side }) => `WHEN ${inSpot(spot, side)} THEN '${spot} ${side}'`,
 ).join(' ')
@@ -137,10 +153,11 @@ export async function countSpots(
 ): Promise<SpotCount[]> {
   const where = situation(filter)
   const rows: { cell: string; first: number; k: number }[] = await manager.query(
-    `WITH ${SOURCES}, ${TRAP_LINE}
+    `WITH ${SOURCES}
      SELECT CASE ${SPOT_CASE} ELSE 'other middle' END AS cell, t.position = 1 AS first, count(DISTINCT p.id) AS k
-       FROM (${habitRows(where.sql)}) p JOIN traps t ON t.possessionId = p.id
-      WHERE ${PRESSED} AND ${is('p.trapsLogged', 'seen')} AND (t.position = 1 OR p.gotOut)
+       FROM ${JOINED} JOIN traps t ON t.possessionId = p.id
+      WHERE ${where.sql} AND ${COVERED} AND ${PRESSED} AND ${is('p.trapsLogged', 'seen')}
+        AND (t.position = 1 OR ${FIRST_GOT_OUT})
       GROUP BY 1, 2`,
     [opponentId, opponentId, ...where.parameters],
   )

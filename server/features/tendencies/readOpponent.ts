@@ -48,13 +48,10 @@ export async function readOpponent(
   filter: TendencyFilter,
 ): Promise<OpponentRead> {
   const { games, notCovered } = await countGames(manager, opponentId, filter)
-  // All triggers are counted: what a filter leaves out still says how their rate usually lies (pooling).
-  const cells = await countHabits(manager, opponentId, { ...filter, trigger: undefined })
   const ages = new Map(games.map((game) => [game.id, game.age]))
-  const list = tendencies(
-    cells.map((cell) => ({ ...cell, gameAge: ages.get(cell.gameId) ?? 0 })),
-    { situation: narrows(filter), triggers: filter.trigger ?? null },
-  )
+  // All triggers are counted: what a filter leaves out still says how their rate usually lies (pooling).
+  const cells = await countHabits(manager, opponentId, { ...filter, trigger: undefined }, ages)
+  const list = tendencies(cells, { situation: narrows(filter), triggers: filter.trigger ?? null })
   const counted = await countSituations(manager, opponentId, filter)
   const all = counted.reduce((sum, row) => ({ n: sum.n + row.n, pressed: sum.pressed + row.pressed }), {
     n: 0,
