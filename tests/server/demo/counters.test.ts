@@ -1,15 +1,30 @@
 import { describe, it, expect } from 'vitest'
 import { CounterBody } from '@shared/counters/schemas'
+import type { Diagram } from '@shared/court/diagram'
 import { diagramFaults } from '@shared/court/diagramFaults'
-import { startOfDiagram, walkDiagram } from '@shared/court/diagramWalk'
+import { startOfDiagram, walkDiagram, walkStep } from '@shared/court/diagramWalk'
 import { rulePack } from '@shared/court/rulePacks'
 import { budgetOf } from '@shared/sheets/budget'
 import { FAMILIES, TRAITS, valuesOf } from '@shared/vocabulary'
 import { DEMO_COUNTERS } from '@server/database/demo/counters'
 import { FIVE, frozenCounter, frozenPlan, sheetView } from '../../support/sheetFixture'
-import { walk } from './walk'
+import { metres, walk } from './walk'
 
 const words = (text: string) => text.split(/\s+/).filter(Boolean).length
+
+/** Passes short of half by a player whom two stand within reach of, with where all ten stand at that moment. */
+const passesOutOfTraps = (diagram: Diagram) =>
+  walkDiagram(diagram).flatMap(({ before, moves }, step) =>
+    moves.flatMap(({ move, from: place }) => {
+      if (move.kind !== 'pass' || move.throwIn || place.x >= 0.5) return []
+      const sooner = diagram.steps[step]?.moves.filter(
+        (other) => other.beat < move.beat || (other.beat === move.beat && other.kind !== 'pass'),
+      )
+      const standing = walkStep(before, sooner ?? []).after
+      const near = [...standing.theirs.values()].filter((at) => metres(at, place) < 2.2)
+      return near.length < 2 ? [] : [{ from: move.from, place, standing }]
+    }),
+  )
 
 describe('the invented library', () => {
   it('holds sixteen counters over all ten families, none to be taken for another', () => {
@@ -140,6 +155,22 @@ describe.each(DEMO_COUNTERS)('$name', (body) => {
       expect(at.behind || at.middle).toBe(true)
     }
     if (body.family !== 'stack') expect(walked.catches.some((c) => c.deep)).toBe(true)
+  })
+
+  it('has three ways out of every trap in the backcourt, one of them behind, and somebody far', () => {
+    for (const { from, place, standing } of passesOutOfTraps(body.diagram)) {
+      const mates = [...standing.ours].filter(([role]) => role !== from).map(([, at]) => at)
+      const behind = mates.filter(({ x }) => x < place.x - 0.03)
+      const middle = mates.filter((at) => Math.abs(at.y - 0.5) < 0.2 && metres(at, place) < 11)
+      // From the middle both lines are ways out; from a side the one that the ball is on.
+      const central = Math.abs(place.y - 0.5) < 0.2
+      const line = mates.filter(
+        ({ x, y }) => x > place.x && Math.abs(y - 0.5) > 0.2 && (central || (y - 0.5) * (place.y - 0.5) > 0),
+      )
+      expect(behind.length).toBeGreaterThan(0)
+      expect(new Set([...behind, ...middle, ...line]).size).toBeGreaterThanOrEqual(3)
+      expect(mates.some(({ x }) => x >= 0.44)).toBe(true)
+    }
   })
 
   it('gives each of the five roles a job, a key step that exists, and few words', () => {

@@ -6,7 +6,7 @@ export const anchor: DemoCounter = {
   key: 'anchor',
   name: 'Two up, big comes back',
   family: 'two-up',
-  alignment: 'Two guards at the elbows, a big and a runner at half',
+  alignment: 'Two guards up, a big at half',
   call: 'Anchor',
   signal: 'both hands pulled down',
   traits: ['two-guard-front', 'big-outlet', 'middle-entry'],

@@ -6,7 +6,7 @@ export const island: DemoCounter = {
   key: 'island',
   name: 'Clear out, big flashes back',
   family: 'clear-out',
-  alignment: 'Three ahead of the handler, a big among them',
+  alignment: 'Three ahead of the handler',
   call: 'Island',
   signal: 'one finger up, other hand circling',
   traits: ['clear-out', 'big-outlet', 'middle-entry'],

@@ -6,7 +6,7 @@ export const kite: DemoCounter = {
   key: 'kite',
   name: 'Kite for the 1-3-1',
   family: 'diamond',
-  alignment: 'Two guards low, one in the middle, one ahead',
+  alignment: 'Two low, one middle, one ahead',
   call: 'Kite',
   signal: 'hand reeling in a string',
   traits: ['two-guard-front', 'far-side-reversal', 'valve-behind'],

@@ -6,7 +6,7 @@ export const ladder: DemoCounter = {
   key: 'ladder',
   name: 'File, last goes long',
   family: 'line',
-  alignment: 'A spaced file up the lane, four metres apart',
+  alignment: 'A spaced file up the lane',
   call: 'Ladder',
   signal: 'two hands climbing',
   traits: ['middle-entry', 'long-threat', 'catch-off-lines'],

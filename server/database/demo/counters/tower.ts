@@ -6,7 +6,7 @@ export const tower: DemoCounter = {
   key: 'tower',
   name: 'Side stack',
   family: 'stack',
-  alignment: 'A column facing the thrower on the sideline',
+  alignment: 'A column facing the sideline',
   call: 'Tower',
   signal: 'one fist on the other',
   traits: ['ball-side-screens', 'middle-entry', 'long-threat', 'catch-off-lines'],
