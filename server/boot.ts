@@ -1,6 +1,7 @@
 import { randomBytes } from 'node:crypto'
 import { mkdir, readFile, writeFile } from 'node:fs/promises'
 import { join } from 'node:path'
+import { In } from 'typeorm'
 import { systemClock } from './adapters/clock'
 import { lockFolder } from './adapters/folderLock'
 import { createLog } from './adapters/log'
@@ -10,6 +11,8 @@ import type { Config } from './config'
 import type { Context } from './context'
 import { openDatabase } from './database/dataSource'
 import { loadDemo } from './database/demo/load'
+import { DEMO_SIGN_INS } from './database/demo/people'
+import { Person } from './database/entities/Person'
 import { purgeDeleted } from './features/possessions/deletion.service'
 import { SESSION_MS } from './http/passport'
 import { SessionStore } from './http/sessionStore'
@@ -27,7 +30,8 @@ async function sessionSecret(config: Config): Promise<string> {
 
 export interface Booted {
   context: Context
-  demoLoaded: boolean
+  /** Whether the invented club is in the database: its sign-ins are told only then. */
+  demoIsIn: boolean
   /** Closes the database and lets go of the data folder. */
   close: () => Promise<void>
 }
@@ -40,19 +44,19 @@ export async function boot(config: Config): Promise<Booted> {
   await mkdir(config.dataDir, { recursive: true })
   const letGo = lockFolder(config.dataDir)
   try {
-    const { context, demoLoaded } = await open(config)
+    const { context, demoIsIn } = await open(config)
     const close = async () => {
       await context.db.destroy()
       letGo()
     }
-    return { context, demoLoaded, close }
+    return { context, demoIsIn, close }
   } catch (error) {
     letGo()
     throw error
   }
 }
 
-async function open(config: Config): Promise<{ context: Context; demoLoaded: boolean }> {
+async function open(config: Config): Promise<Omit<Booted, 'close'>> {
   const context: Context = {
     config,
     db: await openDatabase(join(config.dataDir, 'overtop.sqlite')),
@@ -61,8 +65,9 @@ async function open(config: Config): Promise<{ context: Context; demoLoaded: boo
     log: createLog(config.logLevel),
     sessionSecret: await sessionSecret(config),
   }
-  const demoLoaded = config.demo ? await loadDemo(context) : false
-  return { context, demoLoaded }
+  if (config.demo) await loadDemo(context)
+  const email = In(DEMO_SIGN_INS.map((person) => person.email))
+  return { context, demoIsIn: await context.db.getRepository(Person).existsBy({ email }) }
 }
 
 const EVERY_MS = 60_000

@@ -27,7 +27,7 @@ function bootOrStop(config: Config): Promise<Booted> {
 }
 
 const config = configOrStop()
-const { context, close } = await bootOrStop(config)
+const { context, demoIsIn, close } = await bootOrStop(config)
 const app = createApp(context)
 serveClient(app, join(import.meta.dirname, '../client'), context.log)
 const stopHousekeeping = startHousekeeping(context)
@@ -38,7 +38,7 @@ const server = app.listen(config.port, config.host, () => {
   say(
     `Overtop is at ${config.publicUrl ?? `http://${config.host === '0.0.0.0' ? 'localhost' : config.host}:${port}`}`,
   )
-  if (config.demo) {
+  if (config.demo && demoIsIn) {
     say(`Demo sign-ins, all with the password ${DEMO_PASSWORD}:`)
     for (const { email, says } of DEMO_SIGN_INS) say(`  ${email.padEnd(30)} ${says}`)
   }

@@ -152,5 +152,12 @@ describe('npm run first-coach', () => {
     } finally {
       await product.stop()
     }
+    const plain = await startProduct({}, folder)
+    try {
+      expect((await signIn(plain, 'ada@club.example', password)).status).toBe(201)
+      expect(plain.printed()).not.toMatch(/over-the-top|maren/)
+    } finally {
+      await plain.stop()
+    }
   })
 })
