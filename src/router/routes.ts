@@ -72,6 +72,12 @@ const teamPages: RouteRecordRaw[] = [
     meta: { title: 'Counter', section: 'library', needs: 'counter:read' },
   },
   {
+    path: 'rules',
+    name: 'rules',
+    component: () => import('@/views/rules/RulesView.vue'),
+    meta: { title: 'Rules', section: 'library', needs: 'rule:read' },
+  },
+  {
     path: 'squad',
     name: 'squad',
     component: () => import('@/views/squad/SquadView.vue'),
