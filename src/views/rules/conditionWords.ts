@@ -146,9 +146,17 @@ export function clausesOf(condition: Condition, starred = false): Joined[] {
   return [{ clause: clauseOf(condition, starred), joined: 'and' }]
 }
 
-/** Keys of the habits that a condition asks about, each once, in the order written. */
-export function habitsIn(condition: Condition): string[] {
-  if ('all' in condition) return [...new Set(condition.all.flatMap(habitsIn))]
-  if ('any' in condition) return [...new Set(condition.any.flatMap(habitsIn))]
-  return 'habit' in condition ? [condition.habit] : []
+const leavesOf = (condition: Condition): (HabitCondition | FactCondition)[] => {
+  if ('all' in condition) return condition.all.flatMap(leavesOf)
+  return 'any' in condition ? condition.any.flatMap(leavesOf) : [condition]
 }
+
+/** Keys of the habits that a condition asks about, each once, in the order written. */
+export const habitsIn = (condition: Condition): string[] => [
+  ...new Set(leavesOf(condition).flatMap((leaf) => ('habit' in leaf ? [leaf.habit] : []))),
+]
+
+/** The facts that a condition asks about, each once, in the order written. */
+export const factsIn = (condition: Condition): FactName[] => [
+  ...new Set(leavesOf(condition).flatMap((leaf) => ('fact' in leaf ? [leaf.fact] : []))),
+]

@@ -42,3 +42,11 @@ export function headSentence(
     now === null ? '' : `${speaking} ${speaking === 1 ? 'speaks' : 'speak'} now for ${opponent}, ${gameDay}. `
   return `${rules(rows.length)}, ${on === rows.length ? 'all' : on} on. ${heard}They put the counters in order for every opponent and never change a count.`
 }
+
+/** Why a choice of rules is empty. `game` says whether the order for a next game is known. */
+export function emptyWords(shown: Shown, game: boolean): { title: string; detail: string } {
+  if (shown === 'off') return { title: 'Every rule is on', detail: '' }
+  return game
+    ? { title: 'No rule speaks now', detail: 'Nothing counted of the next opponent is what a rule asks for.' }
+    : { title: 'No game ahead', detail: 'Rules speak for an opponent. Put the next game in first.' }
+}

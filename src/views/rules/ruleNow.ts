@@ -1,8 +1,9 @@
 import type { Choices } from '@shared/choices/schemas'
-import type { RuleRow } from '@shared/rules/schemas'
+import type { FactName, RuleRow } from '@shared/rules/schemas'
 import { habitOf } from '@shared/tendencies/habits'
-import type { Tendency } from '@shared/tendencies/schemas'
-import { habitsIn } from './conditionWords'
+import type { TendencyRead } from '@shared/tendencies/schemas'
+import type { Trigger } from '@shared/vocabulary'
+import { factsIn, habitsIn } from './conditionWords'
 
 /** One habit that a rule asks about, as counted of the next opponent. */
 export interface NowCount {
@@ -34,6 +35,26 @@ function heardIn(choices: Choices): Set<string> {
 const onlyTakesAway = (rule: RuleRow): boolean =>
   rule.then.every(({ effect }) => effect === 'ban' || effect === 'avoid')
 
+/** Facts that are presses after a trigger: what n counts is every row after it. */
+const AFTER: Partial<Record<FactName, { label: string; triggers: readonly Trigger[] }>> = {
+  pressedAfterScore: {
+    label: 'Press after a basket or a free throw',
+    triggers: ['made-basket', 'made-free-throw'],
+  },
+  pressedAfterFreeThrow: { label: 'Press after a made free throw', triggers: ['made-free-throw'] },
+  pressedAfterDeadBall: { label: 'Press after a whistle', triggers: ['dead-ball'] },
+  pressedAfterBreak: { label: 'Press after a time-out or a new period', triggers: ['break'] },
+}
+
+function afterCount(fact: FactName, read: Pick<TendencyRead, 'situations'>): NowCount[] {
+  const after = AFTER[fact]
+  if (after === undefined) return []
+  const rows = read.situations.filter(({ trigger }) => after.triggers.some((each) => each === trigger))
+  const k = rows.reduce((sum, row) => sum + row.pressed, 0)
+  const n = rows.reduce((sum, row) => sum + row.n, 0)
+  return [{ key: fact, label: after.label, k, n, thin: false }]
+}
+
 /**
  * What every rule says now for one game, by its id. The order itself is the server's: this only reads who was heard
  * in it, who was kept silent and why, and the counts behind.
@@ -41,17 +62,19 @@ const onlyTakesAway = (rule: RuleRow): boolean =>
 export function rulesNow(
   rules: readonly RuleRow[],
   choices: Choices,
-  tendencies: readonly Tendency[],
+  read: Pick<TendencyRead, 'tendencies' | 'situations'>,
 ): Map<string, RuleNow> {
   const heard = heardIn(choices)
   const silenced = new Map(choices.silenced.map(({ ruleId, because }) => [ruleId, because]))
-  const counted = new Map(tendencies.map((tendency) => [tendency.key, tendency]))
-  const countsOf = (rule: RuleRow): NowCount[] =>
-    habitsIn(rule.when).flatMap((key) => {
+  const counted = new Map(read.tendencies.map((tendency) => [tendency.key, tendency]))
+  const countsOf = (rule: RuleRow): NowCount[] => [
+    ...habitsIn(rule.when).flatMap((key) => {
       const found = counted.get(key)
       const label = habitOf(key)?.label ?? key
       return found === undefined ? [] : [{ key, label, k: found.k, n: found.n, thin: found.thin }]
-    })
+    }),
+    ...factsIn(rule.when).flatMap((fact) => afterCount(fact, read)),
+  ]
   const state = (rule: RuleRow): Pick<RuleNow, 'state' | 'words'> => {
     if (!rule.on) return { state: 'off', words: 'Switched off' }
     if (heard.has(rule.id)) return { state: 'speaks', words: 'Speaks now' }

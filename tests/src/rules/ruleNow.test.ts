@@ -2,7 +2,7 @@ import { describe, expect, it } from 'vitest'
 import type { Choice, Choices, Reason } from '@shared/choices/schemas'
 import type { Tendency } from '@shared/tendencies/schemas'
 import { rulesNow } from '@/views/rules/ruleNow'
-import { headSentence, inOrder, shownRules } from '@/views/rules/ruleList'
+import { emptyWords, headSentence, inOrder, shownRules } from '@/views/rules/ruleList'
 import { above, rule } from './rules'
 
 const ID = '00000000-0000-4000-8000-0000000000'
@@ -24,8 +24,14 @@ const choice = (changes: Partial<Choice>) =>
 const tendency = (key: string, k: number, n: number, thin = false) =>
   ({ key, k, n, thin }) as unknown as Tendency
 
+const situations = [
+  { trigger: 'all', pressed: 16, n: 40 },
+  { trigger: 'made-basket', pressed: 9, n: 20 },
+  { trigger: 'made-free-throw', pressed: 4, n: 5 },
+] as const
+
 const at = (row: ReturnType<typeof rule>, choices: Partial<Choices>, counts: Tendency[] = []) =>
-  rulesNow([row], { ...quiet, ...choices }, counts).get(row.id)
+  rulesNow([row], { ...quiet, ...choices }, { tendencies: counts, situations: [...situations] }).get(row.id)
 
 describe('what a rule says now', () => {
   const row = rule()
@@ -71,9 +77,23 @@ describe('what a rule says now', () => {
   })
 })
 
+describe('counts behind a fact', () => {
+  it('are presses of all rows after that trigger; a fact of our own has none', () => {
+    const after = (fact: 'pressedAfterScore' | 'pressedAfterFreeThrow' | 'handlers') =>
+      at(rule({ when: { fact, is: 'at-least', value: 1 } }), {})?.counts.map(({ k, n }) => [k, n])
+    expect(after('pressedAfterScore')).toEqual([[13, 25]])
+    expect(after('pressedAfterFreeThrow')).toEqual([[4, 5]])
+    expect(after('handlers')).toEqual([])
+  })
+})
+
 describe('the list', () => {
   const rows = [rule(), rule({ id: id(20), number: 20, on: false }), rule({ id: id(6), number: 6 })]
-  const now = rulesNow(rows, { ...quiet, warnings: [{ ruleId: id(6), text: '' }] }, [])
+  const now = rulesNow(
+    rows,
+    { ...quiet, warnings: [{ ruleId: id(6), text: '' }] },
+    { tendencies: [], situations: [...situations] },
+  )
 
   it('is in order of numbers, the team’s own last', () => {
     const own = rule({ id: id(1), number: null })
@@ -84,6 +104,12 @@ describe('the list', () => {
     const numbers = (shown: 'all' | 'now' | 'off') => shownRules(rows, now, shown).map(({ number }) => number)
     expect([numbers('all'), numbers('now'), numbers('off')]).toEqual([[14, 20, 6], [6], [20]])
     expect(shownRules(rows, null, 'now')).toEqual([])
+  })
+
+  it('says why a choice of them is empty', () => {
+    expect(emptyWords('off', true).title).toBe('Every rule is on')
+    expect(emptyWords('now', true).title).toBe('No rule speaks now')
+    expect(emptyWords('now', false).title).toBe('No game ahead')
   })
 
   it('is told in a sentence, with the next game only where there is one', () => {
