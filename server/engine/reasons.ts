@@ -27,7 +27,8 @@ export function reasonsFor(
   strengths: EngineSettings['strengths'],
 ): Reason[] {
   const reasons = fired.flatMap(({ rule, facts, credence }) => {
-    const habit = facts.find((fact) => fact.kind === 'habit')
+    const habits = facts.filter((fact) => fact.kind === 'habit')
+    const [habit] = habits
     return rule.then.filter(isTraitDemand).flatMap((demand): Reason[] => {
       const sign = signOf(demand, traits)
       if (sign === 0) return []
@@ -41,12 +42,13 @@ export function reasonsFor(
           k: habit?.k ?? null,
           n: habit?.n ?? null,
           games: habit?.games ?? null,
+          facts: habits.map(({ key, k, n, games, thin }) => ({ habitKey: key, k, n, games, thin })),
           asked: `${demand.effect === 'want' ? 'wants' : 'avoids'} ${labelOf(TRAITS, demand.trait)}`,
           sign,
           strength: demand.strength,
           credence,
           weight: sign * strengths[demand.strength] * credence,
-          thin: facts.some((fact) => fact.kind === 'habit' && fact.thin),
+          thin: habits.some((fact) => fact.thin),
         },
       ]
     })

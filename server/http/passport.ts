@@ -61,6 +61,8 @@ export function signInWith(context: Context): {
       store,
       resave: false,
       saveUninitialized: false,
+      // The cookie slides with the session: signed out two weeks after the last use, not after the first.
+      rolling: true,
       cookie: { httpOnly: true, sameSite: 'lax', secure: https, maxAge: SESSION_MS, path: '/' },
     }),
     passport.session() as RequestHandler,

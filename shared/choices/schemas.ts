@@ -14,6 +14,16 @@ export const Reason = z.object({
   k: z.number().int().nullable(),
   n: z.number().int().nullable(),
   games: z.number().int().nullable(),
+  /** Every habit that fired the rule, the first of them above; each opens its possessions. */
+  facts: z.array(
+    z.object({
+      habitKey: z.string(),
+      k: z.number().int(),
+      n: z.number().int(),
+      games: z.number().int(),
+      thin: z.boolean(),
+    }),
+  ),
   /** What the rule asked, e.g. "wants middle entry". */
   asked: z.string(),
   sign: z.union([z.literal(1), z.literal(-1)]),

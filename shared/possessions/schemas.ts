@@ -72,6 +72,8 @@ export type TrackPoint = z.infer<typeof TrackPoint>
 
 /** What a scout writes: quick fields first, then the film fields that feed the habits. */
 const PossessionFields = z.object({
+  /** The landmark court that its places are fractions of (RECORD.md section 2). */
+  frame: z.literal(1).default(1),
   scoutedGameId: Id.nullable().default(null),
   gameId: Id.nullable().default(null),
   /** Rows of one trip up the court share it: a fresh throw-in within the trip is a new row. */

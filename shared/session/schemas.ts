@@ -20,7 +20,6 @@ export const ACTIONS = [
   'plan:write',
   'plan:sign-off',
   'sheet:read',
-  'sheet:write',
 ] as const
 export type Action = (typeof ACTIONS)[number]
 

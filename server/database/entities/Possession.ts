@@ -31,6 +31,10 @@ export class Possession extends TeamRow {
   @Column({ type: 'varchar', length: 36, nullable: true })
   gameId!: string | null
 
+  /** The landmark court that places are fractions of. */
+  @Column({ type: 'integer' })
+  frame!: 1
+
   @Column({ type: 'varchar', length: 36, nullable: true })
   tripId!: string | null
 

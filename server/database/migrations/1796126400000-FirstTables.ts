@@ -100,6 +100,7 @@ export class FirstTables1796126400000 implements MigrationInterface {
         "updatedAt" text NOT NULL,
         "scoutedGameId" varchar(36),
         "gameId" varchar(36),
+        "frame" integer NOT NULL,
         "tripId" varchar(36),
         "number" integer NOT NULL,
         "period" integer,

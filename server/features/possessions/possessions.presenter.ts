@@ -18,6 +18,7 @@ const bodyOfTrap = ({ x, y, t, cue, result }: Trap) => ({ x, y, t, cue, result }
 /** The stored row as the body that would have made it. */
 export function bodyOfPossession(row: Possession, traps: Trap[]): PossessionBody {
   return {
+    frame: row.frame,
     scoutedGameId: row.scoutedGameId,
     gameId: row.gameId,
     tripId: row.tripId,

@@ -19,6 +19,8 @@ export interface ReasonGroup {
   because: string
   count: { k: number; n: number; games: number | null } | null
   ink: 'their' | 'our' | 'plain'
+  /** The other habits that the rule rests on. */
+  also: { habitKey: string; what: string; k: number; n: number }[]
   lines: ReasonLine[]
 }
 
@@ -50,6 +52,14 @@ function startGroup(reason: Reason): ReasonGroup {
     because: reason.because,
     count: k === null || n === null ? null : { k, n, games },
     ink: habit?.ink ?? 'plain',
+    also: reason.facts
+      .filter((fact) => fact.habitKey !== reason.habitKey)
+      .map((fact) => ({
+        habitKey: fact.habitKey,
+        what: habitOf(fact.habitKey)?.label ?? fact.habitKey,
+        k: fact.k,
+        n: fact.n,
+      })),
     lines: [],
   }
 }

@@ -29,6 +29,7 @@ const ONLY_PRESSED = [
  */
 export function emptyDraft(scoutedGameId: string, number: number, tripId: string | null = null): Draft {
   return {
+    frame: 1,
     scoutedGameId,
     gameId: null,
     tripId,

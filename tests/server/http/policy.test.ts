@@ -21,7 +21,6 @@ const TABLE: Record<Action, { head: boolean; assistant: boolean; player: boolean
   'plan:write': { head: true, assistant: false, player: false },
   'plan:sign-off': { head: true, assistant: false, player: false },
   'sheet:read': { head: true, assistant: true, player: true },
-  'sheet:write': { head: true, assistant: false, player: false },
 }
 
 describe('the policy table', () => {

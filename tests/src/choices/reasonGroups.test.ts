@@ -11,6 +11,7 @@ const reason = (over: Partial<Reason>): Reason => ({
   k: 18,
   n: 26,
   games: 3,
+  facts: [{ habitKey: 'shape:2-2-1', k: 18, n: 26, games: 3, thin: false }],
   asked: 'wants middle entry',
   sign: 1,
   strength: 'strong',
@@ -30,6 +31,7 @@ describe('reasons in groups', () => {
       k: null,
       n: null,
       games: null,
+      facts: [],
       title: 'One handler',
       asked: 'avoids clear-out',
       sign: -1,
@@ -51,6 +53,17 @@ describe('reasons in groups', () => {
     expect(groups[0]?.count).toEqual({ k: 18, n: 26, games: 3 })
     expect(groups[1]?.count).toBeNull()
     expect(groups[1]?.lines[0]).toEqual({ words: 'Has clear-out, unwanted here', length: -0.5, thin: false })
+  })
+
+  it('tells the other habits that a rule rests on', () => {
+    const facts = [
+      { habitKey: 'shape:2-2-1', k: 18, n: 26, games: 3, thin: false },
+      { habitKey: 'mirror', k: 22, n: 30, games: 3, thin: false },
+    ]
+    expect(reasonGroups([reason({ facts })], 1)[0]?.also).toEqual([
+      { habitKey: 'mirror', what: 'Mirror the thrower', k: 22, n: 30 },
+    ])
+    expect(groups[0]?.also).toEqual([])
   })
 
   it('wears our ink where the habit is room they leave', () => {

@@ -35,6 +35,7 @@ export const possession = (over: Partial<PossessionRow> = {}): PossessionRow => 
   version: 1,
   createdAt: '2026-03-14T12:00:00.000Z',
   updatedAt: '2026-03-14T12:00:00.000Z',
+  frame: 1,
   scoutedGameId: '33333333-3333-4333-8333-333333333333',
   gameId: null,
   tripId: null,
