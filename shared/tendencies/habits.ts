@@ -129,6 +129,12 @@ export const HABITS: readonly Habit[] = [
   ),
   habit('safety-leaves-early', 'behind', 'Safety leaves early', 'trapped, the safety seen'),
   habit('safety-home', 'behind', 'Safety stays home', 'trapped, the safety seen'),
+  habit(
+    'slow-crossing',
+    'result',
+    'Slow the crossing past three quarters of the count',
+    'pressed, over half, the crossing timed',
+  ),
   habit('others-through', 'result', 'Let others through', 'pressed in scouted games, not stopped', 'our'),
 ]
 

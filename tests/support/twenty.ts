@@ -40,6 +40,7 @@ export const TWENTY: readonly Row[] = [
     leftOpen: ['middle', 'long'],
     goalie: 'left-early',
     shownShape: '2-2-1',
+    crossedAt: 6,
     outcome: 'through-with-numbers',
   },
   // 3: looked for a trap and there was none, so lanes and safety say nothing of a trap
@@ -54,6 +55,7 @@ export const TWENTY: readonly Row[] = [
     traps: [],
     leftOpen: ['far-side'],
     goalie: 'home',
+    crossedAt: 6.5,
     outcome: 'through',
   },
   // 4
@@ -196,7 +198,7 @@ export const TWENTY: readonly Row[] = [
   { trigger: 'made-free-throw', shape: 'fake', outcome: 'lost-dead' },
   { trigger: 'dead-ball', shape: 'dropped-back', outcome: 'through' },
   { trigger: 'break', shape: 'dropped-back' },
-  { trigger: 'live', shape: 'dropped-back', outcome: 'lost-live' },
+  { trigger: 'live', shape: 'dropped-back', crossedAt: 7.5, outcome: 'lost-live' },
   // 19
   {
     trigger: 'made-basket',

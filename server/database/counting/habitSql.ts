@@ -1,3 +1,4 @@
+import { RULE_PACKS } from '@shared/court/rulePacks'
 import { SPOT_CELLS } from '@shared/court/trapSpots'
 import { HABITS } from '@shared/tendencies/habits'
 import { DENIED, GOT_OUT, LANES, NOT_PRESSED, SHAPES, SHAPE_VARIANTS, TRAP_CUES } from '@shared/vocabulary'
@@ -44,6 +45,7 @@ const FIELDS = [
   'handler',
   'goalie',
   'shownShape',
+  'crossedAt',
 ]
 
 /**
@@ -53,7 +55,7 @@ const FIELDS = [
 export const habitRows = (
   where: string,
 ) => `SELECT p.id, p.number, p.trigger, ${FIELDS.map((field) => `p.${field}`).join(', ')},
-    s.id AS gameId, s.kind, s.day, s.label, tr.*
+    s.id AS gameId, s.kind, s.day, s.label, s.rulePack, tr.*
   FROM ${JOINED} LEFT JOIN trap_line tr ON tr.possessionId = p.id
  WHERE ${where} AND ${COVERED}`
 
@@ -74,6 +76,11 @@ const DENIED_TWO = yes('json_array_length(p.denied) >= 2')
 const DENIED_NONE = yes(`p.denied = '[]'`)
 const SAFETY_SEEN = and(TRAPPED, seen('p.goalie'))
 
+/** Three quarters of the backcourt count of the game's rule set, seconds. */
+const LATE = `(CASE p.rulePack ${Object.values(RULE_PACKS)
+  .map(({ key, backcourtSeconds }) => `WHEN '${key}' THEN ${backcourtSeconds * 0.75}`)
+  .join(' ')} END)`
+
 const SQL: Record<string, HabitSql> = {
   press: { n: HAS_SHAPE, k: PRESSED },
   fake: { n: HAS_SHAPE, k: is('p.shape', 'fake') },
@@ -88,6 +95,7 @@ const SQL: Record<string, HabitSql> = {
   'trap-again': { n: and(TRAPPED, yes('p.gotOut')), k: yes('p.traps > 1') },
   'safety-leaves-early': { n: SAFETY_SEEN, k: is('p.goalie', 'left-early') },
   'safety-home': { n: SAFETY_SEEN, k: is('p.goalie', 'home') },
+  'slow-crossing': { n: and(PRESSED, 'p.crossedAt IS NOT NULL'), k: yes(`p.crossedAt > ${LATE}`) },
   'others-through': { n: and(PRESSED, `p.kind = 'scouted'`, NOT_STOPPED), k: THROUGH },
 }
 for (const { value } of SHAPES)

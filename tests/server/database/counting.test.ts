@@ -120,6 +120,11 @@ const KNOWN: Record<string, Known> = {
   'leave-open:far-side': open([]),
   'safety-leaves-early': { n: SAFETY, k: [2, 7, 20], why: SAFETY_WHY },
   'safety-home': { n: SAFETY, k: [1, 11], why: SAFETY_WHY },
+  'slow-crossing': {
+    n: [2, 3],
+    k: [3],
+    why: 'pressed and the crossing timed, past 6 of 8 seconds: 2 took just 6, 18 was not pressed',
+  },
   'others-through': {
     n: without(PRESSED, 5, 9, 20),
     k: [2, 3, 4, 6, 10, 12],

@@ -26,6 +26,18 @@ export const READ_RULES: DemoRule[] = [
   },
   {
     ...plain,
+    key: 'rule-34',
+    number: 34,
+    title: 'They slow the crossing: in early, pass ahead',
+    when: above('slow-crossing'),
+    then: [
+      { effect: 'want', trait: 'quick-entry', strength: 'medium' },
+      { effect: 'warn', text: 'Get it in early, and pass ahead before the first dribble.' },
+    ],
+    because: 'Against them three quarters of the count are gone before half, and then one mistake is a call.',
+  },
+  {
+    ...plain,
     key: 'rule-36',
     number: 36,
     title: 'Safety leaves early: somebody fast and deep',
