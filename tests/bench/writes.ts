@@ -33,6 +33,7 @@ function bareApp(test: TestApp): { app: Express; close: () => void } {
     const stamp = new Date().toISOString()
     const row: Record<string, unknown> = {
       ...body,
+      frame: 1,
       note: '',
       id: req.params.id,
       teamId: TEAM,

@@ -25,6 +25,7 @@ const PAGES = {
   choose: '/t/{team}/games/{game}/choose',
   'choose, nothing known': '/t/{team}/games/{unknown}/choose',
   library: '/t/{team}/library',
+  rules: '/t/{team}/rules',
   counter: '/t/{team}/library/{counter}?step=1',
   squad: '/t/{team}/squad',
   sheets: '/t/{team}/sheets',
