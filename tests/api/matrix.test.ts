@@ -232,14 +232,16 @@ describe('the endpoint matrix', () => {
       expect(answer.type).toBe('application/problem+json')
     })
 
-    it.runIf(!row.player)('403 for a player', async () => {
-      const answer = await send(await test.as('player'), key, row, { ...good(own), picture: await jpeg() })
-      expect(answer.status).toBe(403)
-    })
+    if (!row.player)
+      it('403 for a player', async () => {
+        const answer = await send(await test.as('player'), key, row, { ...good(own), picture: await jpeg() })
+        expect(answer.status).toBe(403)
+      })
 
-    it.runIf(row.headOnly)('403 for an assistant coach', async () => {
-      expect((await send(await test.as('assistant'), key, row, good(own))).status).toBe(403)
-    })
+    if (row.headOnly)
+      it('403 for an assistant coach', async () => {
+        expect((await send(await test.as('assistant'), key, row, good(own))).status).toBe(403)
+      })
 
     it('400 names the field', async () => {
       const head = await test.as('head')

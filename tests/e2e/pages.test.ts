@@ -69,6 +69,28 @@ async function settled(): Promise<void> {
   await page.locator('[aria-busy="true"]').first().waitFor({ state: 'detached' })
 }
 
+/** Cells of one row whose words lie over each other, as "cell over cell". */
+const cellsOverCells = (): Promise<string[]> =>
+  page.evaluate(() =>
+    [...document.querySelectorAll('main tr')].flatMap((row) => {
+      const cells = [...row.children].map((cell) => {
+        const words = document.createRange()
+        words.selectNodeContents(cell)
+        return { text: (cell.textContent ?? '').trim(), box: words.getBoundingClientRect() }
+      })
+      return cells.flatMap((one, index) =>
+        cells
+          .slice(index + 1)
+          .filter(
+            ({ box }) =>
+              Math.min(one.box.right, box.right) - Math.max(one.box.left, box.left) > 2 &&
+              Math.min(one.box.bottom, box.bottom) - Math.max(one.box.top, box.top) > 2,
+          )
+          .map((other) => `${one.text} over ${other.text}`),
+      )
+    }),
+  )
+
 describe.each(WIDTHS)('at %d x %d', (width, height) => {
   it.each(Object.keys(PAGES) as (keyof typeof PAGES)[])('%s', async (name) => {
     await page.setViewportSize({ width, height })
@@ -76,6 +98,7 @@ describe.each(WIDTHS)('at %d x %d', (width, height) => {
     await settled()
     expect(await page.locator('h1').count()).toBe(1)
     expect(await page.evaluate(() => document.documentElement.scrollWidth)).toBeLessThanOrEqual(width)
+    expect(await cellsOverCells()).toEqual([])
     expect(await seriousFaults(page)).toEqual([])
   })
 })
