@@ -3,6 +3,7 @@ import { useEventListener } from '@vueuse/core'
 import { PlanRow, type PlanState, type RoleGiven } from '@shared/plans/schemas'
 import { putPlan, signOffPlan } from '@/api/plans'
 import { ApiProblem, OfflineError } from '@/api/problems'
+import { newId } from '@/composables/newId'
 import { dropDraft, keepDraft, keptDraft } from './keptDraft'
 import {
   bodyOf,
@@ -45,8 +46,8 @@ export function usePlan(options: PlanOptions) {
   const offline = computed(() => error.value instanceof OfflineError)
 
   // Kept until the server has them, so that a repeat is the same request.
-  let nextPlanId: string = crypto.randomUUID()
-  let sheetId: string = crypto.randomUUID()
+  let nextPlanId: string = newId()
+  let sheetId: string = newId()
   let timer: ReturnType<typeof setTimeout> | undefined
   let running: Promise<void> | null = null
 
@@ -88,7 +89,7 @@ export function usePlan(options: PlanOptions) {
           bodyOf(sent, open?.id ?? nextPlanId, suggested),
           open?.version,
         )
-        if (open === null) nextPlanId = crypto.randomUUID()
+        if (open === null) nextPlanId = newId()
         error.value = null
         if (draft.value === sent) {
           unsent.value = false
@@ -143,7 +144,7 @@ export function usePlan(options: PlanOptions) {
       throw reason
     }
     const made = sheetId
-    sheetId = crypto.randomUUID()
+    sheetId = newId()
     return made
   }
 
@@ -157,7 +158,7 @@ export function usePlan(options: PlanOptions) {
     saving.value = true
     try {
       saved.value = await putPlan(teamId, gameId, bodyOf(draft.value, nextPlanId, suggested))
-      nextPlanId = crypto.randomUUID()
+      nextPlanId = newId()
       error.value = null
     } catch (reason) {
       failed(reason)

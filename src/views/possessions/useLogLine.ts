@@ -2,6 +2,7 @@ import { computed, ref, shallowRef, watch, type Ref } from 'vue'
 import { bodyOfDraft } from './draft'
 import { halfRowsOf, isBegun, lineOfHalf, nextLine, readHalfRows, renumbered } from './halfRow'
 import { forget, keep, keyOf, recall } from '@/composables/kept'
+import { newId } from '@/composables/newId'
 import { applyAct, courtTap, isComplete, lineOf, openSlot, stepBack, type Act, type Line } from './line'
 import type { LogRow } from './logRows'
 import type { Slot } from './slots'
@@ -23,7 +24,7 @@ export function useLogLine({ person, game, rows, save: keepRow }: LogLineOptions
   const key = keyOf('half', person, game)
   const half = recall(key, readHalfRows)
   const all = () => rows.value ?? []
-  const fresh = shallowRef<Line>(nextLine(crypto.randomUUID(), game, all()))
+  const fresh = shallowRef<Line>(nextLine(newId(), game, all()))
   if (half?.fresh != null) fresh.value = lineOfHalf(half.fresh, game, null)
   const edit = shallowRef<Line | null>(half?.edit == null ? null : lineOfHalf(half.edit, game, null))
   const restored = ref(half !== null)
@@ -68,7 +69,7 @@ export function useLogLine({ person, game, rows, save: keepRow }: LogLineOptions
     if (body === null || !isComplete(now)) return null
     keepRow(now, body)
     if (edit.value !== null) edit.value = null
-    else fresh.value = nextLine(crypto.randomUUID(), game, all())
+    else fresh.value = nextLine(newId(), game, all())
     return body.number
   }
 
@@ -82,7 +83,7 @@ export function useLogLine({ person, game, rows, save: keepRow }: LogLineOptions
 
   const leaveRow = () => (edit.value = null)
   /** Throws the half-said new row away. */
-  const startOver = () => (fresh.value = nextLine(crypto.randomUUID(), game, all()))
+  const startOver = () => (fresh.value = nextLine(newId(), game, all()))
 
   return { line, edit, fresh, complete, restored, act, open, back, tap, save, openRow, leaveRow, startOver }
 }

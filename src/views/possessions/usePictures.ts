@@ -3,6 +3,7 @@ import { useEventListener } from '@vueuse/core'
 import type { StillRow } from '@shared/possessions/schemas'
 import type { StillText } from '@/api/stills'
 import { ApiProblem, isAbort, OfflineError } from '@/api/problems'
+import { newId } from '@/composables/newId'
 import { pictureFault, roomFor } from './pictureFaults'
 
 /** A picture on its way to a possession. */
@@ -60,7 +61,7 @@ export function usePictures({ send, sent, hasRow, readSeconds }: PicturesOptions
     faults.value = [...refused, room.fault].filter((fault): fault is string => fault !== null)
     for (const file of good.slice(0, room.take))
       pictures.value.push({
-        id: crypto.randomUUID(),
+        id: newId(),
         possession,
         name: file.name,
         file,
