@@ -7,6 +7,8 @@ export const LIMITS = {
   passwordShortest: 10,
   passwordLongest: 200,
   note: 140,
+  /** Characters of Markdown on an opponent or a game. */
+  notes: 8000,
   key: 60,
   keys: 3,
   reason: 200,
@@ -27,6 +29,13 @@ export const LIMITS = {
   jsonBytes: 256 * 1024,
   pageRows: 200,
   undoMinutes: 10,
+  /** Longest words on a still. */
+  stillWords: 8,
+  batchRows: 200,
+  invitationDays: 7,
+  resetMinutes: 60,
+  mailTries: 6,
+  practiceMinutes: 240,
 } as const
 
 export const STILL_TYPES = ['image/jpeg', 'image/png', 'image/webp'] as const

@@ -9,7 +9,8 @@ export interface Term<T extends string = string> {
   readonly definition: string
 }
 
-const terms = <const T extends readonly Term[]>(list: T): T => list
+/** Keeps a list's own values as its type. */
+export const terms = <const T extends readonly Term[]>(list: T): T => list
 
 /** The values of a list as a non-empty tuple, the form zod enumerations want. */
 export function valuesOf<T extends string>(list: readonly Term<T>[]): [T, ...T[]] {

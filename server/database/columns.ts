@@ -24,4 +24,8 @@ export abstract class TeamRow {
 
   @Column({ type: 'text' })
   updatedAt!: string
+
+  /** Set while a deletion can still be undone; then the row is really gone. */
+  @Column({ type: 'text', nullable: true })
+  deletedAt!: string | null
 }

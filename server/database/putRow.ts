@@ -1,7 +1,9 @@
 import { isDeepStrictEqual } from 'node:util'
 import type { EntityManager, EntityTarget } from 'typeorm'
+import type { FieldChange } from '@shared/history/schemas'
 import { Conflict, NotFound, StaleVersion } from '../http/problem'
 import type { TeamRow } from './columns'
+import { fieldsChanged, recordChange } from './history'
 
 /** What a PUT did: 201, or 200 with or without a change. */
 export type Put<E> = { row: E; outcome: 'created' | 'changed' | 'unchanged' }
@@ -16,6 +18,10 @@ export interface PutOptions<E extends TeamRow, B> {
   body: B
   ifMatch: number | null
   now: Date
+  /** Whoever does it, for the row's history; null where the product itself does. */
+  by: string | null
+  /** Rows changed together share it in their history. */
+  batchId?: string | null
   /** The stored row as the body that would have made it. */
   bodyOf: (row: E) => B | Promise<B>
   /** The body's fields as columns. */
@@ -37,6 +43,18 @@ export async function putRow<E extends TeamRow, B>(options: PutOptions<E, B>): P
   const repository = manager.getRepository(entity)
   const found = await repository.createQueryBuilder('row').where('row.id = :id', { id }).getOne()
   if (found && found.teamId !== teamId) throw new NotFound(options.what)
+  if (found && found.deletedAt !== null)
+    throw new Conflict(`This ${options.what} was deleted. Put it back first, or use a new id.`)
+  const record = (action: 'made' | 'changed', fields: FieldChange[] = []) =>
+    recordChange(manager, entity, {
+      teamId,
+      rowId: id,
+      action,
+      fields,
+      by: options.by,
+      now,
+      batchId: options.batchId ?? null,
+    })
   if (!found) {
     if (ifMatch !== null) throw new NotFound(options.what)
     const stamp = now.toISOString()
@@ -47,14 +65,17 @@ export async function putRow<E extends TeamRow, B>(options: PutOptions<E, B>): P
       version: 1,
       createdAt: stamp,
       updatedAt: stamp,
+      deletedAt: null,
     })
     await repository.insert(row as never)
     await options.after?.(row, null)
+    await record('made')
     return { row, outcome: 'created' }
   }
   if (ifMatch !== null && ifMatch !== found.version)
     throw new StaleVersion(await options.present(found), found.version)
-  if (isDeepStrictEqual(await options.bodyOf(found), body)) return { row: found, outcome: 'unchanged' }
+  const present = await options.bodyOf(found)
+  if (isDeepStrictEqual(present, body)) return { row: found, outcome: 'unchanged' }
   if (ifMatch === null)
     throw new Conflict(
       `This ${options.what} is already there and says something else. Open it and change it there.`,
@@ -65,5 +86,6 @@ export async function putRow<E extends TeamRow, B>(options: PutOptions<E, B>): P
   const { id: _id, ...columns } = found
   await repository.update({ id } as never, columns as never)
   await options.after?.(found, before)
+  await record('changed', fieldsChanged(present as object, body as object))
   return { row: found, outcome: 'changed' }
 }

@@ -13,6 +13,14 @@ const STAFF: readonly Action[] = [
   'squad:read',
   'plan:read',
   'sheet:read',
+  'sheet:hand-out',
+  'history:read',
+  'counter:write',
+  'practice:read',
+  'practice:write',
+  'game:hand-on',
+  'team:read',
+  'mail:read',
 ]
 
 /** The whole of who may do what. Players open what has been handed out, nothing else. */

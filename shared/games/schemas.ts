@@ -1,5 +1,5 @@
 import { z } from 'zod'
-import { Id, Instant, RowMeta } from '../http/common'
+import { Id, Instant, Notes, RowMeta } from '../http/common'
 import { RulePackKey } from '../court/rulePacks'
 import { STATIONS, valuesOf } from '../vocabulary'
 
@@ -10,6 +10,16 @@ export const GameBody = z.object({
   rulePack: RulePackKey,
   /** When the head coach must have picked. */
   chooseBy: Instant.nullable().default(null),
+  /** When the other stations are due. */
+  due: z
+    .object({
+      scout: Instant.nullable().default(null),
+      read: Instant.nullable().default(null),
+      teach: Instant.nullable().default(null),
+      review: Instant.nullable().default(null),
+    })
+    .default({ scout: null, read: null, teach: null, review: null }),
+  notes: Notes,
 })
 export type GameBody = z.infer<typeof GameBody>
 

@@ -13,6 +13,9 @@ export const Day = z.iso.date()
 
 export const Name = z.string().trim().min(1).max(LIMITS.name)
 
+/** Markdown, rendered and cleaned by the client. */
+export const Notes = z.string().max(LIMITS.notes).default('')
+
 /** What every stored row carries on the wire. `version` is the number inside the ETag. */
 export const RowMeta = z.object({
   id: z.uuid(),

@@ -1,10 +1,11 @@
 import { z } from 'zod'
-import { Name, RowMeta } from '../http/common'
+import { Name, Notes, RowMeta } from '../http/common'
 
 export const OpponentBody = z.object({
   name: Name,
   /** One to three letters or a short word for narrow places, e.g. "Gulls". */
   shortName: z.string().trim().min(1).max(20),
+  notes: Notes,
 })
 export type OpponentBody = z.infer<typeof OpponentBody>
 

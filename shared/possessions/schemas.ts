@@ -2,6 +2,7 @@ import { z } from 'zod'
 import { Id, RowMeta } from '../http/common'
 import { LIMITS } from '../limits'
 import { SpotName, SpotSide } from '../court/trapSpots'
+import { FALLBACKS, FINISHES, FORCED_SIDES } from '../filmWords'
 import {
   DENIED,
   GOALIES,
@@ -53,11 +54,29 @@ export const Seconds = z
   .max(LIMITS.seconds)
   .transform((value) => Math.round(value * 10) / 10)
 
+/** Shirt numbers, each once; an empty list says that none could be read. */
+const numbers = (most: number) =>
+  z
+    .array(Jersey)
+    .max(most)
+    .transform((values) => [...new Set(values)].sort((a, b) => a - b))
+    .nullable()
+    .default(null)
+
+/** One shirt number, or that it was looked for and not seen. */
+const oneNumber = z
+  .union([Jersey, z.literal(NOT_VISIBLE)])
+  .nullable()
+  .default(null)
+
+const count = (most: number) => z.number().int().min(0).max(most).nullable().default(null)
+
 export const Trap = z.object({
   x: z.number().min(0).max(1),
   y: z.number().min(0).max(1),
   t: Seconds.nullable().default(null),
   cue: seen(TRAP_CUES),
+  trappers: numbers(3),
   result: seen(TRAP_RESULTS),
 })
 export type Trap = z.infer<typeof Trap>
@@ -104,6 +123,32 @@ const PossessionFields = z.object({
   handler: seen(HANDLERS),
   goalie: seen(GOALIES),
   shownShape: z.enum(valuesOf(SHAPES)).nullable().default(null),
+  /** Where the ball-handler was steered. */
+  forcedSide: seen(FORCED_SIDES),
+  /** Where the throw-in was caught; its spot follows. */
+  entrySpot: z
+    .union([z.object({ x: z.number().min(0).max(1), y: z.number().min(0).max(1) }), z.literal(NOT_VISIBLE)])
+    .nullable()
+    .default(null),
+  /** Whoever caught the throw-in, by the offence's shirt number. */
+  receiver: oneNumber,
+  /** The pressing five, by shirt number. */
+  onFloor: numbers(5),
+  /** Whoever took the ball, by the pressing team's shirt number. */
+  thief: oneNumber,
+  passes: count(30),
+  /** Changes of side. */
+  reversals: count(20),
+  /** What they played once the press was over. */
+  fallback: seen(FALLBACKS),
+  finish: seen(FINISHES),
+  /** Scored by the offence before its control ended, free throws with them. */
+  points: count(6),
+  /** Scored by the pressing team within eight seconds of a live loss. */
+  pointsAgainst: count(6),
+  timeOutBurned: z.boolean().nullable().default(null),
+  /** Seconds from the start of the film. */
+  filmTime: z.number().min(0).max(36_000).nullable().default(null),
   crossedAt: Seconds.nullable().default(null),
   track: z.array(TrackPoint).max(LIMITS.track).nullable().default(null),
   note: z.string().trim().max(LIMITS.note).default(''),
@@ -126,6 +171,13 @@ function crossCheck(row: z.infer<typeof PossessionFields>, ctx: z.RefinementCtx)
     const parent = SHAPE_VARIANTS.find((variant) => variant.value === row.shapeVariant)?.parent
     if (parent !== row.shape) fault('shapeVariant', 'This refines another shape. Change one of the two.')
   }
+  if (row.outcome !== 'lost-live' && row.pointsAgainst !== null)
+    fault('pointsAgainst', 'Asked only after a live loss. Take it out or change how it ended.')
+  if (row.trigger === 'live' && (row.entrySpot !== null || row.receiver !== null))
+    fault(
+      row.entrySpot !== null ? 'entrySpot' : 'receiver',
+      'Nobody threw in here. Take it out or change what came before.',
+    )
   if (row.gameId === null) {
     for (const field of ['counterId', 'rightCall', 'runWell'] as const)
       if (row[field] !== null) fault(field, 'Only a row of one of our own games carries this. Take it out.')

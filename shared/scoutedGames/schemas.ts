@@ -1,5 +1,5 @@
 import { z } from 'zod'
-import { Day, Id, Name, RowMeta } from '../http/common'
+import { Day, Id, Name, Notes, RowMeta } from '../http/common'
 import { RulePackKey } from '../court/rulePacks'
 
 /**
@@ -35,6 +35,7 @@ export const ScoutedGameBody = z.object({
     .object({ theirs: z.number().int().min(0).max(250), foe: z.number().int().min(0).max(250) })
     .nullable()
     .default(null),
+  notes: Notes,
 })
 export type ScoutedGameBody = z.infer<typeof ScoutedGameBody>
 

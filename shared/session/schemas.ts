@@ -20,6 +20,17 @@ export const ACTIONS = [
   'plan:write',
   'plan:sign-off',
   'sheet:read',
+  'sheet:hand-out',
+  'sheet:recall',
+  'history:read',
+  'counter:write',
+  'practice:read',
+  'practice:write',
+  'game:hand-on',
+  'team:read',
+  'team:write',
+  'person:erase',
+  'mail:read',
 ] as const
 export type Action = (typeof ACTIONS)[number]
 

@@ -1,6 +1,7 @@
 import { z } from 'zod'
 import { Day, RowMeta } from '../http/common'
 import { Jersey } from '../possessions/schemas'
+import { Email } from '../session/schemas'
 import { SKILLS } from '../vocabulary'
 
 /** 0 not yet, 1 when free, 2 under pressure, 3 our best (common practice, no source). */
@@ -21,6 +22,12 @@ export const SquadPlayerBody = z.object({
   skills: Skills,
   /** Out through this day; null is available. No reason is kept. */
   outUntil: Day.nullable().default(null),
+  /** Where invitations and sheets go for a minor. */
+  guardianEmail: Email.nullable().default(null),
+  /** What the guardian said to pictures; anything but yes is no. */
+  pictureConsent: z.enum(['yes', 'no', 'not-asked']).default('not-asked'),
+  /** Seconds over 20 m from a standing start, where it was measured. */
+  sprint20: z.number().min(2).max(9).nullable().default(null),
 })
 export type SquadPlayerBody = z.infer<typeof SquadPlayerBody>
 

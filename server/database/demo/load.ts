@@ -1,6 +1,7 @@
 import { randomUUID } from 'node:crypto'
 import type { EntityManager } from 'typeorm'
 import { GameBody } from '@shared/games/schemas'
+import { OpponentBody } from '@shared/opponents/schemas'
 import { PossessionBody } from '@shared/possessions/schemas'
 import { ScoutedGameBody } from '@shared/scoutedGames/schemas'
 import { SquadPlayerBody } from '@shared/squad/schemas'
@@ -101,7 +102,7 @@ async function loadScenario(load: Load, timeZone: string): Promise<void> {
   const { manager, ids, now } = load
   const scenario = demoScenario(now, timeZone)
   for (const { key, ...body } of scenario.opponents)
-    await manager.insert(Opponent, { ...body, ...meta(load, DEMO_TEAM_KEY, key) })
+    await manager.insert(Opponent, { ...OpponentBody.parse(body), ...meta(load, DEMO_TEAM_KEY, key) })
   for (const { key, opponentKey, ...rest } of scenario.games) {
     const body = GameBody.parse({ ...rest, opponentId: ids.of(opponentKey) })
     await manager.insert(Game, { ...body, ...meta(load, DEMO_TEAM_KEY, key) })

@@ -1,7 +1,8 @@
+import type { z } from 'zod'
 import type { SquadPlayerBody } from '@shared/squad/schemas'
 import { localDay } from './days'
 
-export type DemoSquadPlayer = SquadPlayerBody & { key: string }
+export type DemoSquadPlayer = z.input<typeof SquadPlayerBody> & { key: string }
 
 type Levels = readonly [
   handle: number,

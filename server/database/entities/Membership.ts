@@ -35,4 +35,14 @@ export class Membership {
   /** The squad player that this account belongs to, for the role player. */
   @Column({ type: 'varchar', length: 36, nullable: true })
   squadPlayerId!: string | null
+
+  /** Sheets and reminders go to this person's address. */
+  @Column({ type: 'boolean', default: true })
+  mail!: boolean
+
+  @Column({ type: 'integer', default: 1 })
+  version!: number
+
+  @Column({ type: 'text', nullable: true })
+  createdAt!: string | null
 }

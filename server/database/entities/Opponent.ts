@@ -15,4 +15,8 @@ export class Opponent extends TeamRow {
 
   @Column({ type: 'text' })
   shortName!: string
+
+  /** Markdown; the client renders it. */
+  @Column({ type: 'text', default: '' })
+  notes!: string
 }

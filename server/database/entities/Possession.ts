@@ -16,6 +16,7 @@ import { Trap } from './Trap'
 @Index(['scoutedGameId', 'number'])
 @Index(['gameId', 'number'])
 @Index(['teamId', 'counterId'])
+@Index(['deletedAt'])
 export class Possession extends TeamRow {
   @ManyToOne(() => ScoutedGame, { onDelete: 'CASCADE', nullable: true })
   @JoinColumn({ name: 'scoutedGameId' })
@@ -100,6 +101,52 @@ export class Possession extends TeamRow {
   @Column({ type: 'text', nullable: true })
   shownShape!: PossessionBody['shownShape']
 
+  @Column({ type: 'text', nullable: true })
+  forcedSide!: PossessionBody['forcedSide']
+
+  /** Where the first catch was, fractions of the landmark court; its spot is worked out when it is read. */
+  @Column({ type: 'text', nullable: true, transformer: json })
+  entrySpot!: PossessionBody['entrySpot']
+
+  /** Shirt number of whoever caught the throw-in. */
+  @Column({ type: 'text', nullable: true, transformer: json })
+  receiver!: PossessionBody['receiver']
+
+  /** Shirt numbers of the five who pressed. */
+  @Column({ type: 'text', nullable: true, transformer: json })
+  onFloor!: PossessionBody['onFloor']
+
+  /** Shirt number of whoever took the ball. */
+  @Column({ type: 'text', nullable: true, transformer: json })
+  thief!: PossessionBody['thief']
+
+  @Column({ type: 'integer', nullable: true })
+  passes!: number | null
+
+  @Column({ type: 'integer', nullable: true })
+  reversals!: number | null
+
+  @Column({ type: 'text', nullable: true })
+  fallback!: PossessionBody['fallback']
+
+  @Column({ type: 'text', nullable: true })
+  finish!: PossessionBody['finish']
+
+  /** Scored by the offence before its control ended, free throws with them. */
+  @Column({ type: 'integer', nullable: true })
+  points!: number | null
+
+  /** Scored by the pressing team within eight seconds of a live loss. */
+  @Column({ type: 'integer', nullable: true })
+  pointsAgainst!: number | null
+
+  @Column({ type: 'boolean', nullable: true })
+  timeOutBurned!: boolean | null
+
+  /** Seconds from the start of the film. */
+  @Column({ type: 'real', nullable: true })
+  filmTime!: number | null
+
   /** Seconds from the first touch. */
   @Column({ type: 'real', nullable: true })
   crossedAt!: number | null
@@ -125,9 +172,4 @@ export class Possession extends TeamRow {
 
   @OneToMany(() => Still, (still) => still.possession)
   stills?: Relation<Still>[]
-
-  /** Set while a deletion can still be undone; then the row is really gone. */
-  @Index()
-  @Column({ type: 'text', nullable: true })
-  deletedAt!: string | null
 }

@@ -46,6 +46,10 @@ export class ScoutedGame extends TeamRow {
   @Column({ type: 'text', nullable: true, transformer: json })
   finalScore!: ScoutedGameBody['finalScore']
 
+  /** Markdown; the client renders it. */
+  @Column({ type: 'text', default: '' })
+  notes!: string
+
   @ManyToOne(() => Person, { onDelete: 'SET NULL', nullable: true })
   @JoinColumn({ name: 'scoutId' })
   scout?: Relation<Person> | null

@@ -19,6 +19,14 @@ export class Sheet {
   @Column({ type: 'varchar', length: 36 })
   planId!: string
 
+  /** The fuller page, chosen after its warning. */
+  @Column({ type: 'boolean', default: false })
+  fuller!: boolean
+
+  /** Called back: readers are told that a newer one stands, paper is to be brought back. */
+  @Column({ type: 'text', nullable: true })
+  recalledAt!: string | null
+
   @Column({ type: 'text' })
   createdAt!: string
 }

@@ -1,4 +1,5 @@
 import { Column, Entity, Index, JoinColumn, ManyToOne, PrimaryColumn, type Relation } from 'typeorm'
+import { json } from '../columns'
 import { Possession } from './Possession'
 
 /** An uploaded picture of a possession. The files are named by its id. */
@@ -27,6 +28,30 @@ export class Still {
 
   @Column({ type: 'text' })
   caption!: string
+
+  /** Ring, shade and pass drawn over it; StillMarks, parsed when it is read. */
+  @Column({ type: 'text', nullable: true, transformer: json })
+  marks!: unknown
+
+  /** Regions burned into the picture; what was under them is gone. */
+  @Column({ type: 'integer', default: 0 })
+  blurred!: number
+
+  /** Faces that can still be made out, as somebody counted them; null: nobody has looked. */
+  @Column({ type: 'integer', nullable: true })
+  facesLeft!: number | null
+
+  /** Chosen for the staff's report. */
+  @Column({ type: 'boolean', default: false })
+  inReport!: boolean
+
+  /** Calendar day in the team's zone; the picture and its files are gone the day after. */
+  @Column({ type: 'text', nullable: true })
+  expiresOn!: string | null
+
+  /** Number inside the ETag. */
+  @Column({ type: 'integer', default: 1 })
+  version!: number
 
   /** px, as stored. */
   @Column({ type: 'integer' })

@@ -1,5 +1,6 @@
 import { Column, Entity, PrimaryColumn } from 'typeorm'
 import type { RulePackKey } from '@shared/court/rulePacks'
+import { json } from '../columns'
 
 @Entity('teams')
 export class Team {
@@ -22,6 +23,14 @@ export class Team {
 
   @Column({ type: 'text' })
   rulePack!: RulePackKey
+
+  /** TeamSettings: figures that the head coach has set; what is missing has its default. */
+  @Column({ type: 'text', nullable: true, transformer: json })
+  settings!: unknown
+
+  /** Number inside the ETag of the settings. */
+  @Column({ type: 'integer', default: 1 })
+  version!: number
 
   @Column({ type: 'text' })
   createdAt!: string

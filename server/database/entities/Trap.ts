@@ -1,5 +1,6 @@
 import { Column, Entity, Index, JoinColumn, ManyToOne, PrimaryColumn, type Relation } from 'typeorm'
 import type { Trap as TrapBody } from '@shared/possessions/schemas'
+import { json } from '../columns'
 import { Possession } from './Possession'
 
 /** Where two came to the ball. The spot follows from x and y and is never stored. */
@@ -33,6 +34,10 @@ export class Trap {
 
   @Column({ type: 'text', nullable: true })
   cue!: TrapBody['cue']
+
+  /** Shirt numbers of the two (or three) who came. */
+  @Column({ type: 'text', nullable: true, transformer: json })
+  trappers!: TrapBody['trappers']
 
   @Column({ type: 'text', nullable: true })
   result!: TrapBody['result']

@@ -1,10 +1,21 @@
+import { Change } from './Change'
+import { Copy } from './Copy'
 import { Counter } from './Counter'
+import { Erasure } from './Erasure'
 import { Game } from './Game'
+import { HandOn } from './HandOn'
+import { Invitation } from './Invitation'
+import { Mail } from './Mail'
 import { Membership } from './Membership'
+import { Opening } from './Opening'
 import { Opponent } from './Opponent'
+import { OpponentPlayer } from './OpponentPlayer'
+import { PasswordReset } from './PasswordReset'
 import { Person } from './Person'
 import { Plan } from './Plan'
 import { Possession } from './Possession'
+import { Practice } from './Practice'
+import { PracticeReps } from './PracticeReps'
 import { Rule } from './Rule'
 import { ScoutedGame } from './ScoutedGame'
 import { Sheet } from './Sheet'
@@ -30,4 +41,15 @@ export const ENTITIES = [
   Rule,
   Plan,
   Sheet,
+  Change,
+  OpponentPlayer,
+  Invitation,
+  PasswordReset,
+  Erasure,
+  Mail,
+  Copy,
+  Opening,
+  Practice,
+  PracticeReps,
+  HandOn,
 ]

@@ -25,12 +25,16 @@ export function stationOf(
   return facts.possessions < ENOUGH_TO_READ ? 'scout' : 'choose'
 }
 
+const NOT_DUE: GameBody['due'] = { scout: null, read: null, teach: null, review: null }
+
 export const bodyOfGame = (row: Game): GameBody => ({
   opponentId: row.opponentId,
   tipOff: row.tipOff,
   place: row.place,
   rulePack: row.rulePack,
   chooseBy: row.chooseBy,
+  due: row.due ?? NOT_DUE,
+  notes: row.notes,
 })
 
 export const presentGame = (row: Game, facts: GameFacts, now: Date): GameRow => ({

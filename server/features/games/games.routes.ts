@@ -36,7 +36,14 @@ export const gameRoutes = ({ db, clock }: Context) => [
     body: GameBody,
     response: GameRow,
     handle: async ({ caller, params, body, ifMatch }) => {
-      const put = await putGame(db, { id: params.id, teamId: caller.teamId, body, ifMatch, now: clock() })
+      const put = await putGame(db, {
+        id: params.id,
+        teamId: caller.teamId,
+        body,
+        ifMatch,
+        now: clock(),
+        by: caller.personId,
+      })
       return putReply(put, await getGame(db, caller.teamId, params.id, clock()))
     },
   }),

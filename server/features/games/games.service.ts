@@ -71,7 +71,7 @@ export async function getGame(db: DataSource, teamId: string, id: string, now: D
 /** @throws NotFound, Conflict, StaleVersion */
 export function putGame(
   db: DataSource,
-  options: { id: string; teamId: string; body: GameBody; ifMatch: number | null; now: Date },
+  options: { id: string; teamId: string; body: GameBody; ifMatch: number | null; now: Date; by: string },
 ): Promise<Put<Game>> {
   return db.transaction(async (manager) => {
     await findInTeam(manager, Opponent, options.teamId, options.body.opponentId, 'opponent')

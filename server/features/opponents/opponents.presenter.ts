@@ -15,6 +15,7 @@ export const presentOpponent = (row: Opponent, counted: OpponentCounts | undefin
   ...metaOf(row),
   name: row.name,
   shortName: row.shortName,
+  notes: row.notes,
   counts: counted?.counts ?? NOTHING,
   nextGame: counted?.nextGame ?? null,
 })

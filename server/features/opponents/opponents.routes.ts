@@ -39,7 +39,14 @@ export const opponentRoutes = ({ db, clock }: Context) => [
     body: OpponentBody,
     response: OpponentRow,
     handle: async ({ caller, params, body, ifMatch }) => {
-      const put = await putOpponent(db, { id: params.id, teamId: caller.teamId, body, ifMatch, now: clock() })
+      const put = await putOpponent(db, {
+        id: params.id,
+        teamId: caller.teamId,
+        body,
+        ifMatch,
+        now: clock(),
+        by: caller.personId,
+      })
       return putReply(put, presentOpponent(put.row, await countsOf(db.manager, put.row, clock())))
     },
   }),

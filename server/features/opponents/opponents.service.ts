@@ -30,7 +30,7 @@ export async function countsOf(
 /** @throws NotFound, Conflict, StaleVersion */
 export function putOpponent(
   db: DataSource,
-  options: { id: string; teamId: string; body: OpponentBody; ifMatch: number | null; now: Date },
+  options: { id: string; teamId: string; body: OpponentBody; ifMatch: number | null; now: Date; by: string },
 ): Promise<Put<Opponent>> {
   return db.transaction((manager) =>
     putRow<Opponent, OpponentBody>({
@@ -38,7 +38,7 @@ export function putOpponent(
       manager,
       entity: Opponent,
       what: 'opponent',
-      bodyOf: ({ name, shortName }) => ({ name, shortName }),
+      bodyOf: ({ name, shortName, notes }) => ({ name, shortName, notes }),
       columnsOf: (body) => body,
       present: async (row) => presentOpponent(row, await countsOf(manager, row, options.now)),
     }),

@@ -37,6 +37,7 @@ export const planRoutes = ({ db, clock }: Context) => {
           body,
           ifMatch,
           now: clock(),
+          by: caller.personId,
         })
         return putReply(put, presentPlan(put.row))
       },

@@ -70,7 +70,7 @@ function checkVersion(newest: Plan | null, own: Plan | undefined): void {
 /** Writes the head coach's picks into the open version, or opens the next. @throws NotFound, Conflict, StaleVersion */
 export function putPlan(
   db: DataSource,
-  options: { gameId: string; teamId: string; body: PlanBody; ifMatch: number | null; now: Date },
+  options: { gameId: string; teamId: string; body: PlanBody; ifMatch: number | null; now: Date; by: string },
 ): Promise<Put<Plan>> {
   const { gameId, teamId, body } = options
   return db.transaction(async (manager) => {

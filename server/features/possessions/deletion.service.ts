@@ -3,7 +3,7 @@ import { LIMITS } from '@shared/limits'
 import type { StillFiles } from '../../adapters/stillFiles'
 import { Possession } from '../../database/entities/Possession'
 import { Still } from '../../database/entities/Still'
-import { findInTeam } from '../../database/findInTeam'
+import { findAlsoDeleted } from '../../database/findInTeam'
 import { NotFound, StaleVersion } from '../../http/problem'
 import { withParts } from './loadPossessions'
 import { presentPossession, type WholePossession } from './possessions.presenter'
@@ -24,7 +24,7 @@ async function present(manager: EntityManager, row: Possession) {
 /** Takes a possession out of every count; it can be put back for ten minutes. A repeat changes nothing. */
 export function deletePossession(db: DataSource, { teamId, id, ifMatch }: Which, now: Date): Promise<void> {
   return db.transaction(async (manager) => {
-    const row = await findInTeam(manager, Possession, teamId, id, 'possession')
+    const row = await findAlsoDeleted(manager, Possession, teamId, id, 'possession')
     if (row.deletedAt !== null) return
     if (ifMatch !== null && ifMatch !== row.version)
       throw new StaleVersion(await present(manager, row), row.version)
@@ -40,7 +40,7 @@ export function restorePossession(
   now: Date,
 ): Promise<WholePossession> {
   return db.transaction(async (manager) => {
-    const row = await findInTeam(manager, Possession, teamId, id, 'possession')
+    const row = await findAlsoDeleted(manager, Possession, teamId, id, 'possession')
     if (row.deletedAt !== null) {
       if (row.deletedAt <= undoUntil(now)) throw new NotFound('possession')
       Object.assign(row, { deletedAt: null, updatedAt: now.toISOString(), version: row.version + 1 })

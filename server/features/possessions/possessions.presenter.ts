@@ -13,7 +13,7 @@ export interface WholePossession {
   stills: Still[]
 }
 
-const bodyOfTrap = ({ x, y, t, cue, result }: Trap) => ({ x, y, t, cue, result })
+const bodyOfTrap = ({ x, y, t, cue, trappers, result }: Trap) => ({ x, y, t, cue, trappers, result })
 
 /** The stored row as the body that would have made it. */
 export function bodyOfPossession(row: Possession, traps: Trap[]): PossessionBody {
@@ -41,6 +41,19 @@ export function bodyOfPossession(row: Possession, traps: Trap[]): PossessionBody
     handler: row.handler,
     goalie: row.goalie,
     shownShape: row.shownShape,
+    forcedSide: row.forcedSide,
+    entrySpot: row.entrySpot,
+    receiver: row.receiver,
+    onFloor: row.onFloor,
+    thief: row.thief,
+    passes: row.passes,
+    reversals: row.reversals,
+    fallback: row.fallback,
+    finish: row.finish,
+    points: row.points,
+    pointsAgainst: row.pointsAgainst,
+    timeOutBurned: row.timeOutBurned,
+    filmTime: row.filmTime,
     crossedAt: row.crossedAt,
     track: row.track,
     note: row.note,

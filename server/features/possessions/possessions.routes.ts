@@ -58,7 +58,7 @@ export const possessionRoutes = ({ db, clock }: Context) => [
     body: PossessionBody,
     response: PossessionRow,
     handle: async ({ caller, params, body, ifMatch }) => {
-      const write = { id: params.id, teamId: caller.teamId, ifMatch, now: clock() }
+      const write = { id: params.id, teamId: caller.teamId, ifMatch, now: clock(), by: caller.personId }
       const { put, whole } = await putPossession(db, write, body)
       return putReply(put, presentPossession(whole))
     },
@@ -72,7 +72,7 @@ export const possessionRoutes = ({ db, clock }: Context) => [
     body: PossessionPatch,
     response: PossessionRow,
     handle: async ({ caller, params, body, ifMatch }) => {
-      const write = { id: params.id, teamId: caller.teamId, ifMatch, now: clock() }
+      const write = { id: params.id, teamId: caller.teamId, ifMatch, now: clock(), by: caller.personId }
       const { put, whole } = await patchPossession(db, write, body)
       return putReply(put, presentPossession(whole))
     },

@@ -10,7 +10,7 @@ import { Trap } from '../../database/entities/Trap'
 import { findInTeam } from '../../database/findInTeam'
 import { putRow, type Put } from '../../database/putRow'
 import { faultsOf } from '../../http/faults'
-import { BadInput, Conflict, NeedsIfMatch, NotFound, StaleVersion } from '../../http/problem'
+import { BadInput, NeedsIfMatch, NotFound, StaleVersion } from '../../http/problem'
 import { trapsOf, withParts } from './loadPossessions'
 import { bodyOfPossession, presentPossession, type WholePossession } from './possessions.presenter'
 
@@ -19,6 +19,8 @@ interface Write {
   teamId: string
   ifMatch: number | null
   now: Date
+  by: string
+  batchId?: string
 }
 
 /** The rows of a game in the order they were played; deleted ones are not among them. */
@@ -73,11 +75,7 @@ async function put(manager: EntityManager, write: Write, body: PossessionBody): 
     entity: Possession,
     what: 'possession',
     body,
-    bodyOf: async (row) => {
-      if (row.deletedAt !== null)
-        throw new Conflict('This possession was deleted. Put it back first, or use a new id.')
-      return bodyOfPossession(row, await trapsOf(manager, row.id))
-    },
+    bodyOf: async (row) => bodyOfPossession(row, await trapsOf(manager, row.id)),
     columnsOf: possessionColumns,
     present: async (row) => presentPossession(await wholeOf(manager, row)),
     after: (row, before) => writeTraps(manager, row.id, body.traps, before !== null),

@@ -25,7 +25,14 @@ export const ruleRoutes = ({ db, clock }: Context) => [
     body: RuleBody,
     response: RuleRow,
     handle: async ({ caller, params, body, ifMatch }) => {
-      const put = await putRule(db, { id: params.id, teamId: caller.teamId, body, ifMatch, now: clock() })
+      const put = await putRule(db, {
+        id: params.id,
+        teamId: caller.teamId,
+        body,
+        ifMatch,
+        now: clock(),
+        by: caller.personId,
+      })
       return putReply(put, presentRule(put.row, body))
     },
   }),

@@ -18,7 +18,7 @@ export async function listRules(manager: EntityManager, teamId: string): Promise
 /** @throws NotFound, Conflict, StaleVersion */
 export function putRule(
   db: DataSource,
-  options: { id: string; teamId: string; body: RuleBody; ifMatch: number | null; now: Date },
+  options: { id: string; teamId: string; body: RuleBody; ifMatch: number | null; now: Date; by: string },
 ): Promise<Put<Rule>> {
   return db.transaction((manager) =>
     putRow<Rule, RuleBody>({

@@ -17,6 +17,7 @@ export const bodyOfScoutedGame = (row: ScoutedGame): ScoutedGameBody => ({
   coverage: coverageOf(row),
   blowout: row.blowout,
   finalScore: row.finalScore,
+  notes: row.notes,
 })
 
 export const presentScoutedGame = (

@@ -71,6 +71,7 @@ export function putScoutedGame(
     const there = await manager.findOneBy(ScoutedGame, { id: options.id })
     return putRow<ScoutedGame, ScoutedGameBody>({
       ...options,
+      by: options.scoutId,
       manager,
       entity: ScoutedGame,
       what: 'scouted game',

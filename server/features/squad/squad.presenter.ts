@@ -8,6 +8,9 @@ export const bodyOfSquadPlayer = (row: SquadPlayer): SquadPlayerBody => ({
   lastName: row.lastName,
   skills: row.skills,
   outUntil: row.outUntil,
+  guardianEmail: row.guardianEmail,
+  pictureConsent: row.pictureConsent,
+  sprint20: row.sprint20,
 })
 
 /** `day` is the calendar day asked about, in the team's zone: out through `outUntil`, back the day after. */

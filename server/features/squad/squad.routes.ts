@@ -45,6 +45,7 @@ export const squadRoutes = ({ db, clock }: Context) => [
         body,
         ifMatch,
         now: clock(),
+        by: caller.personId,
       })
       return putReply(put, presentSquadPlayer(put.row, await teamDay(db.manager, caller.teamId, clock())))
     },

@@ -23,7 +23,14 @@ export async function listSquad(db: DataSource, teamId: string, now: Date): Prom
 /** @throws NotFound, Conflict (also for a number that is worn), StaleVersion */
 export function putSquadPlayer(
   db: DataSource,
-  options: { id: string; teamId: string; body: SquadPlayerBody; ifMatch: number | null; now: Date },
+  options: {
+    id: string
+    teamId: string
+    body: SquadPlayerBody
+    ifMatch: number | null
+    now: Date
+    by: string
+  },
 ): Promise<Put<SquadPlayer>> {
   return db.transaction(async (manager) => {
     const wearer = await manager.findOneBy(SquadPlayer, {

@@ -5,7 +5,7 @@ import type { PossessionInput } from '@shared/possessions/schemas'
 import type { ScoutedGameBody } from '@shared/scoutedGames/schemas'
 
 /** Rows of the scenario name each other by key; whoever writes them makes the ids. */
-export type DemoOpponent = OpponentBody & { key: string }
+export type DemoOpponent = z.input<typeof OpponentBody> & { key: string }
 export type DemoGame = Omit<z.input<typeof GameBody>, 'opponentId'> & { key: string; opponentKey: string }
 export type DemoScoutedGame = Omit<z.input<typeof ScoutedGameBody>, 'opponentId'> & {
   key: string
