@@ -56,6 +56,15 @@ export const WALK_SETTINGS = {
     label: 'A defender closes at',
     note: 'Assumption: the mean over the first steps.',
   },
+  guardWithin: {
+    value: 1.5,
+    least: 0,
+    most: 3,
+    step: 0.1,
+    unit: 'm',
+    label: 'A guard on the passer stands within',
+    note: 'Assumption: the passer fakes and steps round, so this guard is not counted for the lane.',
+  },
   straightSpeed: {
     value: 13,
     least: 4,
