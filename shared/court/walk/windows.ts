@@ -65,7 +65,7 @@ export function windowWords({ verdict, threat }: LaneWindow, { stride }: WalkSet
   if (verdict === 'open')
     return has >= needs
       ? `Open: on while ${threat.id} is ${strides(needs)} ${side(threat)}.`
-      : `Open, by less than a stride: ${threat.id} is ${strides(has)} ${side(threat)}.`
+      : `Open, with less than a stride to spare from ${threat.id}.`
   const on = `On when ${threat.id} is ${strides(needs)} ${side(threat)}; as drawn, ${has === 0 ? 'less than one' : word(has)}.`
   if (verdict === 'tight') return on
   return threat.has <= 0.5 * stride && threat.where === 'lane'
