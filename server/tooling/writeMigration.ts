@@ -21,8 +21,15 @@ export async function writeMigration(name: string | undefined): Promise<void> {
     return
   }
   const stamp = Date.now()
+  // A rebuilt table takes its old name again; what refers to it must not be rewritten meanwhile.
   const body = (queries: { query: string }[]) =>
-    queries.map(({ query }) => `    await queryRunner.query(${quote(query)})`).join('\n')
+    [
+      'PRAGMA legacy_alter_table = ON',
+      ...queries.map(({ query }) => query),
+      'PRAGMA legacy_alter_table = OFF',
+    ]
+      .map((query) => `    await queryRunner.query(${quote(query)})`)
+      .join('\n')
   const file = `server/database/migrations/${stamp}-${name}.ts`
   await writeFile(
     file,

@@ -4,6 +4,8 @@ export class TheWholeJob1796139671193 implements MigrationInterface {
   name = 'TheWholeJob1796139671193'
 
   async up(queryRunner: QueryRunner): Promise<void> {
+    // A rebuilt table takes its old name again; what refers to it must not be rewritten meanwhile.
+    await queryRunner.query('PRAGMA legacy_alter_table = ON')
     await queryRunner.query(`DROP INDEX "IDX_4c5b2473c12c6c039e282b8079"`)
     await queryRunner.query(
       `CREATE TABLE "changes" ("id" varchar(36) PRIMARY KEY NOT NULL, "teamId" varchar(36) NOT NULL, "kind" text NOT NULL, "rowId" varchar(36) NOT NULL, "action" text NOT NULL, "personId" varchar(36), "at" text NOT NULL, "batchId" varchar(36), "fields" text NOT NULL)`,
@@ -402,9 +404,12 @@ export class TheWholeJob1796139671193 implements MigrationInterface {
     await queryRunner.query(
       `CREATE INDEX "IDX_0b5136d56d15f10fe676f6d7c8" ON "practice_reps" ("practiceId") `,
     )
+    await queryRunner.query('PRAGMA legacy_alter_table = OFF')
   }
 
   async down(queryRunner: QueryRunner): Promise<void> {
+    // A rebuilt table takes its old name again; what refers to it must not be rewritten meanwhile.
+    await queryRunner.query('PRAGMA legacy_alter_table = ON')
     await queryRunner.query(`DROP INDEX "IDX_0b5136d56d15f10fe676f6d7c8"`)
     await queryRunner.query(`DROP INDEX "IDX_3de04e9d6024588834a0179896"`)
     await queryRunner.query(`ALTER TABLE "practice_reps" RENAME TO "temporary_practice_reps"`)
@@ -759,5 +764,6 @@ export class TheWholeJob1796139671193 implements MigrationInterface {
     await queryRunner.query(
       `CREATE UNIQUE INDEX "IDX_4c5b2473c12c6c039e282b8079" ON "squad_players" ("teamId", "jersey") `,
     )
+    await queryRunner.query('PRAGMA legacy_alter_table = OFF')
   }
 }

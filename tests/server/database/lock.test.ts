@@ -111,6 +111,8 @@ describe('transactions', () => {
 
 describe('migrations', () => {
   it('lead back to an empty database, step by step', async () => {
+    // As openDatabase() runs them: a rebuilt table must not be looked for by the rows that refer to it.
+    await db.query('PRAGMA foreign_keys = OFF')
     for (let step = (await db.query('SELECT * FROM migrations')).length; step > 0; step--)
       await db.undoLastMigration()
     const left = await db.query(

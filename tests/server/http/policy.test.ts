@@ -21,6 +21,17 @@ const TABLE: Record<Action, { head: boolean; assistant: boolean; player: boolean
   'plan:write': { head: true, assistant: false, player: false },
   'plan:sign-off': { head: true, assistant: false, player: false },
   'sheet:read': { head: true, assistant: true, player: true },
+  'sheet:hand-out': { head: true, assistant: true, player: false },
+  'sheet:recall': { head: true, assistant: false, player: false },
+  'history:read': { head: true, assistant: true, player: false },
+  'counter:write': { head: true, assistant: true, player: false },
+  'practice:read': { head: true, assistant: true, player: false },
+  'practice:write': { head: true, assistant: true, player: false },
+  'game:hand-on': { head: true, assistant: true, player: false },
+  'team:read': { head: true, assistant: true, player: false },
+  'team:write': { head: true, assistant: false, player: false },
+  'person:erase': { head: true, assistant: false, player: false },
+  'mail:read': { head: true, assistant: true, player: false },
 }
 
 describe('the policy table', () => {

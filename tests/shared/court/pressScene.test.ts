@@ -19,6 +19,8 @@ const zones = [
 const full = { at: 'full', k: 10, n: 11, thin: false } as const
 const middle = { lane: 'middle', k: 5, n: 7, thin: false } as const
 
+const TICKS = [0.08, 0.1, 0.11, 0.4].map((x, i) => ({ second: i + 1, x }))
+
 /** The boxes of the labels as they were set. */
 function labelBoxes(scene: Scene): Box[] {
   return groupsOf(scene)
@@ -77,7 +79,7 @@ describe('pressScene', () => {
   it('writes path data that both renderers read, and names each part once', () => {
     fc.assert(
       fc.property(anyPress, (options) => {
-        const scene = pressScene({ ...options, throwInRuler: true, ballBySecond: [0.08, 0.1, 0.11, 0.4] })
+        const scene = pressScene({ ...options, throwInRuler: true, ballBySecond: TICKS })
         for (const { d } of pathsOf(scene.nodes)) expect(d).toMatch(READABLE)
         const ids = groupsOf(scene).map(({ id }) => id)
         expect(new Set(ids).size).toBe(ids.length)
