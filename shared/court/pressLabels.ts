@@ -5,11 +5,13 @@ import { pickupWords, roomWords } from './pressWords'
 import type { Counted, PressSceneOptions } from './pressOptions'
 import type { DeniedWay } from './pressMarks'
 import { DENIED, labelOf, type Denied } from '../vocabulary'
-import { zoneBox } from './trapZones'
+import type { TrapZone } from './trapZones'
 
 interface Input {
   options: PressSceneOptions
   pen: Pen
+  /** The shown part of a zone; null where it is not to be named. */
+  zoneOf: (zone: TrapZone) => Box | null
   room: Box | null
   front: Box | null
   denied: readonly { one: Counted & { lane: Denied }; way: DeniedWay }[]
@@ -19,7 +21,7 @@ interface Input {
 const NOTES_FROM = 20
 
 /** The counts with their words, most fixed first: the room's has one place, a lane's has many. */
-export function pressLabels({ options, pen, room, front, denied }: Input): Label[] {
+export function pressLabels({ options, pen, zoneOf, room, front, denied }: Input): Label[] {
   const type = options.type ?? 1
   const scale = pen.pxPerMetre
   const countPx = (scale >= 22 ? 20 : scale >= 13 ? 16 : 14) * type
@@ -44,7 +46,7 @@ export function pressLabels({ options, pen, room, front, denied }: Input): Label
     })
   }
   for (const zone of options.zones) {
-    const box = zoneBox(options.pack, zone, pen)
+    const box = zoneOf(zone)
     if (!box) continue
     const note = [zone.thin ? 'thin' : '', zone.note ?? ''].filter(Boolean).join(', ')
     labels.push({

@@ -3,6 +3,7 @@ import type { InFractions } from './frame'
 import type { HatchMedium } from './hatch'
 import type { BallSide } from './pressMarks'
 import type { RulePack } from './rulePacks'
+import type { BallTick } from './rulers'
 import type { TrapZone } from './trapZones'
 import type { Crop } from './view'
 
@@ -41,8 +42,8 @@ export interface PressSceneOptions {
   ruler?: boolean
   /** The throw-in's own count at the left of the ruler. Default false. */
   throwInRuler?: boolean
-  /** Fractions of the length where the ball is after 1, 2, 3 ... seconds. */
-  ballBySecond?: readonly number[]
+  /** Ticks where the ball has got to at each second; ballBySecond() of many possessions gives them. */
+  ballBySecond?: readonly BallTick[]
   /** Size of type against the screen's: 1.2 for the player sheet. */
   type?: number
 }

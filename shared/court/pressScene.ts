@@ -24,7 +24,9 @@ export function pressScene(options: PressSceneOptions): Scene {
   const end = cropEnd(pack, crop)
   const side = options.ballSide ?? denserSide(zones)
   const labels = options.labels ?? 'counts'
-  const boxes = zones.flatMap((zone) => zoneBox(pack, zone, pen) ?? [])
+  // A cropped court names only what it shows.
+  const shown = (box: Box | null): Box | null => shownPart(box, end, pen)
+  const boxes = zones.flatMap((zone) => shown(zoneBox(pack, zone, pen)) ?? [])
 
   const front =
     options.pickup &&
@@ -51,7 +53,9 @@ export function pressScene(options: PressSceneOptions): Scene {
     ...throwerNodes(options, pen, size),
   ]
 
-  if (labels === 'letters') nodes.push(letters(options, pen, room, front?.box ?? null))
+  const roomShown = shown(room)
+  const frontShown = shown(front?.box ?? null)
+  if (labels === 'letters') nodes.push(letters(options, pen, shown, roomShown, frontShown))
   if (labels === 'counts') {
     const arm = size.r
     const standing = defenders.map((at): Box => ({
@@ -64,10 +68,17 @@ export function pressScene(options: PressSceneOptions): Scene {
       ...boxes,
       ...standing,
       ...(front ? [front.box] : []),
-      ...(room ? [room] : []),
+      ...(roomShown ? [roomShown] : []),
       ...denied.map(({ way }) => way.box),
     ]
-    const wanted = pressLabels({ options, pen, room, front: front?.box ?? null, denied })
+    const wanted = pressLabels({
+      options,
+      pen,
+      zoneOf: (zone) => shown(zoneBox(pack, zone, pen)),
+      room: roomShown,
+      front: frontShown,
+      denied: denied.filter(({ way }) => shown(way.box) !== null),
+    })
     const inset = pen.px(4)
     const area = { x: inset, y: inset, width: end - 2 * inset, height: pack.court.width - 2 * inset }
     const placed = placeLabels(wanted, area, keepClear, pen.px(3))
@@ -97,7 +108,11 @@ export function pressMargins(options: Omit<PressSceneOptions, 'pxPerMetre' | 'zo
   const ruler =
     options.ruler === false
       ? { top: 3, left: 0 }
-      : rulerMargins(options.throwInRuler === true, rulerType(options))
+      : rulerMargins(
+          options.throwInRuler === true,
+          rulerType(options),
+          (options.ballBySecond ?? []).length > 0,
+        )
   const thrower = options.thrower ? 48 : 0
   return { top: ruler.top, right: 3, bottom: 3, left: Math.max(3, ruler.left, thrower) }
 }
@@ -128,11 +143,24 @@ function throwerNodes(options: PressSceneOptions, pen: Pen, size: ReturnType<typ
   return [ourToken(at, options.thrower.role, false, size, pen), ballAt(at, size, pen)]
 }
 
-function letters(options: PressSceneOptions, pen: Pen, room: Box | null, front: Box | null): GroupNode {
+/** The part of a mark's box that a crop shows; null where that is too little to name. */
+function shownPart(box: Box | null, end: number, pen: Pen): Box | null {
+  if (!box) return null
+  const width = Math.min(box.width, end - box.x)
+  return width === box.width || width >= pen.px(LETTER_R) ? { ...box, width } : null
+}
+
+function letters(
+  options: PressSceneOptions,
+  pen: Pen,
+  shown: (box: Box | null) => Box | null,
+  room: Box | null,
+  front: Box | null,
+): GroupNode {
   const r = pen.px(LETTER_R * (options.type ?? 1))
   const nodes: SceneNode[] = []
   for (const zone of options.zones) {
-    const box = zoneBox(options.pack, zone, pen)
+    const box = shown(zoneBox(options.pack, zone, pen))
     if (box && zone.letter) nodes.push(...letterDisc(middleOf(box), zone.letter, r, pen))
   }
   if (room && options.room?.letter) nodes.push(...letterDisc(middleOf(room), options.room.letter, r, pen))

@@ -1,3 +1,5 @@
+import type { Box } from '@shared/court/path'
+import { CAP_HEIGHT, DESCENT, textWidth } from '@shared/court/textWidth'
 import type { GroupNode, PathNode, Scene, SceneNode, TextNode } from '@shared/court/scene'
 
 /** Every node of a scene, groups and what is in them. */
@@ -16,6 +18,13 @@ export const pathsOf = (nodes: readonly SceneNode[]): PathNode[] =>
 
 export const textsOf = (nodes: readonly SceneNode[]): TextNode[] =>
   allNodes(nodes).filter((node): node is TextNode => node.kind === 'text')
+
+/** The room that a line of type takes, metres. */
+export function typeBox({ x, y, text, size, cut, anchor }: TextNode): Box {
+  const width = textWidth(text, size, cut)
+  const left = anchor === 'middle' ? x - width / 2 : anchor === 'end' ? x - width : x
+  return { x: left, y: y - size * CAP_HEIGHT, width, height: size * (CAP_HEIGHT + DESCENT) }
+}
 
 /** The middle of a token: its disc is a circle drawn from its left edge to its right edge and back. */
 export function discCentre(token: GroupNode): { x: number; y: number } {
