@@ -1,11 +1,12 @@
 import type { Role } from '../vocabulary'
-import { walkedWay, type Drawing } from './counterStep'
+import { walkedWay, type Drawing, type Drawn } from './counterStep'
 import { bent, distance, pointAt, lengthOf, startOf, straight, through, trimmed, type Curve } from './curve'
 import type { Diagram, Move } from './diagram'
 import { startOfDiagram, walkDiagram, type WalkedMove } from './diagramWalk'
 import { toMetres, type InMetres } from './frame'
 import type { RulePack } from './rulePacks'
-import { BESIDE, movement } from './movement'
+import { BESIDE, movement, type LineStyle } from './movement'
+import { PASS_STROKES, type MarkedPass } from './passMark'
 import type { GroupNode, SceneNode } from './scene'
 import { ballAt, ourToken, theirToken } from './tokens'
 
@@ -33,11 +34,13 @@ interface Walk {
  * The whole way in one drawing: where each of ours starts, the ball's way with whoever carries it solid at
  * the place of the catch, and the walk of everybody else as one line.
  */
-export function counterOverview(diagram: Diagram, drawing: Drawing): GroupNode[] {
+export function counterOverview(diagram: Diagram, drawing: Drawing): Drawn {
   const { pack, pen, size } = drawing
   const start = startOfDiagram(diagram)
   const trip = new Trip(diagram, drawing)
-  for (const step of walkDiagram(diagram)) for (const walked of step.moves) trip.take(walked)
+  walkDiagram(diagram).forEach(({ moves }, step) => {
+    for (const walked of moves) trip.take(walked, step)
+  })
   const walks = trip.finish()
   const theirs = drawing.defenders
     ? [...start.theirs].map(([id, place]) => theirToken(toMetres(pack, place), id, size, pen))
@@ -58,19 +61,28 @@ export function counterOverview(diagram: Diagram, drawing: Drawing): GroupNode[]
   for (const { role, at } of trip.catches)
     tokens.push(ourToken(at, role, drawing.you ? drawing.you === role : true, size, pen, catchId(role)))
   const first = start.ours.get(start.ball)
-  return [
-    { kind: 'group', id: 'walks', nodes: walks.flatMap((walk, i) => walkNodes(walk, i, drawing)) },
-    { kind: 'group', id: 'ball-way', nodes: trip.ballWay },
-    { kind: 'group', id: 'theirs', nodes: theirs },
-    { kind: 'group', id: 'tokens', nodes: tokens },
-    ...(first ? [ballAt(toMetres(pack, first), size, pen)] : []),
-  ]
+  return {
+    nodes: [
+      { kind: 'group', id: 'walks', nodes: walks.flatMap((walk, i) => walkNodes(walk, i, drawing)) },
+      { kind: 'group', id: 'ball-way', nodes: trip.ballWay },
+      { kind: 'group', id: 'theirs', nodes: theirs },
+      { kind: 'group', id: 'tokens', nodes: tokens },
+      ...(first ? [ballAt(toMetres(pack, first), size, pen)] : []),
+    ],
+    passes: trip.passes,
+    tokens: [
+      ...walks.map(({ from }) => from),
+      ...trip.catches.map(({ at }) => at),
+      ...(drawing.defenders ? [...start.theirs.values()].map((place) => toMetres(pack, place)) : []),
+    ],
+  }
 }
 
 /** Follows a trip move by move and keeps what its overview needs. */
 class Trip {
   readonly catches: Catch[] = []
   readonly ballWay: GroupNode[] = []
+  readonly passes: MarkedPass[] = []
   private readonly pending = new Map<Role, Walk>()
   private readonly done: Walk[] = []
   private ballAt: InMetres
@@ -99,10 +111,10 @@ class Trip {
     }
   }
 
-  take({ move, to: place }: WalkedMove): void {
+  take({ move, index, to: place }: WalkedMove, step: number): void {
     const to = toMetres(this.drawing.pack, place)
     if (move.kind === 'theirs') return
-    if (move.kind === 'pass') return this.pass(move, to)
+    if (move.kind === 'pass') return this.pass(move, to, `${step}-${index}`)
     if (move.kind === 'dribble' && move.who === this.holder) return this.ballMove('dribble', to, move.bend)
     if (move.who === this.holder) return this.ballMove('cut', to, 'bend' in move ? move.bend : 0)
     this.pending
@@ -117,7 +129,7 @@ class Trip {
     return [...this.done.filter((walk) => walkLength(walk) > SHORT_WALK), ...left]
   }
 
-  private pass(move: Extract<Move, { kind: 'pass' }>, to: InMetres): void {
+  private pass(move: Extract<Move, { kind: 'pass' }>, to: InMetres, name: string): void {
     this.drawCarry()
     const walk = this.pending.get(move.to)
     if (walk) {
@@ -131,7 +143,9 @@ class Trip {
       atToken ? size.r + pen.px(2) : pen.px(4),
       size.r + pen.px(3),
     )
-    this.push('pass', way)
+    const verdict = this.drawing.windows?.get(name)
+    if (verdict) this.passes.push({ id: name, way, verdict })
+    this.push('pass', way, verdict && PASS_STROKES[verdict])
     // Whoever has passed is drawn no further, unless the ball comes back.
     if (this.holder !== move.to)
       this.pending.set(this.holder, {
@@ -163,8 +177,8 @@ class Trip {
     this.carry = null
   }
 
-  private push(kind: 'pass' | 'dribble' | 'cut', way: Curve): void {
-    const nodes = movement(kind, way, this.drawing.pen)
+  private push(kind: 'pass' | 'dribble' | 'cut', way: Curve, style: LineStyle = {}): void {
+    const nodes = movement(kind, way, this.drawing.pen, 'our', style)
     if (nodes.length > 0) this.ballWay.push({ kind: 'group', id: `ball-way-${this.ballWay.length}`, nodes })
   }
 }
@@ -179,7 +193,9 @@ function walkNodes(walk: Walk, index: number, { pack, pen, size }: Drawing): Sce
   const curve = walkCurve(pack, walk)
   if (curve.length === 0) return []
   const way = trimmed(curve, size.r + pen.px(2), walk.caught ? size.r + pen.px(3) : 0)
-  const nodes = movement(walk.legs.at(-1)?.screen ? 'screen' : 'cut', way, pen, 'our', BESIDE)
+  const nodes = movement(walk.legs.at(-1)?.screen ? 'screen' : 'cut', way, pen, 'our', {
+    emphasis: BESIDE,
+  })
   return nodes.length === 0 ? [] : [{ kind: 'group', id: `walk-${index}-${walk.role}`, nodes }]
 }
 

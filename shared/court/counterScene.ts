@@ -1,4 +1,4 @@
-import type { Lane, Role } from '../vocabulary'
+import type { Lane, Pickup, Role } from '../vocabulary'
 import { courtLines } from './courtLines'
 import { counterOverview } from './counterOverview'
 import { counterStep } from './counterStep'
@@ -7,14 +7,18 @@ import { walkDiagram } from './diagramWalk'
 import { ballWaySentence, stepSentence } from './diagramWords'
 import { toMetres } from './frame'
 import type { HatchMedium } from './hatch'
-import { penOf } from './pen'
-import { roomBox, roomNode, type BallSide } from './pressMarks'
+import { verdictWords } from './passMark'
+import { grown, type Box, type Point } from './path'
+import { penOf, type Pen } from './pen'
+import { pickupFront, roomBox, roomNode, type BallSide } from './pressMarks'
+import type { Counted } from './pressOptions'
 import type { RulePack } from './rulePacks'
-import { countRuler, rulerMargins } from './rulers'
-import type { Scene } from './scene'
+import { countRuler, rulerMargins, type BallTick } from './rulers'
+import type { GroupNode, Scene } from './scene'
 import { tokenSize, type TokenSize } from './tokens'
-import { trapZones, type TrapZone } from './trapZones'
+import { trapZones, zoneBox, type TrapZone } from './trapZones'
 import { cropEnd, scaleToFit, viewOf, type Crop, type Margins } from './view'
+import type { Verdict } from './walk/laneWindow'
 
 export interface CounterSceneOptions {
   diagram: Diagram
@@ -41,7 +45,30 @@ export interface CounterSceneOptions {
   ghosts?: boolean
   /** The over-half bar. Default false. */
   ruler?: boolean
+  /** The throw-in's own count at the left of the ruler. Default false. */
+  throwInRuler?: boolean
+  /** Ticks on the ruler where the ball is at each second: as drawn (drawnBySecond) or as counted. */
+  ballBySecond?: readonly BallTick[]
+  /** Verdicts of passes by "step-move" (verdictsOf): line, gap and a word say whether each is on. */
+  windows?: ReadonlyMap<string, Verdict> | null
+  /** Where the opponent picks up, under our drawing. */
+  pickup?: (Counted & { at: Pickup | number }) | null
 }
+
+/** What a counter's ground and its ruler need. */
+export type CounterGroundOptions = Pick<
+  CounterSceneOptions,
+  | 'pack'
+  | 'zones'
+  | 'room'
+  | 'pickup'
+  | 'small'
+  | 'medium'
+  | 'crop'
+  | 'ruler'
+  | 'throwInRuler'
+  | 'ballBySecond'
+>
 
 /** Half a metre more than the deepest a thrower may stand, so that every drawing of a list lines up. */
 const THROWER_ROOM = 1.6
@@ -54,33 +81,66 @@ export function counterScene(options: CounterSceneOptions): Scene {
   const small = options.small ?? pen.pxPerMetre < 18
   const size = tokenSize(pen, small, options.tokenRadius)
   const crop = options.crop ?? 'full'
-  const medium = options.medium ?? (small ? 'small' : 'screen')
-  const zones = options.zones ?? []
-  const drawing = { pack, pen, size, you: options.you ?? null }
+  const drawing = { pack, pen, size, you: options.you ?? null, windows: options.windows ?? null }
   const step = options.step
-  const nodes = [
-    courtLines(pack, pen),
-    ...(zones.length > 0 ? [trapZones(pack, zones, pen, medium, step !== 'all')] : []),
-    ...(options.room
-      ? [roomNode(roomBox(pack, options.room.lane, options.room.ballSide ?? 'right'), pen, 'room')]
-      : []),
-    ...(step === 'all'
+  const view = viewOf(pack, crop, counterMargins(options, pen.pxPerMetre, size), pen)
+  const drawn =
+    step === 'all'
       ? counterOverview(diagram, { ...drawing, defenders: options.defenders ?? false })
       : counterStep(diagram, step, {
           ...drawing,
           defenders: options.defenders ?? true,
           ghosts: options.ghosts ?? true,
-        })),
-    ...(options.ruler
-      ? [countRuler(pack, cropEnd(pack, crop), pen, { throwIn: false, type: RULER_TYPE })]
-      : []),
-  ]
+        })
   return {
-    view: viewOf(pack, crop, counterMargins(options, pen.pxPerMetre, size), pen),
-    nodes,
+    view,
+    nodes: [
+      ...counterGround(options, pen, step !== 'all'),
+      ...drawn.nodes,
+      ...(drawn.passes.length > 0
+        ? [
+            verdictWords(
+              drawn.passes,
+              // Words never climb into the ruler.
+              grown(options.ruler ? { ...view, y: 0, height: view.height + view.y } : view, -pen.px(2)),
+              drawn.tokens.map((at) => around(at, size.r)),
+              pen,
+            ),
+          ]
+        : []),
+      ...counterRuler(options, pen),
+    ],
     description: counterSentence(diagram, step),
   }
 }
+
+/** What lies under our way: the court, the opponent's traps and pick-up, the room that is left. */
+export function counterGround(options: CounterGroundOptions, pen: Pen, faint: boolean): GroupNode[] {
+  const { pack, zones = [], room, pickup } = options
+  const medium = options.medium ?? ((options.small ?? pen.pxPerMetre < 18) ? 'small' : 'screen')
+  const boxes = zones.flatMap((zone) => zoneBox(pack, zone, pen) ?? [])
+  const words = pickup && `pick up: ${pickup.k} of ${pickup.n}${pickup.thin ? ', thin' : ''}`
+  return [
+    courtLines(pack, pen),
+    ...(zones.length > 0 ? [trapZones(pack, zones, pen, medium, faint)] : []),
+    ...(pickup && words ? [pickupFront(pack, pickup.at, pickup.thin, boxes, pen, words).node] : []),
+    ...(room ? [roomNode(roomBox(pack, room.lane, room.ballSide ?? 'right'), pen, 'room')] : []),
+  ]
+}
+
+/** The court's edge as time, where it is asked for. */
+export function counterRuler(options: CounterGroundOptions, pen: Pen): GroupNode[] {
+  if (!options.ruler) return []
+  return [
+    countRuler(options.pack, cropEnd(options.pack, options.crop ?? 'full'), pen, {
+      throwIn: options.throwInRuler ?? false,
+      ballBySecond: options.ballBySecond,
+      type: RULER_TYPE,
+    }),
+  ]
+}
+
+const around = ({ x, y }: Point, r: number): Box => ({ x: x - r, y: y - r, width: 2 * r, height: 2 * r })
 
 /** What a drawing says in words. */
 export function counterSentence(diagram: Diagram, step: number | 'all'): string {
@@ -91,7 +151,10 @@ export function counterSentence(diagram: Diagram, step: number | 'all'): string 
 }
 
 /** px per metre at which the counter drawing of these options is `widthPx` wide. */
-export function counterScale(options: Omit<CounterSceneOptions, 'pxPerMetre'>, widthPx: number): number {
+export function counterScale(
+  options: CounterGroundOptions & Pick<CounterSceneOptions, 'diagram' | 'tokenRadius'>,
+  widthPx: number,
+): number {
   // Margins depend a little on the scale (tokens are set in px, places in metres): two rounds settle it.
   let scale = widthPx / options.pack.court.length
   for (let round = 0; round < 3; round += 1) {
@@ -103,8 +166,8 @@ export function counterScale(options: Omit<CounterSceneOptions, 'pxPerMetre'>, w
 }
 
 /** Room for whoever stands off the court, tokens whole. */
-function counterMargins(
-  options: Omit<CounterSceneOptions, 'pxPerMetre'>,
+export function counterMargins(
+  options: CounterGroundOptions & Pick<CounterSceneOptions, 'diagram'>,
   pxPerMetre: number,
   size: TokenSize,
 ): Margins {
@@ -117,8 +180,11 @@ function counterMargins(
   const over = (metres: number) => Math.max(0, metres) * pxPerMetre + 3
   const most = (list: number[]) => Math.max(0, ...list)
   const left = most(places.filter((at) => at.x < size.r).map((at) => reach - at.x))
+  const ruler = options.ruler
+    ? rulerMargins(options.throwInRuler ?? false, RULER_TYPE, (options.ballBySecond ?? []).length > 0)
+    : { top: 0, left: 0 }
   return {
-    left: over(Math.max(THROWER_ROOM, left)),
+    left: Math.max(ruler.left, over(Math.max(THROWER_ROOM, left))),
     right: over(
       most(
         places
@@ -126,10 +192,7 @@ function counterMargins(
           .map((at) => at.x + reach - pack.court.length),
       ),
     ),
-    top: Math.max(
-      options.ruler ? rulerMargins(false, RULER_TYPE).top : 0,
-      over(most(places.filter((at) => at.y < size.r).map((at) => reach - at.y))),
-    ),
+    top: Math.max(ruler.top, over(most(places.filter((at) => at.y < size.r).map((at) => reach - at.y)))),
     bottom: over(
       most(
         places.filter((at) => at.y > pack.court.width - size.r).map((at) => at.y + reach - pack.court.width),

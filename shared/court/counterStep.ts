@@ -4,10 +4,13 @@ import type { Diagram } from './diagram'
 import { stateAt, walkDiagram, type WalkedMove, type WalkedStep } from './diagramWalk'
 import { toMetres, type InFractions, type InMetres } from './frame'
 import { BESIDE, movement } from './movement'
+import { PASS_STROKES, type MarkedPass } from './passMark'
+import type { Point } from './path'
 import type { Pen } from './pen'
 import type { RulePack } from './rulePacks'
 import type { GroupNode, SceneNode } from './scene'
 import { ballAt, ghost, ourToken, theirToken, type TokenSize } from './tokens'
+import type { Verdict } from './walk/laneWindow'
 
 export interface Drawing {
   pack: RulePack
@@ -15,14 +18,21 @@ export interface Drawing {
   size: TokenSize
   you: Role | null
   defenders: boolean
+  /** Verdicts of passes by "step-move": the line says whether the pass is on. */
+  windows?: ReadonlyMap<string, Verdict> | null
+}
+
+/** What is drawn of a counter, and what its words must keep clear of. */
+export interface Drawn {
+  nodes: GroupNode[]
+  /** Passes that carry a verdict. */
+  passes: MarkedPass[]
+  /** Middles of all tokens, metres. */
+  tokens: Point[]
 }
 
 /** One step: tokens where it starts, everything that happens in it as movement, last step as ghosts. */
-export function counterStep(
-  diagram: Diagram,
-  index: number,
-  drawing: Drawing & { ghosts: boolean },
-): GroupNode[] {
+export function counterStep(diagram: Diagram, index: number, drawing: Drawing & { ghosts: boolean }): Drawn {
   const { pack, pen, size } = drawing
   const step = stateAt(diagram, index)
   const metres = (place: InFractions): InMetres => toMetres(pack, place)
@@ -34,17 +44,31 @@ export function counterStep(
   const theirs = drawing.defenders
     ? [...step.before.theirs].map(([id, place]) => theirToken(metres(place), id, size, pen))
     : []
-  return [
-    { kind: 'group', id: 'ghosts', nodes: drawing.ghosts ? ghosts(diagram, index, step, drawing) : [] },
-    {
-      kind: 'group',
-      id: 'moves',
-      nodes: oursOnTop(step.moves).flatMap((move) => stepMove(move, index, step, drawing)),
-    },
-    { kind: 'group', id: 'theirs', nodes: theirs },
-    { kind: 'group', id: 'tokens', nodes: tokens },
-    ...(holder ? [ballAt(metres(holder), size, pen)] : []),
-  ]
+  const moves = stepMoves(diagram, index, drawing)
+  const standing = [...step.before.ours.values(), ...(drawing.defenders ? step.before.theirs.values() : [])]
+  return {
+    nodes: [
+      { kind: 'group', id: 'ghosts', nodes: drawing.ghosts ? ghosts(diagram, index, step, drawing) : [] },
+      { kind: 'group', id: 'moves', nodes: moves.nodes },
+      { kind: 'group', id: 'theirs', nodes: theirs },
+      { kind: 'group', id: 'tokens', nodes: tokens },
+      ...(holder ? [ballAt(metres(holder), size, pen)] : []),
+    ],
+    passes: moves.passes,
+    tokens: standing.map(metres),
+  }
+}
+
+/** Everything that happens in a step, as movement. */
+export function stepMoves(
+  diagram: Diagram,
+  index: number,
+  drawing: Drawing,
+): { nodes: GroupNode[]; passes: MarkedPass[] } {
+  const step = stateAt(diagram, index)
+  const passes: MarkedPass[] = []
+  const nodes = oursOnTop(step.moves).flatMap((move) => stepMove(move, index, step, drawing, passes))
+  return { nodes, passes }
 }
 
 /** Our way lies over theirs. */
@@ -79,6 +103,7 @@ function stepMove(
   step: number,
   { before, moves }: WalkedStep,
   drawing: Drawing,
+  passes: MarkedPass[],
 ): GroupNode[] {
   const { pack, pen, size } = drawing
   const { move } = walked
@@ -99,14 +124,17 @@ function stepMove(
   const startGap = stands(from) ? size.r + pen.px(2) : move.kind === 'pass' ? size.r * 0.6 : 0
   const endGap = stands(to) ? size.r + pen.px(3) : meets ? size.r * 0.8 : 0
   const way = trimmed(walkedWay(pack, from, to, bend), startGap, endGap)
+  const name = `${step}-${walked.index}`
+  const verdict = move.kind === 'pass' ? drawing.windows?.get(name) : undefined
+  if (verdict) passes.push({ id: name, way, verdict })
   const nodes = movement(
     kind,
     way,
     pen,
     move.kind === 'theirs' ? 'their' : 'our',
-    move.kind === 'theirs' ? BESIDE : 1,
+    verdict ? PASS_STROKES[verdict] : move.kind === 'theirs' ? { emphasis: BESIDE } : {},
   )
-  return nodes.length === 0 ? [] : [{ kind: 'group', id: `move-${step}-${walked.index}`, nodes }]
+  return nodes.length === 0 ? [] : [{ kind: 'group', id: `move-${name}`, nodes }]
 }
 
 /** A walk from one place to another; its swing stays 30 cm inside the lines. */

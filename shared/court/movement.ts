@@ -15,6 +15,14 @@ const ZIG = { high: 3.4, long: 9 }
 /** A walk that only frames the ball's way is drawn lighter, so that the ball leads the eye. */
 export const BESIDE = 0.7
 
+/** How a line differs from the plain one: weight as a share, dash and gap in px. */
+export interface LineStyle {
+  emphasis?: number
+  dash?: readonly [on: number, off: number]
+}
+
+const PASS_DASH = [7, 5] as const
+
 /**
  * A way as it is drawn: cut solid, pass dashed, dribble zigzag, screen with a T-bar, each on a casing.
  * Nothing where the way is too short to be seen.
@@ -24,7 +32,7 @@ export function movement(
   curve: Curve,
   pen: Pen,
   ink: Ink = 'our',
-  emphasis = 1,
+  { emphasis = 1, dash }: LineStyle = {},
 ): SceneNode[] {
   const length = lengthOf(curve)
   if (length < pen.px(5)) return []
@@ -40,7 +48,7 @@ export function movement(
     strokeWidth: weight,
     cap: 'butt',
     join: 'round',
-    ...(kind === 'pass' ? { dash: [pen.px(7 * pen.k), pen.px(5 * pen.k)] } : {}),
+    ...(kind === 'pass' ? { dash: (dash ?? PASS_DASH).map((length) => pen.px(length * pen.k)) } : {}),
   }
   const end = kind === 'screen' ? tBar(curve, pen, ink) : arrowHead(curve, head, pen, ink)
   return [...casing(curve, kind, weight, pen), ...(d ? [line] : []), end]

@@ -70,8 +70,8 @@ export function theirToken(at: Point, id: string, size: TokenSize, pen: Pen, hea
   }
 }
 
-/** The ball at the shoulder of whoever has it. */
-export function ballAt(holder: Point, size: TokenSize, pen: Pen): GroupNode {
+/** The ball at the shoulder of whoever has it; `nearer` draws it larger, as a ball high in the air is. */
+export function ballAt(holder: Point, size: TokenSize, pen: Pen, nearer = 1): GroupNode {
   const at = { x: holder.x + size.r * 0.58, y: holder.y - size.r * 1.08 }
   return {
     kind: 'group',
@@ -80,7 +80,7 @@ export function ballAt(holder: Point, size: TokenSize, pen: Pen): GroupNode {
     nodes: [
       {
         kind: 'path',
-        d: circleD(at, size.r * 0.44),
+        d: circleD(at, size.r * 0.44 * nearer),
         fill: 'ball',
         stroke: 'graphite',
         strokeWidth: pen.px(size.dot ? 1 : 1.5),
