@@ -1,4 +1,5 @@
 import { LIMITS } from '@shared/limits'
+import { Email } from '@shared/session/schemas'
 import type { SquadPlayerBody, SquadPlayerRow } from '@shared/squad/schemas'
 import { SKILLS, type Skill } from '@shared/vocabulary'
 import { LEVELS } from '@/components/skillLevels'
@@ -11,16 +12,32 @@ export interface PlayerForm {
   skills: Record<Skill, number>
   /** "2026-03-18", or empty while the player is available. */
   outUntil: string
+  guardianEmail: string
+  pictureConsent: SquadPlayerRow['pictureConsent']
+  /** Seconds, "3.41", or empty where nobody measured. */
+  sprint20: string
 }
 
-export type PlayerField = 'jersey' | 'firstName' | 'lastName' | 'outUntil'
+export type PlayerField = 'jersey' | 'firstName' | 'lastName' | 'outUntil' | 'guardianEmail' | 'sprint20'
 
 export const FIELD_NAMES: Record<PlayerField, string> = {
   jersey: 'Shirt number',
   firstName: 'First name',
   lastName: 'Last name',
   outUntil: 'Out through',
+  guardianEmail: 'Guardian’s mail',
+  sprint20: 'Sprint over 20 m, seconds',
 }
+
+/** What the guardian said to pictures, as the form asks it. */
+export const CONSENTS = [
+  { value: 'yes', label: 'said yes', means: 'Stills of her stay inside the team.' },
+  { value: 'no', label: 'said no', means: 'Blur her in every still before anybody else sees it.' },
+  { value: 'not-asked', label: 'not asked', means: 'Counts as no: blur her until there is an answer.' },
+] as const
+
+const consentLabel = (value: SquadPlayerRow['pictureConsent']) =>
+  CONSENTS.find((consent) => consent.value === value)?.label ?? ''
 
 const LONGEST_NAME = 40
 
@@ -28,22 +45,47 @@ const LONGEST_NAME = 40
 export function formOf(row: SquadPlayerRow | null): PlayerForm {
   if (row === null) {
     const skills = Object.fromEntries(SKILLS.map((skill) => [skill.value, 0])) as Record<Skill, number>
-    return { jersey: '', firstName: '', lastName: '', skills, outUntil: '' }
+    return {
+      jersey: '',
+      firstName: '',
+      lastName: '',
+      skills,
+      outUntil: '',
+      guardianEmail: '',
+      pictureConsent: 'not-asked',
+      sprint20: '',
+    }
   }
-  const { jersey, firstName, lastName, skills, outUntil } = row
-  return { jersey: String(jersey), firstName, lastName, skills: { ...skills }, outUntil: outUntil ?? '' }
+  return {
+    jersey: String(row.jersey),
+    firstName: row.firstName,
+    lastName: row.lastName,
+    skills: { ...row.skills },
+    outUntil: row.outUntil ?? '',
+    guardianEmail: row.guardianEmail ?? '',
+    pictureConsent: row.pictureConsent,
+    sprint20: row.sprint20 === null ? '' : String(row.sprint20),
+  }
 }
 
 /** What is sent; only for a form without faults. */
 export function bodyOfForm(form: PlayerForm): SquadPlayerBody {
+  const email = form.guardianEmail.trim()
+  const sprint = form.sprint20.trim()
   return {
     jersey: Number(form.jersey.trim()),
     firstName: form.firstName.trim(),
     lastName: form.lastName.trim(),
     skills: { ...form.skills },
     outUntil: form.outUntil === '' ? null : form.outUntil,
+    guardianEmail: email === '' ? null : email.toLowerCase(),
+    pictureConsent: form.pictureConsent,
+    sprint20: sprint === '' ? null : secondsIn(sprint),
   }
 }
+
+/** A decimal comma is as good as a point. */
+const secondsIn = (text: string) => Number(text.trim().replace(',', '.'))
 
 /** What has to be mended before the form can be sent, field by field. `others`: everybody else in the squad. */
 export function faultsOf(
@@ -59,6 +101,11 @@ export function faultsOf(
   if (form.firstName.trim().length > LONGEST_NAME) faults.firstName = `${LONGEST_NAME} letters at most.`
   if (form.lastName.trim().length > LONGEST_NAME) faults.lastName = `${LONGEST_NAME} letters at most.`
   if (form.outUntil !== '' && !isDay(form.outUntil)) faults.outUntil = 'A day such as 2026-03-18.'
+  if (form.guardianEmail.trim() !== '' && !Email.safeParse(form.guardianEmail).success)
+    faults.guardianEmail = 'This is not a whole e-mail address.'
+  const sprint = form.sprint20.trim()
+  if (sprint !== '' && !(secondsIn(sprint) >= 2 && secondsIn(sprint) <= 9))
+    faults.sprint20 = 'Seconds from 2 to 9, such as 3.4.'
   return faults
 }
 
@@ -79,7 +126,9 @@ export function differences(form: PlayerForm, row: SquadPlayerRow): string[] {
   const skills = SKILLS.filter((skill) => form.skills[skill.value] !== theirs.skills[skill.value]).map(
     (skill) => `${skill.label}: ${LEVELS[theirs.skills[skill.value]] ?? ''}`,
   )
-  return [...fields, ...skills]
+  const consent =
+    form.pictureConsent === theirs.pictureConsent ? [] : [`Pictures: ${consentLabel(theirs.pictureConsent)}`]
+  return [...fields, ...skills, ...consent]
 }
 
 const SMALL = [

@@ -12,6 +12,9 @@ const row: SquadPlayerRow = {
   lastName: 'Quill',
   skills: { handle: 0, 'throw-in': 1, 'long-arm': 1, decide: 1, sprint: 1, screen: 2 },
   outUntil: null,
+  guardianEmail: 'odd.quill@post.example',
+  pictureConsent: 'no',
+  sprint20: 3.52,
   available: true,
 }
 const others = [{ jersey: 4, firstName: 'Nell' }]
@@ -24,7 +27,21 @@ describe('a player’s form', () => {
       lastName: 'Quill',
       skills: row.skills,
       outUntil: null,
+      guardianEmail: 'odd.quill@post.example',
+      pictureConsent: 'no',
+      sprint20: 3.52,
     })
+  })
+
+  it('takes the guardian’s address and a sprint as they are typed, and refuses what is neither', () => {
+    const typed = { ...formOf(row), guardianEmail: ' Ewa@Post.Example ', sprint20: '3,41' }
+    expect(faultsOf(typed, others)).toEqual({})
+    expect(bodyOfForm(typed)).toMatchObject({ guardianEmail: 'ewa@post.example', sprint20: 3.41 })
+    const wrong = faultsOf({ ...formOf(row), guardianEmail: 'ewa', sprint20: 'fast' }, others)
+    expect(Object.keys(wrong)).toEqual(['guardianEmail', 'sprint20'])
+    expect(faultsOf({ ...formOf(row), sprint20: '12' }, others).sprint20).toBeDefined()
+    const none = bodyOfForm({ ...formOf(row), guardianEmail: ' ', sprint20: '' })
+    expect(none).toMatchObject({ guardianEmail: null, sprint20: null })
   })
 
   it('starts empty for somebody new, and says what is missing', () => {
@@ -57,6 +74,10 @@ describe('a player’s form', () => {
     const theirs = { ...row, outUntil: '2026-03-18', skills: { ...row.skills, sprint: 3 } }
     expect(differences(formOf(row), theirs)).toEqual(['Out through: 2026-03-18', 'sprints: our best'])
     expect(differences(formOf(row), row)).toEqual([])
+    expect(differences(formOf(row), { ...row, pictureConsent: 'yes', sprint20: 3.4 })).toEqual([
+      'Sprint over 20 m, seconds: 3.4',
+      'Pictures: said yes',
+    ])
   })
 })
 

@@ -1,0 +1,5 @@
+/** The squad's two pages, for the words beside each page's name. */
+export const sistersOf = (team: string, current: 'squad' | 'people') => [
+  { label: 'Players', to: { name: 'squad', params: { team } }, current: current === 'squad' },
+  { label: 'People', to: { name: 'people', params: { team } }, current: current === 'people' },
+]
