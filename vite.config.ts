@@ -3,6 +3,7 @@ import { readdirSync } from 'node:fs'
 import vue from '@vitejs/plugin-vue'
 import Components from 'unplugin-vue-components/vite'
 import { ElementPlusResolver } from 'unplugin-vue-components/resolvers'
+import { VitePWA } from 'vite-plugin-pwa'
 import { defineConfig, type TestProjectConfiguration } from 'vitest/config'
 import { apiInDev } from './server/tooling/apiInDev.ts'
 
@@ -13,6 +14,37 @@ const elementPlusStyles = () =>
   readdirSync(path('./node_modules/element-plus/es/components'), { withFileTypes: true })
     .filter((entry) => entry.isDirectory())
     .map((entry) => `element-plus/es/components/${entry.name}/style/css`)
+
+/** The worker that keeps the pages and a player's sheets for a hall without a signal (src/worker). */
+const offlineWorker = () =>
+  VitePWA({
+    strategies: 'injectManifest',
+    srcDir: 'src/worker',
+    filename: 'serviceWorker.ts',
+    injectRegister: false,
+    injectManifest: {
+      globPatterns: [
+        'index.html',
+        'assets/*.{js,css}',
+        'assets/archivo-latin-standard-*.woff2',
+        'favicon.svg',
+      ],
+    },
+    manifest: {
+      name: 'Overtop',
+      short_name: 'Overtop',
+      description: 'Scout a press, pick the counter, put it in the players’ hands.',
+      start_url: '/',
+      display: 'standalone',
+      background_color: '#F8F5EE',
+      theme_color: '#F8F5EE',
+      icons: [
+        { src: '/icon-192.png', sizes: '192x192', type: 'image/png' },
+        { src: '/icon-512.png', sizes: '512x512', type: 'image/png' },
+        { src: '/icon-maskable-512.png', sizes: '512x512', type: 'image/png', purpose: 'maskable' },
+      ],
+    },
+  })
 
 export default defineConfig(({ command, isSsrBuild, mode }) => {
   const testing = mode === 'test'
@@ -28,6 +60,7 @@ export default defineConfig(({ command, isSsrBuild, mode }) => {
         resolvers: [ElementPlusResolver({ importStyle: testing ? false : 'css' })],
       }),
       ...(command === 'serve' && !testing ? [apiInDev()] : []),
+      ...(command === 'build' && !isSsrBuild ? [offlineWorker()] : []),
     ],
     optimizeDeps: command === 'serve' && !testing ? { include: elementPlusStyles() } : {},
     publicDir: isSsrBuild ? false : 'public',

@@ -30,3 +30,10 @@ onSignedOut(() => {
 
 useLights().recall()
 createApp(App).use(pinia).use(router).mount('#app')
+
+// Only what was built has a worker; without one the pages work as ever, they just need a signal.
+if (import.meta.env.PROD && 'serviceWorker' in navigator)
+  window.addEventListener(
+    'load',
+    () => void navigator.serviceWorker.register('/serviceWorker.js').catch(() => null),
+  )

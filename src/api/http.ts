@@ -1,5 +1,6 @@
 import type { z } from 'zod'
 import { Problem } from '@shared/http/common'
+import { noteKept } from './kept'
 import { ApiProblem, OfflineError, UnreadableAnswer } from './problems'
 
 /** The one place that talks to the server: same origin, session cookie, JSON in and out, faults typed. */
@@ -43,7 +44,9 @@ export async function request<S extends z.ZodType>(
   options: RequestOptions = {},
 ): Promise<z.output<S>> {
   const answer = await ask(method, path, options)
-  return parse(schema, readJson(answer.text, path), path)
+  const parsed = parse(schema, readJson(answer.text, path), path)
+  if (answer.headers) noteKept(parsed, answer.headers)
+  return parsed
 }
 
 /** As `request`, for an answer without a body (204). */
@@ -70,6 +73,7 @@ export async function upload<S extends z.ZodType>(
 interface Answer {
   status: number
   text: string
+  headers?: Headers
 }
 
 async function ask(method: Method, path: string, options: RequestOptions): Promise<Answer> {
@@ -85,7 +89,7 @@ async function ask(method: Method, path: string, options: RequestOptions): Promi
       ...(options.body === undefined ? {} : { body: JSON.stringify(options.body) }),
       ...(options.signal === undefined ? {} : { signal: options.signal }),
     })
-    answer = { status: response.status, text: await response.text() }
+    answer = { status: response.status, text: await response.text(), headers: response.headers }
   } catch (error) {
     // fetch rejects with a TypeError for every way of not getting through, and with the signal's reason on abort.
     if (options.signal?.aborted || !(error instanceof TypeError)) throw error

@@ -2,6 +2,7 @@ import { computed, ref, shallowRef } from 'vue'
 import { defineStore } from 'pinia'
 import type { Action, Session, SessionTeam, SignIn } from '@shared/session/schemas'
 import { deleteSession, getSession, postSession } from '@/api/session'
+import { forgetKept } from '@/api/kept'
 import { ApiProblem } from '@/api/problems'
 
 /** Who is signed in, their teams, and the one whose pages are open. What they may do is the server's word. */
@@ -32,11 +33,13 @@ export const useSessionStore = defineStore('session', () => {
   }
 
   async function signIn(body: SignIn): Promise<void> {
+    await forgetKept()
     take(await postSession(body))
   }
 
   async function signOut(): Promise<void> {
     await deleteSession()
+    await forgetKept()
     forget()
   }
 

@@ -16,13 +16,17 @@ export const launchBrowser = (): Promise<Browser> =>
     ],
   })
 
-/** A page of its own session that keeps what went wrong in it. */
+/**
+ * A page of its own session that keeps what went wrong in it. The worker stays out unless it is what is looked
+ * at: it would answer in the place of a server that a test has cut off.
+ */
 export async function openPage(
   browser: Browser,
   baseURL: string,
   viewport = { width: 1440, height: 900 },
+  serviceWorkers: 'allow' | 'block' = 'block',
 ): Promise<{ page: Page; faults: string[] }> {
-  const context = await browser.newContext({ baseURL, viewport, reducedMotion: 'reduce' })
+  const context = await browser.newContext({ baseURL, viewport, reducedMotion: 'reduce', serviceWorkers })
   const page = await context.newPage()
   page.setDefaultTimeout(30_000)
   const faults: string[] = []
