@@ -3,8 +3,8 @@
  * of OpenStax University Physics 1 that CHECKS.md 'Motion and people' lists.
  */
 
-/** Standard gravity, m/s². */
-export const GRAVITY = 9.80665
+/** m/s², as the worked examples take it. */
+export const GRAVITY = 9.8
 
 const radians = (degrees: number): number => (degrees * Math.PI) / 180
 

@@ -74,23 +74,7 @@ export class TripClock {
     const began = this.begins(beat)
     this.now = began
     this.begun = true
-    const passers = new Set(beat.flatMap(({ move }) => (move.kind === 'pass' ? [move.from] : [])))
-    // Who passes and cuts in one beat passes first, from where the beat found them; a dribbler dribbles first.
-    const afterPass = ({ move }: WalkedMove): boolean =>
-      move.kind !== 'pass' &&
-      move.kind !== 'theirs' &&
-      move.kind !== 'dribble' &&
-      move.who === this.holder &&
-      passers.has(move.who)
-    const late = beat.filter(afterPass)
-    const early = beat.filter((one) => !late.includes(one))
-    const order = [
-      ...early.filter(({ move }) => move.kind === 'screen'),
-      ...early.filter(({ move }) => move.kind !== 'screen' && move.kind !== 'pass'),
-      ...early.filter(({ move }) => move.kind === 'pass'),
-      ...late,
-    ]
-    for (const one of order) {
+    for (const one of inOrder(beat, this.holder)) {
       if (one.move.kind === 'pass') this.pass(step, one, one.move, began)
       else this.walk(step, one, one.move, began)
     }
@@ -161,4 +145,22 @@ export class TripClock {
     this.holder = move.to
     this.ballFree = end
   }
+}
+
+/**
+ * The order in which the moves of a beat are timed; each player's own moves stay as they were written. Screens
+ * come first, so that whoever uses one waits for it. Who passes and cuts in one beat passes first, from where
+ * the beat found them; a dribbler dribbles first.
+ */
+function inOrder(beat: readonly WalkedMove[], holder: Role): WalkedMove[] {
+  const walks = (who: Walker) => beat.filter(({ move }) => move.kind !== 'pass' && move.who === who)
+  const passesOn =
+    beat.some(({ move }) => move.kind === 'pass' && move.from === holder) &&
+    !walks(holder).some(({ move }) => move.kind === 'dribble')
+  const rank = ({ move }: WalkedMove): number => {
+    if (move.kind === 'pass') return 2
+    if (passesOn && move.who === holder) return 3
+    return move.kind === 'screen' && walks(move.who).length === 1 ? 0 : 1
+  }
+  return [...beat].sort((a, b) => rank(a) - rank(b))
 }
