@@ -5,6 +5,7 @@ import type { Context } from './context'
 import { choiceRoutes } from './features/choices/choices.routes'
 import { counterRoutes } from './features/counters/counters.routes'
 import { gameRoutes } from './features/games/games.routes'
+import { historyRoutes } from './features/history/history.routes'
 import { opponentRoutes } from './features/opponents/opponents.routes'
 import { planRoutes } from './features/plans/plans.routes'
 import { possessionRoutes } from './features/possessions/possessions.routes'
@@ -40,6 +41,7 @@ export const endpointsOf = (context: Context): Endpoint[] => [
   ...choiceRoutes(context),
   ...planRoutes(context),
   ...sheetRoutes(context),
+  ...historyRoutes(context),
 ]
 
 /** The whole HTTP side but the client's files; the same for tests and for production. */

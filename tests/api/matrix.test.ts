@@ -26,7 +26,7 @@ interface Row {
   body?: (rows: Fixture) => object
   still?: boolean
   ifMatch?: string
-  query?: string
+  query?: string | ((rows: Fixture) => string)
   /** A body or query that cannot be taken, and the field that must be named. */
   bad: { body?: object; query?: string; field: string }
 }
@@ -156,6 +156,13 @@ const TABLE: Record<string, Row> = {
     success: 200,
     bad: { query: 'paper=napkin', field: 'paper' },
   },
+  'get /history': {
+    at: () => ({}),
+    success: 200,
+    query: (rows) => `row=${rows.possession}`,
+    bad: { query: 'row=first', field: 'row' },
+  },
+  'get /changes': { at: () => ({}), success: 200, bad: { query: 'since=yesterday', field: 'since' } },
   'delete /possessions/{id}': { at: rowsOf.possession, success: 204, bad: badId },
 }
 
@@ -224,7 +231,11 @@ describe('the endpoint matrix', () => {
 
   describe.each(keys)('%s', (key) => {
     const row = TABLE[key] as Row
-    const good = (rows: Fixture) => ({ values: row.at(rows), body: row.body?.(rows), query: row.query })
+    const good = (rows: Fixture) => ({
+      values: row.at(rows),
+      body: row.body?.(rows),
+      query: typeof row.query === 'function' ? row.query(rows) : row.query,
+    })
 
     it('401 without a session', async () => {
       const answer = await send(test.anonymous(), key, row, { ...good(own), picture: await jpeg() })

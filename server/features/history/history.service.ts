@@ -1,0 +1,38 @@
+import type { EntityManager } from 'typeorm'
+import { LIMITS } from '@shared/limits'
+import { Change } from '../../database/entities/Change'
+import { NotFound } from '../../http/problem'
+
+/** When a deletion that was made before it can no longer be undone. */
+const undoUntil = (now: Date) => new Date(now.getTime() - LIMITS.undoMinutes * 60_000).toISOString()
+
+/** Whether a row of any table of the team has this id and is there, or can still be put back. */
+async function isOfTeam(manager: EntityManager, teamId: string, id: string, now: Date): Promise<boolean> {
+  const tables = manager.connection.entityMetadatas.filter((entity) =>
+    ['teamId', 'deletedAt', 'version'].every((column) => entity.findColumnWithPropertyName(column)),
+  )
+  const parts = tables.map(
+    ({ tableName }) =>
+      `SELECT 1 FROM "${tableName}" WHERE id = ? AND teamId = ? AND (deletedAt IS NULL OR deletedAt > ?)`,
+  )
+  const found: unknown[] = await manager.query(
+    `${parts.join(' UNION ALL ')} LIMIT 1`,
+    parts.flatMap(() => [id, teamId, undoUntil(now)]),
+  )
+  return found.length > 0
+}
+
+/** What happened to a row, oldest first. @throws NotFound when no row of the team has this id */
+export async function historyOf(
+  manager: EntityManager,
+  teamId: string,
+  rowId: string,
+  now: Date,
+): Promise<Change[]> {
+  if (!(await isOfTeam(manager, teamId, rowId, now))) throw new NotFound('row')
+  return manager.getRepository(Change).find({
+    where: { teamId, rowId },
+    relations: { person: true },
+    order: { at: 'ASC' },
+  })
+}
