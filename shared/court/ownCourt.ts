@@ -48,7 +48,7 @@ export function ownCourtFaults(base: RulePack, own: OwnCourt): { field: keyof Ow
 }
 
 /** Metres that must be left between a line and the next. */
-const CLEAR = 0.5
+const CLEAR = 1
 
 const sidesOf = (base: RulePack, own: OwnCourt) => ({
   length: own.length ?? base.court.length,
