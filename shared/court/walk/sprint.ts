@@ -1,4 +1,5 @@
-import type { Sprint } from './settings'
+import type { Role } from '../../vocabulary'
+import { WALK_SETTINGS, type Sprint, type WalkSettings } from './settings'
 
 /*
  * A sprint from rest approaches its top speed exponentially: v(t) = V (1 - exp(-t / T)), so that
@@ -27,4 +28,25 @@ export function sprintSeconds(sprint: Sprint, metres: number): number {
     seconds -= over / sprintSpeed(sprint, seconds)
   }
   return seconds
+}
+
+/**
+ * A player's own sprint from one timed run: how fast at most, if speed is gathered over `runUp` seconds. Held to
+ * what the settings allow, so that a slip of the watch makes no world record.
+ */
+export function timedSprint(metres: number, seconds: number, runUp: number): Sprint {
+  const topSpeed = metres / sprintDistance({ topSpeed: 1, runUp }, seconds)
+  const { least, most } = WALK_SETTINGS.ourTopSpeed
+  return { topSpeed: Math.min(most, Math.max(least, topSpeed)), runUp }
+}
+
+/** The squad's own sprints for the roles that are played; a player who was not timed has the default. */
+export function runnersOf(
+  five: Iterable<readonly [Role, { sprint20: number | null }]>,
+  settings: WalkSettings,
+): WalkSettings['runners'] {
+  const runners: WalkSettings['runners'] = {}
+  for (const [role, { sprint20 }] of five)
+    if (sprint20 !== null) runners[role] = timedSprint(20, sprint20, settings.ourRunUp)
+  return runners
 }

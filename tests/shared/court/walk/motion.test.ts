@@ -3,7 +3,7 @@ import { describe, expect, it } from 'vitest'
 import { passFlight } from '@shared/court/walk/passFlight'
 import { apex, GRAVITY, launchSpeed, secondsToFall } from '@shared/court/walk/projectile'
 import { DEFAULT_WALK, WALK_SETTINGS, WalkSettings } from '@shared/court/walk/settings'
-import { sprintDistance, sprintSeconds } from '@shared/court/walk/sprint'
+import { runnersOf, sprintDistance, sprintSeconds, timedSprint } from '@shared/court/walk/sprint'
 
 const anySprint = fc.record({
   topSpeed: fc.double({ min: 3, max: 11, noNaN: true }),
@@ -28,6 +28,30 @@ describe('a sprint', () => {
         expect(sprintSeconds(sprint, long)).toBeGreaterThanOrEqual(long / sprint.topSpeed)
       }),
     )
+  })
+})
+
+describe('a player’s own sprint', () => {
+  it('takes as long over 20 m as it was timed', () => {
+    fc.assert(
+      fc.property(fc.double({ min: 2.8, max: 5, noNaN: true }), (seconds) => {
+        expect(sprintSeconds(timedSprint(20, seconds, 1), 20)).toBeCloseTo(seconds, 6)
+      }),
+    )
+    expect(timedSprint(20, 3.469, 1).topSpeed).toBeCloseTo(8, 2)
+  })
+
+  it('is held to what people run, and leaves those who were not timed at the default', () => {
+    expect(timedSprint(20, 2, 1).topSpeed).toBe(WALK_SETTINGS.ourTopSpeed.most)
+    const runners = runnersOf(
+      [
+        ['1', { sprint20: 3.4 }],
+        ['2', { sprint20: null }],
+      ],
+      DEFAULT_WALK,
+    )
+    expect(Object.keys(runners)).toEqual(['1'])
+    expect(WalkSettings.safeParse({ runners }).success).toBe(true)
   })
 })
 
