@@ -1,6 +1,7 @@
 import { z } from 'zod'
 import { Id, Instant, Notes, RowMeta } from '../http/common'
 import { RulePackKey } from '../court/rulePacks'
+import { LIMITS } from '../limits'
 import { STATIONS, valuesOf } from '../vocabulary'
 
 export const GameBody = z.object({
@@ -23,6 +24,17 @@ export const GameBody = z.object({
 })
 export type GameBody = z.infer<typeof GameBody>
 
+/** Somebody of the staff as a game names them. */
+export const Coach = z.object({ id: z.uuid(), name: z.string(), initials: z.string() })
+export type Coach = z.infer<typeof Coach>
+
+/** Who gets the ball, a person of this team's staff, and what there is to say about it. */
+export const HandOnBody = z.object({
+  toId: Id,
+  note: z.string().trim().max(LIMITS.note).default(''),
+})
+export type HandOnBody = z.infer<typeof HandOnBody>
+
 export const GameRow = RowMeta.extend({
   ...GameBody.shape,
   opponentName: z.string(),
@@ -34,6 +46,21 @@ export const GameRow = RowMeta.extend({
     .object({ id: z.uuid(), number: z.number().int(), signedAt: z.iso.datetime().nullable() })
     .nullable(),
   headCoach: z.object({ name: z.string(), initials: z.string() }).nullable(),
+  /** Whoever has the ball; null is nobody yet. */
+  holder: Coach.nullable(),
+  /** When the read was signed off and by whom; `by` is null once that person was erased. */
+  read: z.object({ at: z.iso.datetime(), by: Coach.nullable() }).nullable(),
+  /** The last time it went from one to another. */
+  handedOn: z
+    .object({
+      from: z.string().nullable(),
+      to: z.string().nullable(),
+      note: z.string(),
+      at: z.iso.datetime(),
+    })
+    .nullable(),
+  /** Whether the caller may hand the ball on, take it, and sign off the read. */
+  mayHandOn: z.boolean(),
 })
 export type GameRow = z.infer<typeof GameRow>
 export const GameList = z.object({ rows: z.array(GameRow), total: z.number().int() })

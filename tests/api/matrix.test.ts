@@ -9,6 +9,7 @@ import {
   scoutedGameBody,
   type Fixture,
 } from '../support/fixture'
+import { Person } from '@server/database/entities/Person'
 import { OTHER_TEAM, PLAYER, startTestApp, TEAM, type Agent, type TestApp } from '../support/testApp'
 import { DEMO_RULES } from '@server/database/demo/rules'
 
@@ -131,6 +132,15 @@ const TABLE: Record<string, Row> = {
     body: (rows) => gameBody(rows.opponent),
     bad: { body: { tipOff: '20.3.2026' }, field: 'tipOff' },
   },
+  'post /games/{id}/hand-on': {
+    at: rowsOf.game,
+    headOnly: true,
+    success: 200,
+    body: () => ({ toId: headId }),
+    bad: { body: { toId: 'maren' }, field: 'toId' },
+  },
+  'post /games/{id}/read-sign-off': { at: rowsOf.game, headOnly: true, success: 200, bad: badId },
+  'delete /games/{id}/read-sign-off': { at: rowsOf.game, headOnly: true, success: 200, bad: badId },
   'get /games/{id}/choices': { at: rowsOf.game, success: 200, bad: badId },
   'get /games/{id}/plan': { at: rowsOf.game, success: 200, bad: badId },
   'put /games/{id}/plan': {
@@ -177,11 +187,13 @@ const LAST = [
 let test: TestApp
 let own: Fixture
 let other: Fixture
+let headId = ''
 
 beforeAll(async () => {
   test = await startTestApp()
   own = await makeFixture(test)
   other = await makeFixture(test, OTHER_TEAM)
+  headId = (await test.context.db.manager.findOneByOrFail(Person, { name: 'Test head' })).id
 }, 60_000)
 afterAll(() => test.stop())
 

@@ -268,13 +268,13 @@ describe('signing off', () => {
 })
 
 describe('where a game stands', () => {
-  it('goes from Scout to Choose to Teach to Review by what is there and what the time is', async () => {
+  it('goes from Scout to Read to Choose to Teach to Review by what is there and what the time is', async () => {
     const station = async () => (await head.get(teamUrl(`/games/${game}`))).body.station as string
     const scouted = await newScoutedGame(head, opponent)
     for (let number = 1; number < 10; number++) await newPossession(head, scouted, { number })
     expect(await station()).toBe('scout')
     await created(head, 'possessions', possessionBody(scouted, { number: 10 }))
-    expect(await station()).toBe('choose')
+    expect(await station()).toBe('read')
     await put()
     expect(await station()).toBe('choose')
     await signOff(randomUUID(), '"1"')

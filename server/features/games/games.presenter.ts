@@ -1,28 +1,61 @@
-import type { GameBody, GameRow } from '@shared/games/schemas'
+import type { Coach, GameBody, GameRow } from '@shared/games/schemas'
+import type { Station, TeamRole } from '@shared/vocabulary'
 import type { Game } from '../../database/entities/Game'
 import { metaOf } from '../../http/present'
+import { mayHandOn } from './games.policy'
 
-/** What stands around a game; the station follows from it. */
+/** What stands around a game; the station and whoever has the ball follow from it. */
 export interface GameFacts {
   opponentName: string
   possessions: number
   scoutedGames: number
   plan: GameRow['plan']
-  headCoach: GameRow['headCoach']
+  headCoach: Coach | null
+  /** The staff of the team, by id. */
+  staff: ReadonlyMap<string, Coach>
+  /** Whoever watched the opponent's newest game; null when nobody has. */
+  scoutId: string | null
+  /** The newest hand-on of this game. */
+  handedOn: (NonNullable<GameRow['handedOn']> & { station: Station }) | null
+  readBy: Coach | null
+  /** Whoever asks. */
+  caller: { personId: string; role: TeamRole } | null
 }
 
 /** Fewer counted possessions than this and the game is still with the scout (setting). */
 const ENOUGH_TO_READ = 10
 
-/** Where the work stands, from what is there: counted, chosen and signed, played. */
+/**
+ * Where the work stands, from what is there: played, chosen and signed, picks begun, read signed off, counted.
+ * A later step that was taken moves the work on whether or not an earlier one was written down: a plan that is
+ * signed off or begun is past the read, also where nobody signed the read off.
+ */
 export function stationOf(
-  tipOff: string,
+  game: Pick<Game, 'tipOff' | 'readAt'>,
   facts: Pick<GameFacts, 'possessions' | 'plan'>,
   now: Date,
-): GameRow['station'] {
-  if (tipOff <= now.toISOString()) return 'review'
-  if (facts.plan?.signedAt) return 'teach'
-  return facts.possessions < ENOUGH_TO_READ ? 'scout' : 'choose'
+): Station {
+  if (game.tipOff <= now.toISOString()) return 'review'
+  if (facts.plan) return facts.plan.signedAt ? 'teach' : 'choose'
+  if (game.readAt) return 'choose'
+  return facts.possessions < ENOUGH_TO_READ ? 'scout' : 'read'
+}
+
+/**
+ * Whoever has the ball. A hand-on holds while the work stands at the station it was made at; when the work moves
+ * on the ball goes to whoever the next station is usually with: Scout and Read to the scout of the newest game
+ * that was watched, Choose, Teach and Review to the head coach. Somebody who left the staff has no ball.
+ */
+export function holderOf(
+  game: Pick<Game, 'holderId'>,
+  station: Station,
+  facts: Pick<GameFacts, 'staff' | 'scoutId' | 'headCoach' | 'handedOn'>,
+): Coach | null {
+  const holds = facts.handedOn === null || facts.handedOn.station === station
+  const held = holds && game.holderId ? facts.staff.get(game.holderId) : undefined
+  if (held) return held
+  if (station !== 'scout' && station !== 'read') return facts.headCoach
+  return (facts.scoutId && facts.staff.get(facts.scoutId)) || null
 }
 
 const NOT_DUE: GameBody['due'] = { scout: null, read: null, teach: null, review: null }
@@ -37,12 +70,25 @@ export const bodyOfGame = (row: Game): GameBody => ({
   notes: row.notes,
 })
 
-export const presentGame = (row: Game, facts: GameFacts, now: Date): GameRow => ({
-  ...metaOf(row),
-  ...bodyOfGame(row),
-  opponentName: facts.opponentName,
-  station: stationOf(row.tipOff, facts, now),
-  counts: { possessions: facts.possessions, scoutedGames: facts.scoutedGames },
-  plan: facts.plan,
-  headCoach: facts.headCoach,
-})
+export function presentGame(row: Game, facts: GameFacts, now: Date): GameRow {
+  const station = stationOf(row, facts, now)
+  const holder = holderOf(row, station, facts)
+  return {
+    ...metaOf(row),
+    ...bodyOfGame(row),
+    opponentName: facts.opponentName,
+    station,
+    counts: { possessions: facts.possessions, scoutedGames: facts.scoutedGames },
+    plan: facts.plan,
+    headCoach: facts.headCoach && { name: facts.headCoach.name, initials: facts.headCoach.initials },
+    holder,
+    read: row.readAt === null ? null : { at: row.readAt, by: facts.readBy },
+    handedOn: facts.handedOn && {
+      from: facts.handedOn.from,
+      to: facts.handedOn.to,
+      note: facts.handedOn.note,
+      at: facts.handedOn.at,
+    },
+    mayHandOn: facts.caller !== null && mayHandOn(facts.caller, holder),
+  }
+}

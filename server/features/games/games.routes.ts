@@ -1,9 +1,10 @@
-import { GameBody, GameList, GameRow } from '@shared/games/schemas'
+import { GameBody, GameList, GameRow, HandOnBody } from '@shared/games/schemas'
 import type { Context } from '../../context'
 import { endpoint, ok } from '../../http/endpoint'
 import { InTeam, OneRow } from '../../http/params'
 import { listReply, putReply } from '../../http/present'
 import { getGame, listGames, putGame } from './games.service'
+import { handOn, signRead } from './handOn.service'
 
 export const gameRoutes = ({ db, clock }: Context) => [
   endpoint({
@@ -13,7 +14,7 @@ export const gameRoutes = ({ db, clock }: Context) => [
     action: 'game:read',
     params: InTeam,
     response: GameList,
-    handle: async ({ caller }) => listReply(await listGames(db, caller.teamId, clock())),
+    handle: async ({ caller }) => listReply(await listGames(db, caller.teamId, clock(), caller)),
   }),
   endpoint({
     method: 'get',
@@ -23,7 +24,7 @@ export const gameRoutes = ({ db, clock }: Context) => [
     params: OneRow,
     response: GameRow,
     handle: async ({ caller, params }) => {
-      const row = await getGame(db, caller.teamId, params.id, clock())
+      const row = await getGame(db, caller.teamId, params.id, clock(), caller)
       return ok(row, row.version)
     },
   }),
@@ -43,8 +44,49 @@ export const gameRoutes = ({ db, clock }: Context) => [
         ifMatch,
         now: clock(),
         by: caller.personId,
+        caller,
       })
-      return putReply(put, await getGame(db, caller.teamId, params.id, clock()))
+      return putReply(put, await getGame(db, caller.teamId, params.id, clock(), caller))
+    },
+  }),
+  endpoint({
+    method: 'post',
+    path: '/teams/:team/games/:id/hand-on',
+    summary: 'Give the work on a game to somebody of the staff',
+    action: 'game:hand-on',
+    params: OneRow,
+    body: HandOnBody,
+    response: GameRow,
+    handle: async ({ caller, params, body }) => {
+      await handOn(db, { gameId: params.id, caller, body, now: clock() })
+      const row = await getGame(db, caller.teamId, params.id, clock(), caller)
+      return ok(row, row.version)
+    },
+  }),
+  endpoint({
+    method: 'post',
+    path: '/teams/:team/games/:id/read-sign-off',
+    summary: 'Sign the read of a game off: what is habit is decided',
+    action: 'game:hand-on',
+    params: OneRow,
+    response: GameRow,
+    handle: async ({ caller, params }) => {
+      await signRead(db, { gameId: params.id, caller, signed: true, now: clock() })
+      const row = await getGame(db, caller.teamId, params.id, clock(), caller)
+      return ok(row, row.version)
+    },
+  }),
+  endpoint({
+    method: 'delete',
+    path: '/teams/:team/games/:id/read-sign-off',
+    summary: 'Take the sign-off of a read back',
+    action: 'game:hand-on',
+    params: OneRow,
+    response: GameRow,
+    handle: async ({ caller, params }) => {
+      await signRead(db, { gameId: params.id, caller, signed: false, now: clock() })
+      const row = await getGame(db, caller.teamId, params.id, clock(), caller)
+      return ok(row, row.version)
     },
   }),
 ]

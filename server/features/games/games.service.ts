@@ -1,33 +1,16 @@
-import type { DataSource, EntityManager } from 'typeorm'
+import { IsNull, type DataSource, type EntityManager } from 'typeorm'
 import type { GameBody, GameRow } from '@shared/games/schemas'
+import type { TeamRole } from '@shared/vocabulary'
 import { countOpponents } from '../../database/counting/opponentCounts'
 import { Game } from '../../database/entities/Game'
-import { Membership } from '../../database/entities/Membership'
 import { Opponent } from '../../database/entities/Opponent'
-import { Plan } from '../../database/entities/Plan'
 import { findInTeam } from '../../database/findInTeam'
 import { putRow, type Put } from '../../database/putRow'
-import { initialsOf } from '../session/session.presenter'
+import { newestHandOns, newestPlans, newestScouts, peopleOf, staffOf } from './around'
 import { bodyOfGame, presentGame, type GameFacts } from './games.presenter'
 
-async function headCoachOf(manager: EntityManager, teamId: string): Promise<GameRow['headCoach']> {
-  const membership = await manager.getRepository(Membership).findOne({
-    where: { teamId, role: 'head-coach' },
-    relations: { person: true },
-  })
-  const name = membership?.person?.name
-  return name ? { name, initials: initialsOf(name) } : null
-}
-
-/** The newest plan version of every game of a team. */
-async function newestPlans(manager: EntityManager, teamId: string): Promise<Map<string, GameRow['plan']>> {
-  const plans = await manager.getRepository(Plan).find({
-    where: { teamId },
-    select: { id: true, gameId: true, number: true, signedAt: true },
-    order: { number: 'ASC' },
-  })
-  return new Map(plans.map(({ gameId, id, number, signedAt }) => [gameId, { id, number, signedAt }]))
-}
+/** Whoever asks, for what they may do with a game. */
+export type Asking = { personId: string; role: TeamRole }
 
 /** Presents games of one team with what stands around each. */
 export async function presentGames(
@@ -35,13 +18,25 @@ export async function presentGames(
   teamId: string,
   games: Game[],
   now: Date,
+  caller: Asking | null = null,
 ): Promise<GameRow[]> {
   const opponents = new Map(
     (await manager.getRepository(Opponent).findBy({ teamId })).map((row) => [row.id, row.name]),
   )
   const counts = await countOpponents(manager, teamId, now)
   const plans = await newestPlans(manager, teamId)
-  const headCoach = await headCoachOf(manager, teamId)
+  const staff = await staffOf(manager, teamId)
+  const byId = new Map(staff.map(({ id, name, initials }) => [id, { id, name, initials }]))
+  const head = staff.find(({ isHead }) => isHead)
+  const scouts = await newestScouts(manager, teamId)
+  const handOns = await newestHandOns(
+    manager,
+    games.map(({ id }) => id),
+  )
+  const readers = await peopleOf(
+    manager,
+    games.map(({ readById }) => readById),
+  )
   return games.map((game) => {
     const counted = counts.get(game.opponentId)?.counts
     const facts: GameFacts = {
@@ -49,29 +44,55 @@ export async function presentGames(
       possessions: counted?.possessions ?? 0,
       scoutedGames: counted?.scoutedGames ?? 0,
       plan: plans.get(game.id) ?? null,
-      headCoach,
+      headCoach: (head && byId.get(head.id)) ?? null,
+      staff: byId,
+      scoutId: scouts.get(game.opponentId) ?? null,
+      handedOn: handOns.get(game.id) ?? null,
+      readBy: (game.readById && readers.get(game.readById)) ?? null,
+      caller,
     }
     return presentGame(game, facts, now)
   })
 }
 
 /** Games of a team in the order they are played. */
-export async function listGames(db: DataSource, teamId: string, now: Date): Promise<GameRow[]> {
-  const rows = await db.getRepository(Game).find({ where: { teamId }, order: { tipOff: 'ASC' } })
-  return presentGames(db.manager, teamId, rows, now)
+export async function listGames(
+  db: DataSource,
+  teamId: string,
+  now: Date,
+  caller: Asking | null = null,
+): Promise<GameRow[]> {
+  const rows = await db
+    .getRepository(Game)
+    .find({ where: { teamId, deletedAt: IsNull() }, order: { tipOff: 'ASC' } })
+  return presentGames(db.manager, teamId, rows, now, caller)
 }
 
 /** @throws NotFound */
-export async function getGame(db: DataSource, teamId: string, id: string, now: Date): Promise<GameRow> {
+export async function getGame(
+  db: DataSource,
+  teamId: string,
+  id: string,
+  now: Date,
+  caller: Asking | null = null,
+): Promise<GameRow> {
   const row = await findInTeam(db.manager, Game, teamId, id, 'game')
-  const [game] = await presentGames(db.manager, teamId, [row], now)
+  const [game] = await presentGames(db.manager, teamId, [row], now, caller)
   return game as GameRow
 }
 
 /** @throws NotFound, Conflict, StaleVersion */
 export function putGame(
   db: DataSource,
-  options: { id: string; teamId: string; body: GameBody; ifMatch: number | null; now: Date; by: string },
+  options: {
+    id: string
+    teamId: string
+    body: GameBody
+    ifMatch: number | null
+    now: Date
+    by: string
+    caller?: Asking
+  },
 ): Promise<Put<Game>> {
   return db.transaction(async (manager) => {
     await findInTeam(manager, Opponent, options.teamId, options.body.opponentId, 'opponent')
@@ -82,7 +103,8 @@ export function putGame(
       what: 'game',
       bodyOf: bodyOfGame,
       columnsOf: (body) => body,
-      present: async (row) => (await presentGames(manager, options.teamId, [row], options.now))[0],
+      present: async (row) =>
+        (await presentGames(manager, options.teamId, [row], options.now, options.caller))[0],
     })
   })
 }

@@ -18,6 +18,7 @@ export type Slot = 'name' | 'date' | 'time' | 'place'
 export const SLOTS: readonly Slot[] = ['name', 'date', 'time', 'place']
 
 const SHORT_MOST = 20
+const NOT_DUE: GameBody['due'] = { scout: null, read: null, teach: null, review: null }
 
 export const isSaid = (meeting: Meeting, slot: Slot): boolean => {
   if (slot === 'name') return meeting.name.trim() !== ''
@@ -55,13 +56,15 @@ export function bodiesOf(
   if (nextSlot(meeting) !== null || meeting.place === '') return null
   const name = meeting.name.trim().slice(0, LIMITS.name)
   return {
-    opponent: { name, shortName: meeting.shortName.trim() || shortOf(name) },
+    opponent: { name, shortName: meeting.shortName.trim() || shortOf(name), notes: '' },
     game: {
       opponentId,
       tipOff: instantOf(meeting.date, meeting.time, timeZone),
       place: meeting.place,
       rulePack,
       chooseBy: null,
+      due: NOT_DUE,
+      notes: '',
     },
   }
 }

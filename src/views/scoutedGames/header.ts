@@ -15,6 +15,8 @@ export interface Header {
   theirs: string
   foeScore: string
   blowout: boolean
+  /** Written elsewhere on the page; the sentence carries them along as they are. */
+  notes: string
 }
 
 /** The slots of the sentence, in order. */
@@ -32,6 +34,7 @@ export const emptyHeader = (pack: RulePackKey): Header => ({
   theirs: '',
   foeScore: '',
   blowout: false,
+  notes: '',
 })
 
 export function headerOf(row: ScoutedGameRow): Header {
@@ -47,6 +50,7 @@ export function headerOf(row: ScoutedGameRow): Header {
     theirs: finalScore === null ? '' : String(finalScore.theirs),
     foeScore: finalScore === null ? '' : String(finalScore.foe),
     blowout: row.blowout,
+    notes: row.notes,
   }
 }
 
@@ -100,6 +104,7 @@ export function bodyOf(header: Header, opponentId: string, today: string): Scout
         : { kind: header.coverage },
     blowout: header.blowout,
     finalScore: theirs === null || foe === null ? null : { theirs, foe },
+    notes: header.notes,
   }
 }
 

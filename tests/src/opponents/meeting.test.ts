@@ -31,6 +31,7 @@ describe('the sentence', () => {
     expect(OpponentBody.parse(bodies.opponent)).toEqual({
       name: 'Kelder Mouth Puffins',
       shortName: 'Puffins',
+      notes: '',
     })
     expect(GameBody.parse(bodies.game)).toMatchObject({ opponentId: ID, tipOff: '2026-05-02T13:00:00.000Z' })
   })

@@ -40,6 +40,7 @@ describe('the header of a scouted game', () => {
       to: '32',
       theirs: '61',
       foeScore: '58',
+      notes: 'Their **12** never tires.',
     }
     const body = bodyOf(said, OPPONENT, TODAY)
     expect(ScoutedGameBody.safeParse(body).success).toBe(true)
