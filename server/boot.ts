@@ -5,6 +5,7 @@ import { In } from 'typeorm'
 import { systemClock } from './adapters/clock'
 import { lockFolder } from './adapters/folderLock'
 import { createLog } from './adapters/log'
+import { smtpTransport } from './adapters/mail/smtp'
 import { diskStillFiles } from './adapters/stillFiles'
 import { pruneBackups } from './backup/prune'
 import type { Config } from './config'
@@ -13,7 +14,9 @@ import { openDatabase } from './database/dataSource'
 import { loadDemo } from './database/demo/load'
 import { DEMO_SIGN_INS } from './database/demo/people'
 import { Person } from './database/entities/Person'
-import { purgeDeleted } from './features/possessions/deletion.service'
+import { carryMail } from './features/mail/carrier'
+import { forgetOldMail } from './features/mail/oldMail'
+import { purgeDeleted } from './features/deletion/purge.service'
 import { SESSION_MS } from './http/passport'
 import { SessionStore } from './http/sessionStore'
 
@@ -46,6 +49,7 @@ export async function boot(config: Config): Promise<Booted> {
   try {
     const { context, demoIsIn } = await open(config)
     const close = async () => {
+      context.mail?.close()
       await context.db.destroy()
       letGo()
     }
@@ -62,6 +66,7 @@ async function open(config: Config): Promise<Omit<Booted, 'close'>> {
     db: await openDatabase(join(config.dataDir, 'overtop.sqlite')),
     clock: systemClock,
     stillFiles: diskStillFiles(config.dataDir),
+    mail: smtpTransport(config),
     log: createLog(config.logLevel),
     sessionSecret: await sessionSecret(config),
   }
@@ -72,13 +77,15 @@ async function open(config: Config): Promise<Omit<Booted, 'close'>> {
 
 const EVERY_MS = 60_000
 
-/** What has to go goes every minute: deletions past their undo, sessions and backups past their time. */
+/** What has to go goes every minute: deletions past their undo, what is past its time, letters that wait. */
 export function startHousekeeping(context: Context): () => void {
   const sessions = new SessionStore(context.db, context.clock, SESSION_MS)
   const sweep = async () => {
     await purgeDeleted(context.db, context.stillFiles, context.clock())
     await sessions.sweep()
     await pruneBackups(context.config, context.clock())
+    await forgetOldMail(context.db, context.clock())
+    await carryMail(context)
   }
   const report = (error: unknown) => context.log.error({ err: error }, 'housekeeping failed')
   void sweep().catch(report)

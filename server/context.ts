@@ -1,6 +1,7 @@
 import type { Logger } from 'pino'
 import type { DataSource } from 'typeorm'
 import type { Clock } from './adapters/clock'
+import type { MailTransport } from './adapters/mail/transport'
 import type { StillFiles } from './adapters/stillFiles'
 import type { Config } from './config'
 
@@ -10,6 +11,8 @@ export interface Context {
   db: DataSource
   clock: Clock
   stillFiles: StillFiles
+  /** Null without a mail server: letters are kept for the staff to hand on. */
+  mail: MailTransport | null
   log: Logger
   /** Signs the session cookie. */
   sessionSecret: string

@@ -1,5 +1,9 @@
 import Database from 'better-sqlite3'
-import { LIMITS } from '@shared/limits'
+import { PURGE_STATEMENTS, undoUntil } from '../database/hanging'
+
+/** Told of a letter that had not left when the backup was made. */
+const WORDS_LOST =
+  'It had not left when the backup was made, and its words are not in backups. Write it again.'
 
 type Connection = Database.Database
 
@@ -20,8 +24,8 @@ export async function copyDatabase(from: string, to: string): Promise<void> {
 }
 
 /**
- * Takes out of a copy what a backup does not keep: who is signed in, and possessions whose time to be put
- * back is over. What was taken out is gone from the file's bytes too, and the file needs no log beside it.
+ * Takes out of a copy what a backup does not keep: who is signed in, links to new passwords, the words of
+ * letters (they may hold a link too), and possessions whose time to be put back is over. What was taken out is gone from the file's bytes too, and the file needs no log beside it.
  */
 export function clearCopy(file: string, now: Date): void {
   withConnection(file, (connection) => {
@@ -29,8 +33,14 @@ export function clearCopy(file: string, now: Date): void {
     connection.pragma('foreign_keys = ON')
     connection.pragma('secure_delete = ON')
     connection.exec('DELETE FROM "sessions"')
-    const until = new Date(now.getTime() - LIMITS.undoMinutes * 60_000).toISOString()
-    connection.prepare('DELETE FROM "possessions" WHERE "deletedAt" <= ?').run(until)
+    connection.exec('DELETE FROM "password_resets"')
+    // A restored letter has no words to leave with: what had not left yet is a failed one, for somebody to look at.
+    connection.exec(`UPDATE "mails" SET "text" = '', "html" = '',
+      "trouble" = CASE WHEN "state" IN ('waiting', 'sending', 'kept', 'failed') THEN '${WORDS_LOST}' ELSE "trouble" END,
+      "nextTryAt" = NULL,
+      "state" = CASE WHEN "state" IN ('waiting', 'sending', 'kept') THEN 'failed' ELSE "state" END`)
+    const until = undoUntil(now)
+    for (const sql of PURGE_STATEMENTS) connection.prepare(sql).run(...(sql.includes('?') ? [until] : []))
     connection.exec('VACUUM')
   })
 }

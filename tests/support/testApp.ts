@@ -5,6 +5,7 @@ import { join } from 'node:path'
 import type { Express } from 'express'
 import { pino } from 'pino'
 import request from 'supertest'
+import type { MailTransport } from '@server/adapters/mail/transport'
 import { diskStillFiles } from '@server/adapters/stillFiles'
 import { hashPassword } from '@server/adapters/passwords'
 import { createApp } from '@server/app'
@@ -104,7 +105,7 @@ async function seed(context: Context): Promise<void> {
 
 /** The real app on a real SQLite file in a folder of its own. */
 export async function startTestApp(
-  options: { now?: Date; publicUrl?: string; empty?: boolean } = {},
+  options: { now?: Date; publicUrl?: string; empty?: boolean; mail?: MailTransport } = {},
 ): Promise<TestApp> {
   const dataDir = await mkdtemp(join(tmpdir(), 'overtop-test-'))
   let now = options.now ?? new Date('2026-03-17T09:42:00Z')
@@ -117,11 +118,14 @@ export async function startTestApp(
       sessionSecret: null,
       demo: false,
       backupDays: 30,
+      mailUrl: null,
+      mailFrom: null,
       logLevel: 'silent',
     },
     db: await openDatabase(join(dataDir, 'overtop.sqlite')),
     clock: () => now,
     stillFiles: diskStillFiles(dataDir),
+    mail: options.mail ?? null,
     log: pino({ level: 'silent' }),
     sessionSecret: 'test secret that is long enough to sign with',
   }

@@ -1,5 +1,5 @@
 import { randomUUID } from 'node:crypto'
-import type { EntityManager } from 'typeorm'
+import { In, type EntityManager } from 'typeorm'
 import type { MailAttachment, MailKind } from '@shared/mail/schemas'
 import { renderLetter, type LetterBody } from '../../adapters/mail/letter'
 import { Mail } from '../../database/entities/Mail'
@@ -49,4 +49,21 @@ export async function queueMail(manager: EntityManager, mail: NewMail): Promise<
   }
   await mails.insert(row)
   return row
+}
+
+/**
+ * Stops every letter about a row that has not left yet (a revoked invitation, a recalled sheet), and empties its
+ * words, for they may hold a link that is dead now. What is leaving this very moment cannot be stopped.
+ */
+export async function withdrawMailAbout(
+  manager: EntityManager,
+  aboutId: string,
+  kind: MailKind,
+): Promise<void> {
+  await manager
+    .getRepository(Mail)
+    .update(
+      { aboutId, kind, state: In(['waiting', 'failed', 'kept']) },
+      { state: 'withdrawn', text: '', html: '', nextTryAt: null, trouble: null },
+    )
 }

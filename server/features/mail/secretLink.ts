@@ -17,3 +17,11 @@ export const secretOf = (serverSecret: string, purpose: string, id: string): str
 
 /** What is stored of a secret: its SHA-256. It is long and random, so no slow hash is needed. */
 export const digestOf = (secret: string): string => createHash('sha256').update(secret).digest('hex')
+
+/** Words with the secret put into their place; words without a place come back as they are. */
+export const withSecret = (
+  words: string,
+  serverSecret: string,
+  { kind, aboutId }: { kind: string; aboutId: string | null },
+): string =>
+  aboutId === null ? words : words.replaceAll(SECRET_PLACE, () => secretOf(serverSecret, kind, aboutId))
