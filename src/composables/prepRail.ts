@@ -22,28 +22,39 @@ export function railOf(game: GameRow, timeZone: string, team?: string): Rail {
       station,
       state: index < here ? 'done' : index === here ? 'here' : 'ahead',
       what: whatOf(game, station, index - here, timeZone),
-      ...(index === here && game.headCoach !== null && station === 'choose'
-        ? { holder: game.headCoach.initials }
-        : {}),
+      ...(index === here && game.holder !== null ? { holder: game.holder.initials } : {}),
       ...(team === undefined ? {} : { to: pageOf(game, station, team) }),
     })),
     tipOff: { label: 'Tip-off', when: weekdayAndTime(game.tipOff, timeZone) },
   }
 }
 
+/** When a station of a game is due; the head coach's pick has a date of its own. */
+export const dueOf = (game: Pick<GameRow, 'chooseBy' | 'due'>, station: Station): string | null =>
+  station === 'choose' ? game.chooseBy : game.due[station]
+
+function doneWords(game: GameRow, station: Station, timeZone: string): string {
+  const [verb, at] =
+    station === 'read'
+      ? ['Signed off', game.read?.at ?? null]
+      : station === 'choose'
+        ? ['Signed off', game.plan?.signedAt ?? null]
+        : ['', null]
+  return at === null ? '' : `${verb} ${weekdayAndTime(at, timeZone)}`
+}
+
 function whatOf(game: GameRow, station: Station, ahead: number, timeZone: string): string {
-  if (station === 'scout') {
-    const { possessions, scoutedGames } = game.counts
-    if (possessions === 0) return ahead === 0 ? 'Nothing counted yet' : ''
+  const { possessions, scoutedGames } = game.counts
+  if (station === 'scout' && possessions > 0)
     return `${plural(possessions, 'possession')}, ${plural(scoutedGames, 'game')}`
-  }
-  if (station !== 'choose') return ''
-  const signed = game.plan?.signedAt ?? null
-  if (ahead < 0) return signed === null ? '' : `Signed off ${weekdayAndTime(signed, timeZone)}`
-  const due = game.chooseBy === null ? '' : `due ${weekdayAndTime(game.chooseBy, timeZone)}`
-  if (ahead > 0 || game.headCoach === null) return due
-  const first = game.headCoach.name.split(' ')[0] ?? game.headCoach.name
-  return due === '' ? `With ${first}` : `With ${first}, ${due}`
+  if (ahead < 0) return doneWords(game, station, timeZone)
+  const due = dueOf(game, station)
+  const dueWords = due === null ? '' : `due ${weekdayAndTime(due, timeZone)}`
+  if (ahead > 0) return dueWords
+  if (station === 'scout') return 'Nothing counted yet'
+  if (station === 'review' && due === null) return ''
+  const first = game.holder === null ? '' : `With ${game.holder.name.split(' ')[0] ?? game.holder.name}`
+  return first !== '' && dueWords !== '' ? `${first}, ${dueWords}` : first || dueWords
 }
 
 function pageOf(game: GameRow, station: Station, team: string): RouteLocationRaw | undefined {

@@ -41,7 +41,23 @@ describe('railOf', () => {
     const signed = { id: game.id, number: 1, signedAt: '2026-03-17T21:14:00.000Z' }
     const { stations } = railOf({ ...game, station: 'teach', plan: signed }, 'Europe/London')
     expect(stations[2]!.what).toBe('Signed off Tue 21:14')
-    expect(stations[3]!.holder).toBeUndefined()
+    expect(stations[3]).toMatchObject({ holder: 'MO', what: 'With Maren' })
+  })
+
+  it('says whose a station is and when it is due, and nobody where nobody has the ball', () => {
+    const due = {
+      scout: null,
+      read: '2026-03-17T18:00:00.000Z',
+      teach: '2026-03-19T17:30:00.000Z',
+      review: null,
+    }
+    const tomas = { id: '44444444-4444-4444-8444-000000000202', name: 'Tomas Reyl', initials: 'TR' }
+    const { stations } = railOf({ ...game, station: 'read', holder: tomas, due }, 'UTC')
+    expect(stations[1]).toMatchObject({ holder: 'TR', what: 'With Tomas, due Tue 18:00' })
+    expect(stations[3]!.what).toBe('due Thu 17:30')
+    const nobody = railOf({ ...game, station: 'read', holder: null, due }, 'UTC').stations[1]
+    expect(nobody).toMatchObject({ what: 'due Tue 18:00' })
+    expect(nobody!.holder).toBeUndefined()
   })
 
   it('claims no count where nothing is counted, and no page where none is built', () => {
