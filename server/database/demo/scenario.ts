@@ -1,8 +1,11 @@
 import { localDay, localInstant } from './days'
 import { seeded } from './random'
 import { gullsTrips } from './scenario/gulls'
-import { lowmoorAfter, lowmoorTrips, tarnTrips } from './scenario/lowmoor'
+import { filmed } from './scenario/film'
+import { lowmoorAfter, lowmoorEarlier, lowmoorTrips, tarnTrips } from './scenario/lowmoor'
+import { ottersTrips } from './scenario/otters'
 import { ourTrips } from './scenario/ours'
+import { PRESS_FIVES } from './scenario/players'
 import { layOut, type Played, type Stretch } from './scenario/timeline'
 import type { DemoGame, DemoOpponent, DemoPossession, DemoScoutedGame, Trip } from './scenario/types'
 
@@ -19,16 +22,17 @@ const GAME = 2400
 const MINUTE = 60
 
 export const DEMO_OPPONENTS: DemoOpponent[] = [
-  { key: 'gulls', name: 'Port Selby Gulls', shortName: 'Gulls' },
+  {
+    key: 'gulls',
+    name: 'Port Selby Gulls',
+    shortName: 'Gulls',
+    notes:
+      '## Bench\n\nTwo fists: trap on the catch. One fist: wait for the dribble.\n\n## To look for\n\n1. Does no. 14 come up after the first trap?\n2. Who takes the throw-in when 7 rests?',
+  },
   { key: 'lowmoor', name: 'Lowmoor Rovers', shortName: 'Lowmoor' },
   { key: 'tarn', name: 'Tarn Valley', shortName: 'Tarn' },
   { key: 'otters', name: 'Brindle Moor Otters', shortName: 'Otters' },
 ]
-
-/** Everything that was played, laid out once: it depends on the seed and never on the day. */
-const PLAYED = play()
-/** Every possession of the scenario, scouted and our own. */
-export const DEMO_POSSESSIONS: DemoPossession[] = Object.values(PLAYED).flatMap(({ rows }) => rows)
 
 function play(): Record<string, Played> {
   const random = seeded(SEED)
@@ -47,7 +51,7 @@ function play(): Record<string, Played> {
     score: [covered.score.theirs - 2, covered.score.foe - 1],
     later: [5, 2],
   })
-  return {
+  const played = {
     'scout-gulls-1': put(first, { key: 'scout-gulls-1', from: 20 * MINUTE, score: [22, 29], later: [0, 3] }),
     'scout-gulls-2': put(second, { key: 'scout-gulls-2', to: 20 * MINUTE, later: [25, 28] }),
     'scout-gulls-3': put(third, { key: 'scout-gulls-3', foeScores: 0.8, later: [4, 3] }),
@@ -57,7 +61,37 @@ function play(): Record<string, Played> {
     'game-lowmoor-1': put(lowmoor, { key: 'game-lowmoor-1', kind: 'ours' }),
     'game-otters-2': put(away, { key: 'game-otters-2', kind: 'ours' }),
   }
+  // Drawn after everything else: what stands above stays as it was.
+  const [film = [], stands = []] = ottersTrips(random)
+  const all: Record<string, Played> = {
+    ...played,
+    'scout-lowmoor-2': put(lowmoorEarlier(random), { key: 'scout-lowmoor-2' }),
+    'scout-otters-1': put(film, { key: 'scout-otters-1' }),
+    'scout-otters-2': put(stands, { key: 'scout-otters-2' }),
+  }
+  FILMED.forEach(([key, opponent], i) => {
+    const game = all[key]
+    if (game) all[key] = { ...game, rows: filmed(game.rows, PRESS_FIVES[opponent], i) }
+  })
+  return all
 }
+
+/** Games that were seen on film, or gone over again on it. */
+const FILMED: readonly (readonly [game: string, opponent: keyof typeof PRESS_FIVES])[] = [
+  ['scout-gulls-2', 'gulls'],
+  ['scout-gulls-3', 'gulls'],
+  ['scout-lowmoor-1', 'lowmoor'],
+  ['scout-lowmoor-2', 'lowmoor'],
+  ['scout-otters-1', 'otters'],
+  ['game-otters-1', 'otters'],
+  ['game-lowmoor-1', 'lowmoor'],
+  ['game-otters-2', 'otters'],
+]
+
+/** Everything that was played, laid out once: it depends on the seed and never on the day. */
+const PLAYED = play()
+/** Every possession of the scenario, scouted and our own. */
+export const DEMO_POSSESSIONS: DemoPossession[] = Object.values(PLAYED).flatMap(({ rows }) => rows)
 
 /** The second stretch of the same game, numbered on. */
 function joined(game: Played, later: Played): Played {
@@ -81,8 +115,17 @@ export function demoScenario(now: Date, timeZone: string): DemoScenario {
     opponentKey: string,
     tipOff: string,
     place: DemoGame['place'],
-    chooseBy: string | null = null,
-  ): DemoGame => ({ key, opponentKey, tipOff, place, rulePack: 'fiba', chooseBy })
+    more: Partial<Pick<DemoGame, 'chooseBy' | 'due' | 'readKey' | 'notes'>> = {},
+  ): DemoGame => ({
+    key,
+    opponentKey,
+    tipOff,
+    place,
+    rulePack: 'fiba',
+    chooseBy: null,
+    readKey: null,
+    ...more,
+  })
   const scouted = (
     key: string,
     opponentKey: string,
@@ -105,9 +148,23 @@ export function demoScenario(now: Date, timeZone: string): DemoScenario {
       game('game-otters-1', 'otters', at(-45, '19:00'), 'home'),
       game('game-lowmoor-1', 'lowmoor', at(-24, '14:00'), 'home'),
       game('game-otters-2', 'otters', at(-4, '18:30'), 'away'),
-      game('game-gulls', 'gulls', at(3, '19:15'), 'home', at(2, '18:00')),
-      game('game-lowmoor-2', 'lowmoor', at(8, '18:45'), 'away', at(7, '18:00')),
-      game('game-tarn', 'tarn', at(11, '14:00'), 'home'),
+      game('game-gulls', 'gulls', at(3, '19:15'), 'home', {
+        chooseBy: at(2, '18:00'),
+        due: { read: at(-1, '22:00'), teach: at(3, '12:00') },
+        readKey: 'tomas',
+        notes:
+          '**Hall:** the far basket is close to the wall.\n\n- They warm up in the press.\n- Ask for the ball that bounces.',
+      }),
+      game('game-otters-3', 'otters', at(6, '18:30'), 'home', {
+        chooseBy: at(0, '18:00'),
+        due: { teach: at(5, '20:00') },
+        readKey: 'priya',
+      }),
+      game('game-lowmoor-2', 'lowmoor', at(8, '18:45'), 'away', {
+        chooseBy: at(7, '18:00'),
+        due: { read: at(2, '20:00') },
+      }),
+      game('game-tarn', 'tarn', at(11, '14:00'), 'home', { due: { scout: at(5, '20:00') } }),
     ],
     scoutedGames: [
       scouted('scout-gulls-1', 'gulls', 'Skerry Point Terns', 17, {
@@ -128,6 +185,21 @@ export function demoScenario(now: Date, timeZone: string): DemoScenario {
       scouted('scout-lowmoor-1', 'lowmoor', 'Wexcombe Larks', 6, {
         seen: 'film',
         coverage: { kind: 'minutes', from: 0, to: 32 },
+        scoutKey: 'priya',
+      }),
+      scouted('scout-lowmoor-2', 'lowmoor', 'Skerry Point Terns', 13, {
+        seen: 'film',
+        coverage: { kind: 'all' },
+        scoutKey: 'priya',
+      }),
+      scouted('scout-otters-1', 'otters', 'Tarn Valley', 52, {
+        seen: 'film',
+        coverage: { kind: 'all' },
+        scoutKey: 'tomas',
+      }),
+      scouted('scout-otters-2', 'otters', 'Dunholt Badgers', 12, {
+        seen: 'live',
+        coverage: { kind: 'all' },
         scoutKey: 'priya',
       }),
       scouted('scout-tarn-1', 'tarn', 'Ashdown Kestrels', 5, {

@@ -42,11 +42,14 @@ describe('the scenario as rows', () => {
     expect(demoScenario(new Date('2027-01-05T23:30:00Z'), DEMO_TIME_ZONE).possessions).toEqual(rows)
   })
 
-  it('holds four opponents, three of them ahead, and at least 90 scouted possessions', () => {
+  it('holds a season: 150 possessions over eight scouted games, and ours with counters called', () => {
     expect(scenario.opponents).toHaveLength(4)
     const ahead = scenario.games.filter((game) => Date.parse(game.tipOff) > NOW.getTime())
-    expect(ahead.map(({ opponentKey }) => opponentKey)).toEqual(['gulls', 'lowmoor', 'tarn'])
-    expect([gulls.length, of('lowmoor').length, of('tarn').length]).toEqual([58, 32, 5])
+    expect(ahead.map(({ opponentKey }) => opponentKey)).toEqual(['gulls', 'otters', 'lowmoor', 'tarn'])
+    expect(['gulls', 'lowmoor', 'otters', 'tarn'].map((key) => of(key).length)).toEqual([58, 52, 41, 5])
+    expect(scenario.scoutedGames).toHaveLength(8)
+    const called = new Set(rows.filter((row) => row.counterKey !== null).map((row) => row.gameKey))
+    expect(called.size).toBeGreaterThanOrEqual(2)
     expect(scenario.scoutedGames.filter(({ opponentKey }) => opponentKey === 'gulls')).toHaveLength(3)
   })
 
@@ -197,6 +200,38 @@ describe('what the Gulls do', () => {
     expect(JSON.stringify(pressed)).toContain('not-visible')
     expect(pressed.some(({ traps }) => traps === 'not-visible')).toBe(true)
     expect(count(pressed, (row) => row.throwerGuard === undefined)).toBeGreaterThan(2)
+  })
+})
+
+describe('what film adds', () => {
+  const film = rows.filter((row) => row.filmTime !== undefined)
+
+  it('is there for most rows, and the film runs forward', () => {
+    expect(film.length).toBeGreaterThan(150)
+    for (const game of new Set(film.map((row) => row.scoutedGameKey ?? row.gameKey))) {
+      const times = film
+        .filter((row) => (row.scoutedGameKey ?? row.gameKey) === game)
+        .map((row) => row.filmTime ?? 0)
+      expect(times).toEqual([...times].sort((a, b) => a - b))
+    }
+  })
+
+  it('agrees with itself: whoever traps or steals is on the floor, five of them', () => {
+    for (const row of film.filter(({ onFloor }) => onFloor)) {
+      expect(row.onFloor, row.key).toHaveLength(5)
+      const came = Array.isArray(row.traps) ? row.traps.flatMap(({ trappers }) => trappers ?? []) : []
+      const stole = typeof row.thief === 'number' ? [row.thief] : []
+      for (const number of [...came, ...stole]) expect(row.onFloor, row.key).toContain(number)
+    }
+  })
+
+  it('counts points where there was a shot, and theirs only after a live loss', () => {
+    for (const row of film) {
+      if (row.finish === 'lay-up') expect(row.points).toBe(2)
+      if (row.pointsAgainst != null) expect(row.outcome).toBe('lost-live')
+      if (row.points != null) expect(row.finish).toBeTruthy()
+    }
+    expect(film.some(({ pointsAgainst }) => (pointsAgainst ?? 0) > 0)).toBe(true)
   })
 })
 

@@ -75,6 +75,31 @@ export function lowmoorTrips(random: Random): Trip[] {
   ]
 }
 
+const AGAIN: Pressed[] = [
+  zone('made-basket', 'right', { end: 'through', open: ['middle'], over: { ...SAGGED, denied: [] } }),
+  zone('made-basket', 'left', { end: 'through', open: ['far-side'], over: SAGGED }),
+  zone('made-basket', 'right', { end: 'lost-live', at: 'backcourt', open: ['pass-back'] }, 'lost'),
+  zone('made-basket', null, { end: 'through', over: { ...SAGGED, denied: [] } }),
+  zone('made-basket', 'left', { end: 'through-with-numbers', open: ['middle'] }),
+  zone('made-free-throw', 'right', { end: 'through', open: ['middle'], over: { goalie: 'left-early' } }),
+  zone('made-free-throw', null, { end: 'through', over: { onBall: 'contained', handler: 'strong' } }),
+  zone('dead-ball', 'right', { end: 'through', open: ['middle', 'far-side'] }),
+  zone('dead-ball', null, { end: 'count', at: 'backcourt', over: { onBall: 'contained' } }),
+  zone('break', 'right', { end: 'through', open: ['middle'], over: { ...SAGGED, denied: [] } }),
+]
+
+/** Their game before, all of it from film: 20 rows, 10 of them pressed. */
+export function lowmoorEarlier(random: Random): Trip[] {
+  return [
+    ...AGAIN.map((told): Trip => [pressed(told, random)]),
+    ...LEFT.flatMap(([trigger, shape, count]) =>
+      Array.from({ length: Math.ceil(count / 2) }, (): Trip => [
+        unpressed(trigger, shape, 'through', random),
+      ]),
+    ),
+  ]
+}
+
 /** Two rows after the stretch that was covered: kept, never counted. */
 export function lowmoorAfter(random: Random): Trip[] {
   return [

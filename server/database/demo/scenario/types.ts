@@ -6,7 +6,12 @@ import type { ScoutedGameBody } from '@shared/scoutedGames/schemas'
 
 /** Rows of the scenario name each other by key; whoever writes them makes the ids. */
 export type DemoOpponent = z.input<typeof OpponentBody> & { key: string }
-export type DemoGame = Omit<z.input<typeof GameBody>, 'opponentId'> & { key: string; opponentKey: string }
+export type DemoGame = Omit<z.input<typeof GameBody>, 'opponentId'> & {
+  key: string
+  opponentKey: string
+  /** Key of the person who signed the read off, if somebody did. */
+  readKey: string | null
+}
 export type DemoScoutedGame = Omit<z.input<typeof ScoutedGameBody>, 'opponentId'> & {
   key: string
   opponentKey: string
