@@ -25,7 +25,9 @@ export async function copyDatabase(from: string, to: string): Promise<void> {
 
 /**
  * Takes out of a copy what a backup does not keep: who is signed in, links to new passwords, the words of
- * letters (they may hold a link too), and possessions whose time to be put back is over. What was taken out is gone from the file's bytes too, and the file needs no log beside it.
+ * letters (they may hold a link too), and rows whose time to be put back is over, with all that hangs on them and
+ * their history. A copy of an older database has not every table. What was taken out is gone from the file's
+ * bytes too, and the file needs no log beside it.
  */
 export function clearCopy(file: string, now: Date): void {
   withConnection(file, (connection) => {
@@ -33,16 +35,26 @@ export function clearCopy(file: string, now: Date): void {
     connection.pragma('foreign_keys = ON')
     connection.pragma('secure_delete = ON')
     connection.exec('DELETE FROM "sessions"')
-    connection.exec('DELETE FROM "password_resets"')
+    const has = columnsIn(connection)
+    if (has('password_resets', 'id')) connection.exec('DELETE FROM "password_resets"')
     // A restored letter has no words to leave with: what had not left yet is a failed one, for somebody to look at.
-    connection.exec(`UPDATE "mails" SET "text" = '', "html" = '',
-      "trouble" = CASE WHEN "state" IN ('waiting', 'sending', 'kept', 'failed') THEN '${WORDS_LOST}' ELSE "trouble" END,
-      "nextTryAt" = NULL,
-      "state" = CASE WHEN "state" IN ('waiting', 'sending', 'kept') THEN 'failed' ELSE "state" END`)
+    if (has('mails', 'state'))
+      connection.exec(`UPDATE "mails" SET "text" = '', "html" = '',
+        "trouble" = CASE WHEN "state" IN ('waiting', 'sending', 'kept', 'failed') THEN '${WORDS_LOST}' ELSE "trouble" END,
+        "nextTryAt" = NULL,
+        "state" = CASE WHEN "state" IN ('waiting', 'sending', 'kept') THEN 'failed' ELSE "state" END`)
     const until = undoUntil(now)
-    for (const sql of PURGE_STATEMENTS) connection.prepare(sql).run(...(sql.includes('?') ? [until] : []))
+    for (const { sql, needs } of PURGE_STATEMENTS)
+      if (needs.every(([table, column]) => has(table, column)))
+        connection.prepare(sql).run(...(sql.includes('?') ? [until] : []))
     connection.exec('VACUUM')
   })
+}
+
+/** Whether a database has a column. */
+function columnsIn(connection: Connection): (table: string, column: string) => boolean {
+  const find = connection.prepare('SELECT 1 FROM pragma_table_info(?) WHERE name = ?')
+  return (table, column) => find.get(table, column) !== undefined
 }
 
 /** What is wrong with a database file, in words; empty when nothing is. */

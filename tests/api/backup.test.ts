@@ -14,7 +14,7 @@ import { createDataSource, openDatabase } from '@server/database/dataSource'
 import { Possession } from '@server/database/entities/Possession'
 import { Still } from '@server/database/entities/Still'
 import { Trap } from '@server/database/entities/Trap'
-import { purgeDeleted } from '@server/features/possessions/deletion.service'
+import { purgeDeleted } from '@server/features/deletion/purge.service'
 import { jpeg, makeFixture, possessionBody, teamUrl, type Fixture } from '../support/fixture'
 import { startTestApp, TEAM, type TestApp } from '../support/testApp'
 

@@ -1,10 +1,7 @@
 import type { EntityManager } from 'typeorm'
-import { LIMITS } from '@shared/limits'
 import { Change } from '../../database/entities/Change'
+import { undoUntil } from '../../database/hanging'
 import { NotFound } from '../../http/problem'
-
-/** When a deletion that was made before it can no longer be undone. */
-const undoUntil = (now: Date) => new Date(now.getTime() - LIMITS.undoMinutes * 60_000).toISOString()
 
 /** Whether a row of any table of the team has this id and is there, or can still be put back. */
 async function isOfTeam(manager: EntityManager, teamId: string, id: string, now: Date): Promise<boolean> {

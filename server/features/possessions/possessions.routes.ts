@@ -84,7 +84,13 @@ export const possessionRoutes = ({ db, clock }: Context) => [
     action: 'scouting:write',
     params: OneRow,
     handle: async ({ caller, params, ifMatch }) => {
-      await deletePossession(db, { teamId: caller.teamId, id: params.id, ifMatch }, clock())
+      await deletePossession(db, {
+        teamId: caller.teamId,
+        id: params.id,
+        by: caller.personId,
+        now: clock(),
+        ifMatch,
+      })
       return gone()
     },
   }),
@@ -95,8 +101,9 @@ export const possessionRoutes = ({ db, clock }: Context) => [
     action: 'scouting:write',
     params: OneRow,
     response: PossessionRow,
-    handle: async ({ caller, params, ifMatch }) => {
-      const whole = await restorePossession(db, { teamId: caller.teamId, id: params.id, ifMatch }, clock())
+    handle: async ({ caller, params }) => {
+      const which = { teamId: caller.teamId, id: params.id, by: caller.personId, now: clock() }
+      const whole = await restorePossession(db, which)
       return ok(presentPossession(whole), whole.row.version)
     },
   }),
