@@ -65,20 +65,16 @@ export const PURGE_STATEMENTS: readonly PurgeStatement[] = [
       ['plans', 'deletedAt'],
     ],
   },
-  ...DELETABLE_TABLES.map(
-    (table): PurgeStatement => ({
-      sql: `DELETE FROM "${table}" WHERE "deletedAt" <= ?`,
-      needs: [[table, 'deletedAt']],
-    }),
-  ),
-  ...[...DELETABLE_TABLES, ...GOES_ALONG].map(
-    (table): PurgeStatement => ({
-      sql: `DELETE FROM "changes" WHERE "kind" = '${table}'
+  ...DELETABLE_TABLES.map((table): PurgeStatement => ({
+    sql: `DELETE FROM "${table}" WHERE "deletedAt" <= ?`,
+    needs: [[table, 'deletedAt']],
+  })),
+  ...[...DELETABLE_TABLES, ...GOES_ALONG].map((table): PurgeStatement => ({
+    sql: `DELETE FROM "changes" WHERE "kind" = '${table}'
                AND NOT EXISTS (SELECT 1 FROM "${table}" t WHERE t."id" = "changes"."rowId")`,
-      needs: [
-        ['changes', 'rowId'],
-        [table, 'id'],
-      ],
-    }),
-  ),
+    needs: [
+      ['changes', 'rowId'],
+      [table, 'id'],
+    ],
+  })),
 ]
