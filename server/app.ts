@@ -4,19 +4,25 @@ import { REQUEST_SERIALIZERS } from './adapters/log'
 import type { Context } from './context'
 import { choiceRoutes } from './features/choices/choices.routes'
 import { counterRoutes } from './features/counters/counters.routes'
+import { deletionRoutes } from './features/deletion/deletion.routes'
 import { gameRoutes } from './features/games/games.routes'
 import { historyRoutes } from './features/history/history.routes'
+import { mailRoutes } from './features/mail/mail.routes'
+import { opponentPlayerRoutes } from './features/opponents/opponentPlayers.routes'
 import { opponentRoutes } from './features/opponents/opponents.routes'
 import { planRoutes } from './features/plans/plans.routes'
 import { possessionRoutes } from './features/possessions/possessions.routes'
 import { ruleRoutes } from './features/rules/rules.routes'
 import { scoutedGameRoutes } from './features/scoutedGames/scoutedGames.routes'
-import { mountSession } from './features/session/session.routes'
+import { passwordLinkRoutes } from './features/session/passwordLink.routes'
+import { mountAccounts } from './features/session/session.routes'
 import { callerIn } from './features/session/session.service'
+import { handOutRoutes } from './features/sheets/handOut.routes'
 import { sheetRoutes } from './features/sheets/sheets.routes'
 import { squadRoutes } from './features/squad/squad.routes'
 import { stillRoutes } from './features/stills/stills.routes'
 import { tendencyRoutes } from './features/tendencies/tendencies.routes'
+import { weekRoutes } from './features/week/week.routes'
 import { notTooDeep } from './http/depth'
 import { mount, type Endpoint } from './http/endpoint'
 import { health } from './http/health'
@@ -38,10 +44,16 @@ export const endpointsOf = (context: Context): Endpoint[] => [
   ...ruleRoutes(context),
   ...squadRoutes(context),
   ...gameRoutes(context),
+  ...weekRoutes(context),
   ...choiceRoutes(context),
   ...planRoutes(context),
   ...sheetRoutes(context),
+  ...handOutRoutes(context),
+  ...mailRoutes(context),
+  ...passwordLinkRoutes(context),
   ...historyRoutes(context),
+  ...deletionRoutes(context),
+  ...opponentPlayerRoutes(context),
 ]
 
 /** The whole HTTP side but the client's files; the same for tests and for production. */
@@ -72,7 +84,7 @@ export function createApp(context: Context): Express {
   const description = describeApi(endpoints)
   api.get('/openapi.json', (_req, res) => void res.json(description))
   api.use(middleware)
-  mountSession(api, context, passport)
+  mountAccounts(api, context, passport)
   for (const spec of endpoints)
     mount(api, spec, (req, teamId) =>
       req.user ? callerIn(context.db, req.user, teamId) : Promise.resolve(null),

@@ -9,6 +9,8 @@ import {
   scoutedGameBody,
   type Fixture,
 } from '../support/fixture'
+import { Mail } from '@server/database/entities/Mail'
+import { Membership } from '@server/database/entities/Membership'
 import { Person } from '@server/database/entities/Person'
 import { OTHER_TEAM, PLAYER, startTestApp, TEAM, type Agent, type TestApp } from '../support/testApp'
 import { DEMO_RULES } from '@server/database/demo/rules'
@@ -132,6 +134,7 @@ const TABLE: Record<string, Row> = {
     body: (rows) => gameBody(rows.opponent),
     bad: { body: { tipOff: '20.3.2026' }, field: 'tipOff' },
   },
+  'get /week': { at: () => ({}), success: 200, bad: { query: 'on=monday', field: 'on' } },
   'post /games/{id}/hand-on': {
     at: rowsOf.game,
     headOnly: true,
@@ -174,6 +177,15 @@ const TABLE: Record<string, Row> = {
   },
   'get /changes': { at: () => ({}), success: 200, bad: { query: 'since=yesterday', field: 'since' } },
   'delete /possessions/{id}': { at: rowsOf.possession, success: 204, bad: badId },
+  'get /mails': { at: () => ({}), success: 200, bad: { query: 'state=lost', field: 'state' } },
+  'post /mails/{id}/again': { at: (rows) => ({ id: placesOf(rows).again }), success: 200, bad: badId },
+  'post /mails/{id}/withdraw': { at: (rows) => ({ id: placesOf(rows).withdraw }), success: 200, bad: badId },
+  'post /members/{id}/password-link': {
+    at: (rows) => ({ id: placesOf(rows).member }),
+    headOnly: true,
+    success: 200,
+    bad: badId,
+  },
 }
 
 /** Rows that change what later rows need go last, and in this order. */
@@ -189,10 +201,37 @@ let own: Fixture
 let other: Fixture
 let headId = ''
 
+/** Of each team: two letters that wait, and somebody's membership. */
+const places = new Map<string, { again: string; withdraw: string; member: string }>()
+const placesOf = ({ game }: Fixture) => places.get(game) ?? { again: '', withdraw: '', member: '' }
+
+async function addPlaces({ game }: Fixture, teamId: string, name: string): Promise<void> {
+  const { manager } = test.context.db
+  const ids = { again: randomUUID(), withdraw: randomUUID() }
+  for (const id of Object.values(ids))
+    await manager.insert(Mail, {
+      id,
+      teamId,
+      kind: 'invitation',
+      onceKey: id,
+      recipient: 'someone@club.example',
+      subject: 'Join us',
+      text: 'Join us',
+      html: '<p>Join us</p>',
+      state: 'failed',
+      createdAt: test.context.clock().toISOString(),
+    })
+  const { id: personId } = await manager.findOneByOrFail(Person, { name })
+  const { id: member } = await manager.findOneByOrFail(Membership, { personId, teamId })
+  places.set(game, { ...ids, member })
+}
+
 beforeAll(async () => {
-  test = await startTestApp()
+  test = await startTestApp({ mail: { send: () => Promise.resolve(), close: () => undefined } })
   own = await makeFixture(test)
   other = await makeFixture(test, OTHER_TEAM)
+  await addPlaces(own, TEAM, 'Test assistant')
+  await addPlaces(other, OTHER_TEAM, 'Test otherHead')
   headId = (await test.context.db.manager.findOneByOrFail(Person, { name: 'Test head' })).id
 }, 60_000)
 afterAll(() => test.stop())

@@ -48,7 +48,7 @@ export async function presentGames(
       staff: byId,
       scoutId: scouts.get(game.opponentId) ?? null,
       handedOn: handOns.get(game.id) ?? null,
-      readBy: (game.readById && readers.get(game.readById)) ?? null,
+      readBy: readers.get(game.readById ?? '') ?? null,
       caller,
     }
     return presentGame(game, facts, now)
