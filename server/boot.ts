@@ -17,6 +17,7 @@ import { Person } from './database/entities/Person'
 import { carryMail } from './features/mail/carrier'
 import { forgetOldMail } from './features/mail/oldMail'
 import { purgeDeleted } from './features/deletion/purge.service'
+import { forgetOldLinks } from './features/session/passwordReset.service'
 import { SESSION_MS } from './http/passport'
 import { SessionStore } from './http/sessionStore'
 
@@ -84,6 +85,7 @@ export function startHousekeeping(context: Context): () => void {
     await purgeDeleted(context.db, context.stillFiles, context.clock())
     await sessions.sweep()
     await pruneBackups(context.config, context.clock())
+    await forgetOldLinks(context)
     await forgetOldMail(context.db, context.clock())
     await carryMail(context)
   }

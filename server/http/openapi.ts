@@ -1,47 +1,8 @@
-import { z } from 'zod'
+import type { z } from 'zod'
 import { Problem } from '@shared/http/common'
-import { Condition } from '@shared/rules/schemas'
-import { Session, SignIn } from '@shared/session/schemas'
 import type { Endpoint } from './endpoint'
-
-type Json = Record<string, unknown>
-type Io = 'input' | 'output'
-
-/** Schemas that contain themselves stand once among the components, under these names. */
-const NAMES = z.registry<{ id: string }>()
-NAMES.add(Condition, { id: 'Condition' })
-
-/** Zod's schemas as JSON Schema, and what they refer to by name, gathered for the components. */
-class Schemas {
-  readonly named: Json = {}
-
-  of(schema: z.ZodType, io: Io): Json {
-    const options = { io, metadata: NAMES, unrepresentable: 'any', target: 'draft-2020-12' } as const
-    const { $schema: _dialect, $defs = {}, ...rest } = z.toJSONSchema(schema, options) as Json
-    for (const [id, definition] of Object.entries($defs as Json)) {
-      if (id.startsWith('__')) throw new Error('a schema that contains itself has no name in the description')
-      this.named[nameOf(id, io)] = pointed(definition, io)
-    }
-    return pointed(rest, io)
-  }
-}
-
-/** A default makes a field optional in what is sent and sure in what is answered: two schemas. */
-const nameOf = (id: string, io: Io): string => (io === 'input' ? `${id}Input` : id)
-
-/** References into a schema's own definitions, turned to the components of the whole description. */
-function pointed(schema: unknown, io: Io): Json {
-  return JSON.parse(JSON.stringify(schema), (key, value: unknown) => {
-    if (key !== '$ref' || typeof value !== 'string') return value
-    return `#/components/schemas/${nameOf(value.replace('#/$defs/', ''), io)}`
-  }) as Json
-}
-
-const json = (schema: Json): Json => ({ 'application/json': { schema } })
-const problem = (description: string): Json => ({
-  description,
-  content: { 'application/problem+json': { schema: { $ref: '#/components/schemas/Problem' } } },
-})
+import { accountPaths } from './openapiAccounts'
+import { json, problem, Schemas, type Json } from './openapiSchemas'
 
 /** Parameters of a path or a query, one by one. */
 function parameters(schemas: Schemas, schema: z.ZodType | undefined, place: 'path' | 'query'): Json[] {
@@ -131,33 +92,10 @@ function operation(schemas: Schemas, spec: Endpoint): Json {
   }
 }
 
-const sessionPaths = (schemas: Schemas): Record<string, Json> => ({
-  '/session': {
-    get: {
-      summary: 'Who is signed in and what they may do',
-      responses: {
-        '200': { description: 'Done', content: json(schemas.of(Session, 'output')) },
-        '401': problem('Not signed in'),
-      },
-    },
-    post: {
-      summary: 'Sign in',
-      requestBody: { required: true, content: json(schemas.of(SignIn, 'input')) },
-      responses: {
-        '201': { description: 'Signed in', content: json(schemas.of(Session, 'output')) },
-        '400': problem('A field is at fault'),
-        '401': problem('Address and password do not fit'),
-        '429': problem('Too many tries'),
-      },
-    },
-    delete: { summary: 'Sign out', responses: { '204': { description: 'Done' } } },
-  },
-})
-
 /** The API's description in OpenAPI 3.1, from the same values that mount it. */
 export function describeApi(endpoints: readonly Endpoint[]): Json {
   const schemas = new Schemas()
-  const paths = sessionPaths(schemas)
+  const paths = accountPaths(schemas)
   for (const spec of endpoints) {
     const path = spec.path.replace(/:(\w+)/g, '{$1}')
     paths[path] = { ...paths[path], [spec.method]: operation(schemas, spec) }

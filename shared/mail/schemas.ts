@@ -1,4 +1,5 @@
 import { z } from 'zod'
+import { LIMITS } from '../limits'
 import { Paper } from '../sheets/schemas'
 
 export const MAIL_KINDS = ['invitation', 'new-password', 'sheet', 'sheet-recalled'] as const
@@ -39,3 +40,10 @@ export const MailList = z.object({
   server: z.boolean(),
 })
 export type MailList = z.infer<typeof MailList>
+
+/** Letters on the staff's page: one state or all, newest first. */
+export const MailQuery = z.object({
+  state: z.enum(MAIL_STATES).optional(),
+  limit: z.coerce.number().int().min(1).max(LIMITS.pageRows).default(50),
+  offset: z.coerce.number().int().min(0).default(0),
+})

@@ -1,3 +1,4 @@
+import type { Account } from '@shared/session/account'
 import type { Session, SessionTeam } from '@shared/session/schemas'
 import type { Membership } from '../../database/entities/Membership'
 import type { Team } from '../../database/entities/Team'
@@ -22,13 +23,28 @@ const presentTeam = (membership: Membership & { team: Team }): SessionTeam => ({
   squadPlayerId: membership.squadPlayerId,
 })
 
+const hasTeam = (membership: Membership): membership is Membership & { team: Team } => membership.team != null
+
+const byName = (a: { name: string; squadName: string }, b: { name: string; squadName: string }): number =>
+  a.name.localeCompare(b.name) || a.squadName.localeCompare(b.squadName)
+
+/** What a person may see and change of their own account. */
+export const presentAccount = (
+  { name, email }: { name: string; email: string },
+  memberships: Membership[],
+): Account => ({
+  name,
+  email,
+  teams: memberships
+    .filter(hasTeam)
+    .map(({ team, role, mail }) => ({ id: team.id, name: team.name, squadName: team.squadName, role, mail }))
+    .sort(byName),
+})
+
 /** Who is signed in and what they may do, team by team. */
 export function presentSession(person: { id: string; name: string }, memberships: Membership[]): Session {
   return {
     person: { id: person.id, name: person.name, initials: initialsOf(person.name) },
-    teams: memberships
-      .filter((membership): membership is Membership & { team: Team } => membership.team != null)
-      .map(presentTeam)
-      .sort((a, b) => a.name.localeCompare(b.name) || a.squadName.localeCompare(b.squadName)),
+    teams: memberships.filter(hasTeam).map(presentTeam).sort(byName),
   }
 }

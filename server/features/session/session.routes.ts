@@ -2,25 +2,32 @@ import type { Router } from 'express'
 import type { PassportStatic } from 'passport'
 import { SignIn } from '@shared/session/schemas'
 import type { Context } from '../../context'
-import { faultsOf } from '../../http/faults'
 import { SESSION_COOKIE, type SignedIn } from '../../http/passport'
-import { BadInput, NotSignedIn } from '../../http/problem'
+import { NotSignedIn } from '../../http/problem'
+import { readBody } from '../../http/readBody'
 import { signInLimits } from '../../http/signInLimits'
+import { mountAccount } from './account.routes'
+import { mountPasswordResets } from './passwordReset.routes'
 import { describeSession } from './session.service'
 
 type Passport = Pick<PassportStatic, 'authenticate'>
 
+/** What people do with their own accounts, signed in or not: below /session and /password-resets. */
+export function mountAccounts(router: Router, context: Context, passport: Passport): void {
+  mountSession(router, context, passport)
+  mountAccount(router, context)
+  mountPasswordResets(router, context)
+}
+
 /** GET, POST and DELETE /session: who I am, sign in (a new session id each time), sign out. */
-export function mountSession(router: Router, context: Context, passport: Passport): void {
+function mountSession(router: Router, context: Context, passport: Passport): void {
   router.get('/session', async (req, res) => {
     if (!req.user) throw new NotSignedIn()
     res.json(await describeSession(context.db, req.user))
   })
 
   router.post('/session', ...signInLimits(), (req, res, next) => {
-    const parsed = SignIn.safeParse(req.body ?? {}, { reportInput: true })
-    if (!parsed.success) throw new BadInput(faultsOf(parsed.error))
-    req.body = parsed.data
+    req.body = readBody(SignIn, req)
     const authenticate = passport.authenticate('local', (error: unknown, person: SignedIn | false) => {
       if (error) return next(error)
       if (!person) return next(new NotSignedIn('Mail address and password do not fit. Check both.'))
