@@ -77,6 +77,7 @@ function casing(curve: Curve, kind: MovementKind, weight: number, pen: Pen): Sce
   ]
 }
 
+/** Ours ends in a filled arrow, theirs in an open diamond, so that a grey copy tells them apart. */
 function arrowHead(curve: Curve, head: number, pen: Pen, ink: Ink): PathNode {
   const tip = endOf(curve)
   const { point: base } = pointAt(curve, lengthOf(curve) - head)
@@ -84,14 +85,19 @@ function arrowHead(curve: Curve, head: number, pen: Pen, ink: Ink): PathNode {
   const along = { x: (tip.x - base.x) / length, y: (tip.y - base.y) / length }
   const half = pen.px(HEAD_HALF * pen.k)
   const back = { x: tip.x - along.x * head, y: tip.y - along.y * head }
+  const wings = (at: Point): [Point, Point] => [
+    { x: at.x - along.y * half, y: at.y + along.x * half },
+    { x: at.x + along.y * half, y: at.y - along.x * half },
+  ]
+  if (ink !== 'their') return { kind: 'path', d: polygonD(tip, ...wings(back)), fill: ink }
+  const [left, right] = wings({ x: (tip.x + back.x) / 2, y: (tip.y + back.y) / 2 })
   return {
     kind: 'path',
-    d: polygonD(
-      tip,
-      { x: back.x - along.y * half, y: back.y + along.x * half },
-      { x: back.x + along.y * half, y: back.y - along.x * half },
-    ),
-    fill: ink,
+    d: polygonD(tip, left, back, right),
+    fill: 'floor',
+    stroke: ink,
+    strokeWidth: pen.px(1.3),
+    join: 'miter',
   }
 }
 
