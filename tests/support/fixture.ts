@@ -12,6 +12,7 @@ import { TEAM, type Agent, type TestApp } from './testApp'
 /** Ids of one of everything in a team, made through the API where the API can. */
 export interface Fixture {
   opponent: string
+  opponentPlayer: string
   scoutedGame: string
   possession: string
   still: string
@@ -109,6 +110,7 @@ export async function makeFixture(test: TestApp, teamId = TEAM): Promise<Fixture
   await seedSquad(head, teamId)
   const ids = {
     opponent: randomUUID(),
+    opponentPlayer: randomUUID(),
     scoutedGame: randomUUID(),
     possession: randomUUID(),
     still: randomUUID(),
@@ -118,6 +120,12 @@ export async function makeFixture(test: TestApp, teamId = TEAM): Promise<Fixture
   }
   const url = (path: string) => teamUrl(path, teamId)
   await expectStatus(head.put(url(`/opponents/${ids.opponent}`)).send(opponentBody()), 201)
+  await expectStatus(
+    head
+      .put(url(`/opponent-players/${ids.opponentPlayer}`))
+      .send({ opponentId: ids.opponent, jersey: 12, does: ['thief'] }),
+    201,
+  )
   await expectStatus(
     head.put(url(`/scouted-games/${ids.scoutedGame}`)).send(scoutedGameBody(ids.opponent)),
     201,

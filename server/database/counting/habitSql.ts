@@ -1,5 +1,6 @@
 import { RULE_PACKS } from '@shared/court/rulePacks'
 import { SPOT_CELLS } from '@shared/court/trapSpots'
+import { FORCED_SIDES } from '@shared/filmWords'
 import { HABITS } from '@shared/tendencies/habits'
 import { DENIED, GOT_OUT, LANES, NOT_PRESSED, SHAPES, SHAPE_VARIANTS, TRAP_CUES } from '@shared/vocabulary'
 import {
@@ -46,6 +47,7 @@ const FIELDS = [
   'goalie',
   'shownShape',
   'crossedAt',
+  'forcedSide',
 ]
 
 /**
@@ -107,6 +109,8 @@ for (const { value, parent } of SHAPE_VARIANTS)
   }
 for (const { value } of DENIED)
   SQL[`deny:${value}`] = { n: and(PRESSED, seen('p.denied')), k: holds('p.denied', value) }
+for (const { value } of FORCED_SIDES)
+  SQL[`forced:${value}`] = { n: and(PRESSED, seen('p.forcedSide')), k: is('p.forcedSide', value) }
 for (const { value } of TRAP_CUES)
   SQL[`cue:${value}`] = { n: and(TRAPPED, seen('p.cue')), k: is('p.cue', value) }
 for (const { value } of LANES)

@@ -40,13 +40,14 @@ export async function countOpponents(
     [...scope, ...scope],
   )
   const games: { opponentId: string; scoutedGames: number }[] = await manager.query(
-    `SELECT opponentId, count(*) AS scoutedGames FROM scouted_games g WHERE teamId = ? ${onlyOf('g')} GROUP BY opponentId`,
+    `SELECT opponentId, count(*) AS scoutedGames FROM scouted_games g
+      WHERE teamId = ? ${onlyOf('g')} AND deletedAt IS NULL GROUP BY opponentId`,
     scope,
   )
   const meetings: { opponentId: string; id: string; tipOff: string; place: 'home' | 'away' | 'neutral' }[] =
     await manager.query(
       `SELECT opponentId, id, min(tipOff) AS tipOff, place FROM games g
-        WHERE teamId = ? ${onlyOf('g')} AND tipOff >= ? GROUP BY opponentId`,
+        WHERE teamId = ? ${onlyOf('g')} AND tipOff >= ? AND deletedAt IS NULL GROUP BY opponentId`,
       [...scope, now.toISOString()],
     )
   const result = new Map<string, OpponentCounts>()

@@ -1,4 +1,4 @@
-import type { EntityManager } from 'typeorm'
+import { IsNull, type EntityManager } from 'typeorm'
 import type { CounterRow } from '@shared/counters/schemas'
 import { countRecords } from '../../database/counting/records'
 import { Counter } from '../../database/entities/Counter'
@@ -7,7 +7,9 @@ import { bodyOfCounter, presentCounter } from './counters.presenter'
 
 /** The team's library by name, with our own record of each; one that can no longer be read is left out. */
 export async function listCounters(manager: EntityManager, teamId: string): Promise<CounterRow[]> {
-  const rows = await manager.getRepository(Counter).find({ where: { teamId }, order: { name: 'ASC' } })
+  const rows = await manager
+    .getRepository(Counter)
+    .find({ where: { teamId, deletedAt: IsNull() }, order: { name: 'ASC' } })
   const cells = await countRecords(manager, teamId)
   return rows.flatMap((row) => {
     const body = bodyOfCounter(row)

@@ -1,4 +1,4 @@
-import type { DataSource, EntityManager } from 'typeorm'
+import { IsNull, type DataSource, type EntityManager } from 'typeorm'
 import type { OpponentBody } from '@shared/opponents/schemas'
 import { Opponent } from '../../database/entities/Opponent'
 import { putRow, type Put } from '../../database/putRow'
@@ -7,7 +7,9 @@ import { presentOpponent } from './opponents.presenter'
 
 /** Opponents of a team with what is counted of each; next meeting first, then by name. */
 export async function listOpponents(db: DataSource, teamId: string, now: Date) {
-  const rows = await db.getRepository(Opponent).find({ where: { teamId }, order: { name: 'ASC' } })
+  const rows = await db
+    .getRepository(Opponent)
+    .find({ where: { teamId, deletedAt: IsNull() }, order: { name: 'ASC' } })
   const counts = await countOpponents(db.manager, teamId, now)
   return rows
     .map((row) => presentOpponent(row, counts.get(row.id)))

@@ -1,5 +1,5 @@
 import { isDeepStrictEqual } from 'node:util'
-import { In, type DataSource, type EntityManager } from 'typeorm'
+import { In, IsNull, type DataSource, type EntityManager } from 'typeorm'
 import type { PlanBody, PlanState } from '@shared/plans/schemas'
 import { Counter } from '../../database/entities/Counter'
 import { Game } from '../../database/entities/Game'
@@ -14,7 +14,7 @@ import { bodyOfPlan, presentPlan } from './plans.presenter'
 const versionsOf = (manager: EntityManager, gameId: string): Promise<Plan[]> =>
   manager
     .getRepository(Plan)
-    .find({ where: { gameId }, relations: { signedBy: true }, order: { number: 'ASC' } })
+    .find({ where: { gameId, deletedAt: IsNull() }, relations: { signedBy: true }, order: { number: 'ASC' } })
 
 /** The newest version and the list of all. @throws NotFound */
 export async function planState(
@@ -42,7 +42,10 @@ async function checkNamed(manager: EntityManager, teamId: string, body: PlanBody
       ...body.roles.map((role) => role.counterId),
     ].filter((id) => id !== null),
   )
-  if ((await manager.getRepository(Counter).countBy({ teamId, id: In([...counters]) })) < counters.size)
+  if (
+    (await manager.getRepository(Counter).countBy({ teamId, id: In([...counters]), deletedAt: IsNull() })) <
+    counters.size
+  )
     throw new NotFound('counter')
   const players = new Set(body.roles.map((role) => role.squadPlayerId))
   if ((await manager.getRepository(SquadPlayer).countBy({ teamId, id: In([...players]) })) < players.size)

@@ -1,4 +1,4 @@
-import type { DataSource, EntityManager } from 'typeorm'
+import { IsNull, type DataSource, type EntityManager } from 'typeorm'
 import type { ScoutedGameBody, ScoutedGameRow } from '@shared/scoutedGames/schemas'
 import { PRESSED } from '../../database/counting/expressions'
 import { scoutedGameColumns } from '../../database/columnsOf'
@@ -31,7 +31,7 @@ export async function listScoutedGames(
 ): Promise<ScoutedGameRow[]> {
   await findInTeam(db.manager, Opponent, teamId, opponentId, 'opponent')
   const rows = await db.getRepository(ScoutedGame).find({
-    where: { teamId, opponentId },
+    where: { teamId, opponentId, deletedAt: IsNull() },
     relations: { scout: true },
     order: { playedOn: 'DESC', createdAt: 'DESC' },
   })

@@ -1,9 +1,10 @@
 import { createHash } from 'node:crypto'
-import type { DataSource, EntityManager } from 'typeorm'
+import { IsNull, type DataSource, type EntityManager } from 'typeorm'
 import { LIMITS } from '@shared/limits'
 import type { StillFields } from '@shared/stills/schemas'
 import { PictureRefused, preparePicture } from '../../adapters/pictures'
 import type { StillFiles } from '../../adapters/stillFiles'
+import { Possession } from '../../database/entities/Possession'
 import { Still } from '../../database/entities/Still'
 import { findInTeam } from '../../database/findInTeam'
 import { BadInput, Conflict, NotFound } from '../../http/problem'
@@ -127,6 +128,10 @@ export function deleteStill(
   })
 }
 
-/** The still of an id, for serving its file. @throws NotFound */
-export const findStill = (db: DataSource, teamId: string, id: string): Promise<Still> =>
-  findInTeam(db.manager, Still, teamId, id, 'still')
+/** The still of an id, for serving its file. @throws NotFound, also when its possession was deleted */
+export async function findStill(db: DataSource, teamId: string, id: string): Promise<Still> {
+  const still = await findInTeam(db.manager, Still, teamId, id, 'still')
+  const there = await db.manager.existsBy(Possession, { id: still.possessionId, deletedAt: IsNull() })
+  if (!there) throw new NotFound('still')
+  return still
+}
