@@ -1,5 +1,8 @@
 import { describe, expect, it } from 'vitest'
-import { FOOT, INCH, rulePack, type RulePackKey } from '@shared/court/rulePacks'
+import { courtLines } from '@shared/court/courtLines'
+import { toMetres } from '@shared/court/frame'
+import { penOf } from '@shared/court/pen'
+import { FOOT, INCH, RulePackKey, rulePack } from '@shared/court/rulePacks'
 import {
   arcHalfAngle,
   arcMeetsLine,
@@ -7,6 +10,7 @@ import {
   freeThrowToBasket,
   freeThrowToBoard,
 } from '@shared/court/relations'
+import { pathsOf } from '../shared/court/sceneParts'
 
 /** Courts and counts against CHECKS.md 'Court and time'. Each row names where its value was read. */
 const feet = (metres: number) => metres / FOOT
@@ -94,7 +98,73 @@ describe('relations between lines (own arithmetic, recomputed)', () => {
   it('diagonals: 31.7648 m, 97.7548 ft on 84 ft, 106.4707 ft on 94 ft', () => {
     expect(diagonal(rulePack('fiba'))).toBeCloseTo(31.7648, 4)
     expect(feet(diagonal(rulePack('nfhs84')))).toBeCloseTo(97.7548, 4)
-    expect(feet(diagonal(rulePack('nba')))).toBeCloseTo(106.4707, 4)
+    for (const key of ['nfhs94', 'ncaa', 'nba'] as const)
+      expect(feet(diagonal(rulePack(key)))).toBeCloseTo(106.4707, 4)
+  })
+})
+
+describe('what is drawn is what the books say', () => {
+  /** The numbers of every path of a court's drawing, by the letters before them. */
+  const drawn = (key: RulePackKey) => {
+    const pack = rulePack(key)
+    const paths = pathsOf([courtLines(pack, penOf(26))]).map(({ d }) => d)
+    const arcs = paths.flatMap((d) => [...d.matchAll(/A([\d.]+) /g)].map(([, r]) => Number(r)))
+    return { pack, paths, arcs }
+  }
+
+  it.each(RulePackKey.options)('%s: circles, arcs and rings with their radii, each at both ends', (key) => {
+    const { pack, arcs } = drawn(key)
+    const count = (radius: number) => arcs.filter((r) => Math.abs(r - radius) < 1e-3).length
+    // A whole circle is two arcs: the centre circle, and a half circle on each free-throw line.
+    expect(count(pack.centreCircle)).toBe(4)
+    expect(count(pack.threePoint.radius)).toBe(2)
+    expect(count(pack.ringRadius)).toBe(4)
+    if (pack.noCharge !== null) expect(count(pack.noCharge)).toBe(2)
+    expect(arcs).toHaveLength(10 + (pack.noCharge === null ? 0 : 2))
+  })
+
+  it.each(RulePackKey.options)(
+    '%s: the three-point arc leaves its straight lines on the arc itself',
+    (key) => {
+      const { pack, paths } = drawn(key)
+      const threes = paths.filter((d) => d.includes(`A${Math.round(pack.threePoint.radius * 1e4) / 1e4} `))
+      expect(threes).toHaveLength(2)
+      threes.forEach((d, end) => {
+        const [, inset = NaN, meets = NaN] = (d.match(/-?[\d.]+/g) ?? []).map(Number)
+        const basket = end === 0 ? pack.basket : pack.court.length - pack.basket
+        expect(inset).toBeCloseTo(pack.threePoint.cornerInset, 3)
+        expect(Math.hypot(meets - basket, inset - pack.court.width / 2)).toBeCloseTo(
+          pack.threePoint.radius,
+          3,
+        )
+      })
+    },
+  )
+
+  it.each(RulePackKey.options)(
+    '%s: lane, free-throw line, board and half-court line in their places',
+    (key) => {
+      const { pack, paths } = drawn(key)
+      const { length, width } = pack.court
+      const at = (value: number) => String(Math.round(value * 1e4) / 1e4)
+      const edges = [(width - pack.laneWidth) / 2, (width + pack.laneWidth) / 2].map(at)
+      for (const line of [pack.freeThrowLine, length - pack.freeThrowLine])
+        expect(paths.some((d) => d.includes(`${edges[0]}H${at(line)}V${edges[1]}`))).toBe(true)
+      for (const face of [pack.board.face, length - pack.board.face])
+        expect(
+          paths.some((d) => d.startsWith(`M${at(face)} ${at((width - pack.board.width) / 2)}L${at(face)} `)),
+        ).toBe(true)
+      expect(paths).toContain(`M${at(length / 2)} 0L${at(length / 2)} ${at(width)}`)
+      expect(paths).toContain(`M0 0H${at(length)}V${at(width)}H0Z`)
+    },
+  )
+
+  it('a diagram keeps its meaning on every court: the foul line is the foul line', () => {
+    for (const key of RulePackKey.options) {
+      const pack = rulePack(key)
+      expect(toMetres(pack, { x: 0.207, y: 0.5 }).x).toBeCloseTo(pack.freeThrowLine, 9)
+      expect(toMetres(pack, { x: 0.5, y: 0.5 }).x).toBeCloseTo(pack.court.length / 2, 9)
+    }
   })
 })
 
@@ -115,6 +185,10 @@ describe('counts', () => {
       expect(feet(rule?.within ?? 0)).toBeCloseTo(6, 9)
     }
     expect(rulePack('nba').closelyGuarded).toBeNull()
+  })
+  it('the backcourt count starts at the touch in FIBA, NCAA and NBA and at control in NFHS (from memory)', () => {
+    for (const key of ['fiba', 'ncaa', 'nba'] as const) expect(rulePack(key).countStarts).toBe('touch')
+    for (const key of ['nfhs84', 'nfhs94'] as const) expect(rulePack(key).countStarts).toBe('control')
   })
   it('FIBA gives no time-out once the thrower has the ball (from memory; DOMAIN.md section 4, rule 8)', () => {
     expect(rulePack('fiba').timeOutWhileThrowing).toBe(false)
