@@ -8,7 +8,7 @@ declare module 'vue-router' {
     /** Needs nobody signed in. */
     open?: boolean
     /** The word of the main nav that this page belongs to. */
-    section?: 'opponents' | 'library' | 'squad' | 'sheets'
+    section?: 'week' | 'opponents' | 'library' | 'squad' | 'sheets'
     /** `match`: the page fills the bar's middle itself; `none`: the page has no bar of ours at all. */
     bar?: 'match' | 'none'
     /** Without this right the page shows who can instead. */
@@ -19,6 +19,12 @@ declare module 'vue-router' {
 /** Pages of one team, below /t/:team. Every view is fetched when it is first opened. */
 const teamPages: RouteRecordRaw[] = [
   { path: '', name: 'team-home', component: () => import('@/views/shell/NotFoundView.vue') },
+  {
+    path: 'week',
+    name: 'week',
+    component: () => import('@/views/week/WeekView.vue'),
+    meta: { title: 'This week', section: 'week', needs: 'game:read' },
+  },
   {
     path: 'opponents',
     name: 'opponents',
@@ -42,6 +48,13 @@ const teamPages: RouteRecordRaw[] = [
     name: 'log',
     component: () => import('@/views/possessions/LogView.vue'),
     props: true,
+    meta: { title: 'Log', section: 'opponents', bar: 'match', needs: 'scouting:write' },
+  },
+  {
+    path: 'games/:game/log',
+    name: 'game-log',
+    component: () => import('@/views/possessions/LogView.vue'),
+    props: (to) => ({ game: to.params.game, ours: true }),
     meta: { title: 'Log', section: 'opponents', bar: 'match', needs: 'scouting:write' },
   },
   {

@@ -1,10 +1,11 @@
 import { toMetres } from '@shared/court/frame'
 import { labelNodes, labelSize, placeLabels, type Label } from '@shared/court/labels'
-import { lineD, polygonD, type Box, type Point } from '@shared/court/path'
+import { circleD, lineD, polygonD, type Box, type Point } from '@shared/court/path'
 import { penOf, type Pen } from '@shared/court/pen'
 import type { RulePack } from '@shared/court/rulePacks'
 import type { GroupNode, Scene, SceneNode } from '@shared/court/scene'
 import { CAP_HEIGHT } from '@shared/court/textWidth'
+import { NOT_VISIBLE } from '@shared/vocabulary'
 import { trapTapScene } from '@shared/court/trapTapScene'
 import { secondsWords } from './clockWords'
 import { trapsOf, type Draft } from './draft'
@@ -61,11 +62,26 @@ export function logScene(
       ...base.nodes,
       edgeRuler(pack, draft, pen, widthPx < 500 ? 12.5 : 14),
       ...wayBetween(places, half, pen),
+      ...caughtAt(pack, draft, pen),
       ...places.map((at, index) => diamond(at, index, half, openTrap === index, pen)),
       { kind: 'group', id: 'trap-words', nodes: shown.flatMap((label) => labelNodes(label, pen.px(4))) },
     ],
     description: `${base.description}${traps.map((trap, index) => ` Trap ${index + 1}: ${trapWords(trap).word}.`).join('')}`,
   }
+}
+
+/** Where the throw-in was caught: a ring in a third team's ink, since their opponent there is not us. */
+function caughtAt(pack: RulePack, draft: Draft, pen: Pen): SceneNode[] {
+  if (draft.entrySpot === null || draft.entrySpot === NOT_VISIBLE) return []
+  const at = toMetres(pack, draft.entrySpot)
+  const ring = (radius: number): SceneNode => ({
+    kind: 'path',
+    d: circleD(at, pen.px(radius)),
+    fill: 'floor',
+    stroke: radius > 9 ? 'floor' : 'graphite',
+    strokeWidth: pen.px(2),
+  })
+  return [ring(11), ring(7)]
 }
 
 function besides(at: Point, half: number, width: number, height: number, pen: Pen): Point[] {

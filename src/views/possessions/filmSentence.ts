@@ -1,3 +1,4 @@
+import { FORCED_SIDES } from '@shared/filmWords'
 import { DENIED, labelOf, LANES, NOT_VISIBLE, SHAPES, type Term } from '@shared/vocabulary'
 import { secondsWords } from './clockWords'
 import type { Draft } from './draft'
@@ -8,7 +9,7 @@ import { HANDLER_WORDS, listWords, ON_BALL_WORDS, THROWER_WORDS } from './words'
 
 type Clause = (told: Teller) => void
 
-/** What film added, in short sentences after the first one. Only what is said or open stands there. */
+/** What film added about the press, in short sentences after the first one. Only what is said or open stands there. */
 export function filmParts(told: Teller, draft: Draft): void {
   const they = [
     throwerClause(told, draft),
@@ -34,6 +35,7 @@ export function filmParts(told: Teller, draft: Draft): void {
       ink: 'our',
     }),
     onBallClause(told, draft),
+    forcedClause(told, draft),
     shownClause(told, draft),
   ].filter((clause): clause is Clause => clause !== null)
   they.forEach((clause, index) => {
@@ -48,18 +50,10 @@ export function filmParts(told: Teller, draft: Draft): void {
     value === NOT_VISIBLE ? 'was not in sight' : value === 'home' ? 'stayed home' : 'left early',
   )
   sentence(told, draft.crossedAt, { field: 'crossedAt' }, 'Over half at ', '.', 'plain', secondsWords)
-  sentence(
-    told,
-    draft.note === '' ? null : draft.note,
-    { field: 'note' },
-    'Note: ',
-    '',
-    'plain',
-    (note) => note,
-  )
 }
 
-function sentence<T>(
+/** One short sentence with one word in it, where the word is said or open. */
+export function sentence<T>(
   told: Teller,
   value: T | null,
   slot: Slot,
@@ -90,6 +84,14 @@ function onBallClause(told: Teller, draft: Draft): Clause | null {
   if (value === NOT_VISIBLE) return (to) => void to.text('played the ball ').said(slot, 'how, not seen')
   if (value !== null) return (to) => void to.said(slot, ON_BALL_WORDS[value])
   return told.isOpen(slot) ? (to) => void to.text('were ').asked(slot) : null
+}
+
+function forcedClause(told: Teller, draft: Draft): Clause | null {
+  const slot: Slot = { field: 'forcedSide' }
+  const value = draft.forcedSide
+  if (value === NOT_VISIBLE) return (to) => void to.text('steered it ').said(slot, 'which way, not seen')
+  if (value !== null) return (to) => void to.text('steered it ').said(slot, labelOf(FORCED_SIDES, value))
+  return told.isOpen(slot) ? (to) => void to.text('steered it ').asked(slot) : null
 }
 
 function shownClause(told: Teller, draft: Draft): Clause | null {

@@ -2,7 +2,10 @@ import { z } from 'zod'
 import { CARRIED, emptyDraft, type Draft } from './draft'
 import { isComplete, lineOf, newLine, type Line } from './line'
 import { QUICK, type Before } from './slots'
+import type { LogGame } from './logGame'
 import type { LogRow } from './logRows'
+
+type GameOf = Pick<LogGame, 'id' | 'ours'>
 
 /** A row that is half said, as this device keeps it. Its fields are checked loosely: the sentence shows them anyway. */
 const HalfRow = z.object({
@@ -35,25 +38,27 @@ export function halfRowsOf(fresh: Line, edit: Line | null): HalfRows | null {
 }
 
 /** A kept half row as a call line again, with the slot open that comes next. */
-export function lineOfHalf(half: z.infer<typeof HalfRow>, game: string, before: Before | null): Line {
-  const draft: Draft = { ...emptyDraft(game, half.draft.number), ...half.draft }
+export function lineOfHalf(half: z.infer<typeof HalfRow>, game: GameOf, before: Before | null): Line {
+  const draft: Draft = { ...emptyDraft(game.id, half.draft.number, null, game.ours), ...half.draft }
   const line = lineOf(half.id, draft, half.version, before)
   const told = { ...line, passed: half.passed, carried: half.carried }
   return { ...told, open: isComplete(told) ? null : line.open }
 }
 
 /** The next empty row after all that are saved or kept here. */
-export function nextLine(id: string, game: string, rows: readonly LogRow[]): Line {
+export function nextLine(id: string, game: GameOf, rows: readonly LogRow[]): Line {
   return newLine(
     id,
-    game,
+    game.id,
     rows.map(({ draft }) => ({
       number: draft.number,
       period: draft.period,
       clock: draft.clock,
       margin: draft.margin,
+      onFloor: draft.onFloor,
       tripId: draft.tripId,
     })),
+    game.ours,
   )
 }
 

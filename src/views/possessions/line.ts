@@ -1,22 +1,23 @@
 import { spotCell, type SpotName, type SpotSide, spotCentre } from '@shared/court/trapSpots'
 import { LIMITS } from '@shared/limits'
 import type { PossessionRow } from '@shared/possessions/schemas'
-import { NOT_VISIBLE } from '@shared/vocabulary'
+import { clear, none, placed, set, toggled, type Act } from './acts'
 import {
   CARRIED,
   draftOfRow,
   emptyDraft,
   isPressed,
   trapsOf,
-  withoutPress,
+  withoutUntrue,
   type Carried,
   type Draft,
 } from './draft'
+import { goesWith, unfolds } from './filmSlots'
 import {
-  hasVariants,
   isAsked,
   isQuick,
   isSaid,
+  isTrapPart,
   nextOfTraps,
   nextQuick,
   QUICK,
@@ -42,32 +43,23 @@ export interface Line extends Moment {
   past: readonly Moment[]
 }
 
-/** What an answer does. Values are those of the record. */
-export type Act =
-  | { do: 'set'; slot: Slot; value: string | number | null }
-  | { do: 'toggle'; slot: Slot; value: string }
-  | { do: 'none'; slot: Slot }
-  | { do: 'place'; slot: Slot; x: number; y: number }
-  | { do: 'pass'; slot: Slot }
-  | { do: 'open'; slot: Slot }
-  | { do: 'go-on'; slot: Slot }
-
 const FAR_BACK = 60
 
-/** The next row of a game; period, clock and margin come from the last one and stay marked as carried until told. */
+/** The next row of a game; period, clock, margin and their five come from the last one and stay marked as carried until told. */
 export function newLine(
   id: string,
-  scoutedGameId: string,
+  game: string,
   rows: readonly (Pick<PossessionRow, Carried | 'number' | 'tripId'> & { number: number })[],
+  ours = false,
 ): Line {
   const last = rows.reduce<(typeof rows)[number] | null>(
     (latest, row) => (latest === null || row.number > latest.number ? row : latest),
     null,
   )
-  const draft = emptyDraft(scoutedGameId, (last?.number ?? 0) + 1, id)
+  const draft = emptyDraft(game, (last?.number ?? 0) + 1, id, ours)
   if (last === null)
     return { ...lineOf(id, { ...draft, period: 1, margin: 0 }, null), carried: ['period', 'margin'] }
-  for (const field of CARRIED) draft[field] = last[field]
+  for (const field of CARRIED) Object.assign(draft, { [field]: last[field] })
   const before = last.tripId === null ? null : { number: last.number, tripId: last.tripId }
   return { ...lineOf(id, draft, null, before), carried: CARRIED.filter((field) => last[field] !== null) }
 }
@@ -106,14 +98,11 @@ export function applyAct(line: Line, act: Act): Line {
       : act.do === 'set'
         ? set(line.draft, act)
         : none(line.draft, slot)
-  // The same shape a second time unfolds its kinds.
-  if (
-    slot.field === 'shape' &&
-    line.draft.shape !== null &&
-    draft.shape === line.draft.shape &&
-    hasVariants(draft.shape)
-  )
-    return openSlot(line, { field: 'shapeVariant' })
+  // The same value a second time unfolds what film can add to it.
+  if (isSame(line.draft, draft, slot)) {
+    const inside = unfolds(draft, slot)
+    if (inside !== null) return openSlot(line, inside)
+  }
   return next(
     line,
     draft,
@@ -122,8 +111,19 @@ export function applyAct(line: Line, act: Act): Line {
   )
 }
 
-/** A tap on the court: where two came to the ball. Null when it says nothing now. */
+/** Whether an answer said what was there already; an answer that says nothing is none. */
+function isSame(before: Draft, after: Draft, { field, trap = 0 }: Slot): boolean {
+  if (field === 'trap') {
+    const [was, is] = [trapsOf(before)[trap], trapsOf(after)[trap]]
+    return was !== undefined && is !== undefined && was.x === is.x && was.y === is.y
+  }
+  if (isTrapPart(field) || field === 'more' || field === 'trip' || field === 'note') return false
+  return before[field] !== null && before[field] === after[field]
+}
+
+/** A tap on the court: where two came to the ball, or where the throw-in was caught. Null when it says nothing now. */
 export function courtTap(line: Line, place: { x: number; y: number }): Act | null {
+  if (line.open?.field === 'entrySpot') return { do: 'place', slot: { field: 'entrySpot' }, ...place }
   if (!isPressed(line.draft)) return null
   const traps = trapsOf(line.draft)
   const open = line.open?.field === 'trap' ? (line.open.trap ?? 0) : traps.length
@@ -137,14 +137,16 @@ export function spotAct(slot: Slot, spot: SpotName, side: SpotSide | null): Act 
   const place = known === null ? null : spotCentre(spot, known)
   if (place === null) return { do: 'open', slot: { ...slot, spot } }
   const kept = (value: number) => Math.round(value * 1e4) / 1e4
-  return { do: 'place', slot: { field: 'trap', trap: slot.trap ?? 0 }, x: kept(place.x), y: kept(place.y) }
+  const whole: Slot =
+    slot.field === 'entrySpot' ? { field: 'entrySpot' } : { field: 'trap', trap: slot.trap ?? 0 }
+  return { do: 'place', slot: whole, x: kept(place.x), y: kept(place.y) }
 }
 
 /** Undoes the last answer; a word that was only opened is closed; with nothing to undo, the word before the open one. */
 export function stepBack(line: Line): Line {
   const { open, draft, passed } = line
   const last = line.past.at(-1)
-  if (open?.spot !== undefined) return openSlot(line, { field: 'trap', trap: open.trap ?? 0 })
+  if (open?.spot !== undefined) return openSlot(line, withoutSpot(open))
   const onlyOpened = open !== null && !touched(line) && (!isQuick(open.field) || isSaid(draft, open.field))
   if (onlyOpened && (last !== undefined || !isQuick(open.field)))
     return openSlot(line, nextQuick(draft, passed))
@@ -159,6 +161,10 @@ export function stepBack(line: Line): Line {
   )
 }
 
+/** The slot before one of its places was named by key. */
+export const withoutSpot = ({ field, trap }: Slot): Slot =>
+  field === 'trap' ? { field, trap: trap ?? 0 } : { field }
+
 /** Whether the last answer was given in the slot that is open, as in a list of several. */
 function touched(line: Line): boolean {
   const last = line.past.at(-1)
@@ -167,7 +173,7 @@ function touched(line: Line): boolean {
 
 function next(line: Line, draft: Draft, slot: Slot, passed: readonly QuickField[]): Line {
   const carried = line.carried.filter((field) => field !== slot.field)
-  const whole = withoutPress(draft)
+  const whole = withoutUntrue(draft)
   return remember(line, { draft: whole, passed, carried, open: following(whole, slot, passed) })
 }
 
@@ -175,9 +181,8 @@ function next(line: Line, draft: Draft, slot: Slot, passed: readonly QuickField[
 function following(draft: Draft, slot: Slot, passed: readonly QuickField[]): Slot | null {
   const quick = nextQuick(draft, passed)
   if (quick !== null) return quick
-  if (slot.field === 'trapCue' || slot.field === 'trapResult' || slot.field === 'trapTime')
-    return nextOfTraps(draft, slot.trap ?? 0)
-  return null
+  if (isTrapPart(slot.field)) return nextOfTraps(draft, slot.trap ?? 0)
+  return goesWith(draft, slot.field)
 }
 
 function remember(line: Line, now: Partial<Moment>): Line {
@@ -192,76 +197,7 @@ function goOn(line: Line, slot: Slot): Line {
   if (quick !== null) return openSlot(line, quick)
   if (slot.field === 'trapCue') return openSlot(line, { field: 'trapResult', trap })
   if (slot.field === 'trapResult') return openSlot(line, { field: 'trapTime', trap })
-  if (slot.field === 'trapTime') return openSlot(line, nextOfTraps(line.draft, trap + 1))
-  return openSlot(line, null)
+  if (slot.field === 'trapTime') return openSlot(line, { field: 'trappers', trap })
+  if (slot.field === 'trappers') return openSlot(line, nextOfTraps(line.draft, trap + 1))
+  return openSlot(line, goesWith(line.draft, slot.field))
 }
-
-function set(draft: Draft, { slot, value }: Extract<Act, { do: 'set' }>): Draft {
-  const { field, trap = 0 } = slot
-  if (field === 'more') return draft
-  if (field === 'trap')
-    return value === null
-      ? withTraps(
-          draft,
-          trapsOf(draft).filter((_, index) => index !== trap),
-        )
-      : { ...draft, traps: NOT_VISIBLE }
-  if (field === 'trapCue' || field === 'trapResult' || field === 'trapTime') {
-    const part = { trapCue: 'cue', trapResult: 'result', trapTime: 't' }[field]
-    return {
-      ...draft,
-      traps: trapsOf(draft).map((each, index) => (index === trap ? { ...each, [part]: value } : each)),
-    }
-  }
-  if (field === 'trip') return { ...draft, tripId: String(value) }
-  if (field === 'note') return { ...draft, note: String(value ?? '') }
-  if (field === 'shape')
-    return {
-      ...draft,
-      shape: value as Draft['shape'],
-      shapeVariant: value === draft.shape ? draft.shapeVariant : null,
-    }
-  if (field === 'outcome') {
-    // A way through needs no place; a place told for another ending would be untrue.
-    const outcome = value as Draft['outcome']
-    return { ...draft, outcome, outcomePlace: outcome === draft.outcome ? draft.outcomePlace : null }
-  }
-  return { ...draft, [field]: value }
-}
-
-/** Takes a value out: not logged. */
-function clear(draft: Draft, slot: Slot): Draft {
-  if (slot.field === 'trap') return { ...draft, traps: null }
-  return set(draft, { do: 'set', slot, value: null })
-}
-
-/** Looked, and there was none. */
-function none(draft: Draft, { field }: Slot): Draft {
-  if (field === 'trap') return { ...draft, traps: [] }
-  return field === 'denied' || field === 'tookAway' || field === 'leftOpen'
-    ? { ...draft, [field]: [] }
-    : draft
-}
-
-function toggled(draft: Draft, { slot: { field }, value }: Extract<Act, { do: 'toggle' }>): Draft {
-  if (field !== 'denied' && field !== 'tookAway' && field !== 'leftOpen') return draft
-  const there = draft[field]
-  const list: readonly string[] = Array.isArray(there) ? there : []
-  return {
-    ...draft,
-    [field]: list.includes(value) ? list.filter((each) => each !== value) : [...list, value],
-  }
-}
-
-function placed(draft: Draft, { slot, x, y }: Extract<Act, { do: 'place' }>): Draft {
-  const traps = trapsOf(draft)
-  const at = Math.min(slot.trap ?? 0, traps.length)
-  const there = traps[at]
-  const trap = there === undefined ? { x, y, t: null, cue: null, result: null } : { ...there, x, y }
-  return withTraps(draft, [...traps.slice(0, at), trap, ...traps.slice(at + 1)])
-}
-
-const withTraps = (draft: Draft, traps: Exclude<Draft['traps'], string | null>): Draft => ({
-  ...draft,
-  traps,
-})

@@ -1,13 +1,15 @@
 import { z } from 'zod'
 import { OpponentRow } from '@shared/opponents/schemas'
 import { PossessionRow, type StillRow } from '@shared/possessions/schemas'
-import { ScoutedGameRow } from '@shared/scoutedGames/schemas'
+import { LogGame } from './logGame'
 
 /** All that the log page needs, as it was last loaded. */
 export const LogData = z.object({
-  game: ScoutedGameRow,
+  game: LogGame,
   opponent: OpponentRow,
   rows: z.array(PossessionRow),
+  /** Our counters by name, for a game of our own. */
+  calls: z.array(z.object({ id: z.uuid(), name: z.string() })),
 })
 export type LogData = z.infer<typeof LogData>
 

@@ -16,18 +16,26 @@ import { isComplete, type Line } from './line'
 import { Teller, type Part, type SlotPart } from './parts'
 import { questionOf } from './questions'
 import { sameSlot, type Slot } from './slots'
+import type { Call } from './answer'
+import { afterParts } from './afterSentence'
 import { filmParts } from './filmSentence'
+import { shirtWords } from './shirts'
 import { SHAPE_WORDS, TRIGGER_LEAD, trapWords, VARIANT_WORDS } from './words'
 
-/** When it was: period, clock and margin, each a word that can be changed. */
+/** When it was: period, clock, margin and who of theirs was on, each a word that can be changed. */
 export function whenParts(line: Line, pack: RulePack): SlotPart[] {
   const { draft } = line
   const words: Record<Carried, string | null> = {
     period: draft.period === null ? null : periodLabel(pack, draft.period),
     clock: draft.clock === null ? null : clockWords(draft.clock),
     margin: draft.margin === null ? null : marginWords(draft.margin),
+    onFloor: draft.onFloor === null ? null : `their ${shirtWords(draft.onFloor)} on the floor`,
   }
-  return CARRIED.map((field) => {
+  // Their five are never asked: the word stands there once it is said.
+  const shown = CARRIED.filter(
+    (field) => field !== 'onFloor' || words.onFloor !== null || sameSlot(line.open, { field }),
+  )
+  return shown.map((field) => {
     const said = words[field]
     return {
       kind: 'slot',
@@ -41,7 +49,7 @@ export function whenParts(line: Line, pack: RulePack): SlotPart[] {
 }
 
 /** The possession as a sentence: what is said, what is asked, and after it what film added. */
-export function sentenceOf(line: Line): Part[] {
+export function sentenceOf(line: Line, calls: readonly Call[] = []): Part[] {
   const told = new Teller(line.open)
   const { draft } = line
   if (draft.trigger === null) return told.text('After ').asked({ field: 'trigger' }, 'plain').parts
@@ -53,6 +61,7 @@ export function sentenceOf(line: Line): Part[] {
   if (isPressed(draft)) trapParts(told, line)
   outcomeParts(told, line)
   filmParts(told, draft)
+  afterParts(told, draft, calls)
   if (line.open?.field === 'more' && !isComplete(line)) told.text(' ').asked(line.open, 'plain')
   return told.parts
 }
@@ -103,7 +112,7 @@ function trapParts(told: Teller, line: Line): void {
 
 function trapMore(
   told: Teller,
-  trap: { t: number | null; cue: string | null; result: string | null },
+  trap: { t: number | null; cue: string | null; trappers: readonly number[] | null; result: string | null },
   index: number,
 ): void {
   const time: Slot = { field: 'trapTime', trap: index }
@@ -114,6 +123,9 @@ function trapMore(
   if (trap.cue === NOT_VISIBLE) told.text(' ').said(cue, '(cue not seen)')
   else if (trap.cue !== null) told.text(' ').said(cue, labelOf(TRAP_CUES, trap.cue))
   else if (told.isOpen(cue)) told.text(' ').asked(cue)
+  const who: Slot = { field: 'trappers', trap: index }
+  if (trap.trappers !== null) told.text(' by ').said(who, shirtWords(trap.trappers))
+  else if (told.isOpen(who)) told.text(' ').asked(who)
   if (trap.result === NOT_VISIBLE) told.text(', ').said(result, 'way out not seen', 'plain')
   else if (trap.result !== null) told.text(', ').said(result, labelOf(TRAP_RESULTS, trap.result), 'plain')
   else if (told.isOpen(result)) told.text(', ').asked(result, 'plain')

@@ -11,6 +11,7 @@ export type SlotField =
   | 'period'
   | 'clock'
   | 'margin'
+  | 'onFloor'
   | 'shapeVariant'
   | 'outcomePlace'
   | 'throwerGuard'
@@ -24,6 +25,22 @@ export type SlotField =
   | 'trapCue'
   | 'trapResult'
   | 'trapTime'
+  | 'trappers'
+  | 'forcedSide'
+  | 'entrySpot'
+  | 'receiver'
+  | 'thief'
+  | 'passes'
+  | 'reversals'
+  | 'fallback'
+  | 'finish'
+  | 'points'
+  | 'pointsAgainst'
+  | 'timeOutBurned'
+  | 'filmTime'
+  | 'counterId'
+  | 'rightCall'
+  | 'runWell'
   | 'crossedAt'
   | 'note'
   | 'trip'
@@ -36,8 +53,8 @@ export interface Slot {
   trap?: number
   /** A trap spot that was named by key and still wants its side. */
   spot?: SpotName
-  /** Page of the list of film slots, 1 or 2. */
-  page?: 1 | 2
+  /** Page of a list that is longer than its keys: of what film can add, of our counters. */
+  page?: number
 }
 
 export const isQuick = (field: SlotField): field is QuickField =>
@@ -72,23 +89,17 @@ export function nextQuick(draft: Draft, passed: readonly QuickField[]): Slot | n
 export const hasVariants = (shape: Shape | null): boolean =>
   SHAPE_VARIANTS.some((variant) => variant.parent === shape)
 
-/** Outcomes after which it can be told where the ball was: those that did not get through. */
-const endsSomewhere = (draft: Draft): boolean =>
-  draft.outcome !== null && draft.outcome !== 'through' && draft.outcome !== 'through-with-numbers'
-
 /** The row before this one, of whose trip this may be a fresh throw-in. */
 export interface Before {
   number: number
   tripId: string
 }
 
-export interface FilmSlot {
-  key: string
-  slot: Slot
-  label: string
-}
+/** A trap was seen in place and nothing more; its parts are told one after the other. */
+export const isTrapPart = (field: SlotField): field is 'trapCue' | 'trapResult' | 'trapTime' | 'trappers' =>
+  field === 'trapCue' || field === 'trapResult' || field === 'trapTime' || field === 'trappers'
 
-/** What about the traps is not told yet: cue, then result, then time, trap after trap. */
+/** What about the traps is not told yet: cue, then result, time and who, trap after trap. */
 export function nextOfTraps(draft: Draft, from = 0): Slot | null {
   const traps = trapsOf(draft)
   for (let trap = from; trap < traps.length; trap += 1) {
@@ -97,47 +108,7 @@ export function nextOfTraps(draft: Draft, from = 0): Slot | null {
     if (one.cue === null) return { field: 'trapCue', trap }
     if (one.result === null) return { field: 'trapResult', trap }
     if (one.t === null) return { field: 'trapTime', trap }
+    if (one.trappers === null) return { field: 'trappers', trap }
   }
   return null
-}
-
-/**
- * What film can add, in two pages. Keys stay where they are from row to row, so that fingers learn them; what does
- * not apply to this row is left out.
- */
-export function filmSlots(draft: Draft, page: 1 | 2, before: Before | null = null): FilmSlot[] {
-  const pressed = isPressed(draft)
-  const one = (key: string, field: SlotField, label: string, when: boolean, slot: Slot = { field }) =>
-    when ? [{ key, slot, label }] : []
-  const traps = trapsOf(draft)
-  if (page === 1)
-    return [
-      ...one('1', 'throwerGuard', 'The thrower', pressed && draft.trigger !== 'live'),
-      ...one('2', 'denied', 'Denied', pressed),
-      ...one('3', 'leftOpen', 'Left open', pressed),
-      ...one('4', 'onBall', 'On the ball', pressed),
-      ...one('5', 'handler', 'Who had it', pressed),
-      ...one('6', 'goalie', 'The safety', pressed),
-      ...one(
-        '7',
-        'trapCue',
-        traps.length > 1 ? 'The traps' : 'The trap',
-        traps.length > 0,
-        nextOfTraps(draft) ?? { field: 'trapCue', trap: 0 },
-      ),
-      ...one('8', 'outcomePlace', 'Where it ended', endsSomewhere(draft)),
-      ...one('9', 'crossedAt', 'Over half at', draft.shape !== null),
-    ]
-  return [
-    ...one('1', 'note', 'A note', true),
-    ...one('2', 'shownShape', 'Showed first', pressed),
-    ...one('3', 'tookAway', 'Took away', pressed),
-    ...one('4', 'shapeVariant', 'Which kind', hasVariants(draft.shape)),
-    ...one('5', 'trap', 'Trapped again', traps.length > 0 && traps.length < 6, {
-      field: 'trap',
-      trap: traps.length,
-    }),
-    ...one('6', 'outcome', 'How it ended', draft.shape !== null && !pressed),
-    ...one('7', 'trip', 'Same trip', before !== null && draft.trigger === 'dead-ball'),
-  ]
 }

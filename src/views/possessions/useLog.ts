@@ -2,14 +2,15 @@ import { computed, ref, shallowRef, watch } from 'vue'
 import { rulePack } from '@shared/court/rulePacks'
 import { LIMITS } from '@shared/limits'
 import type { PossessionRow, StillRow } from '@shared/possessions/schemas'
-import type { ScoutedGameRow } from '@shared/scoutedGames/schemas'
 import { deletePossession, putPossession, restorePossession } from '@/api/possessions'
 import { deleteStill, putStill } from '@/api/stills'
+import type { Call } from './answer'
 import { answersOf } from './answers'
 import { readSeconds } from './clockWords'
 import { withoutRow, withRow, withStills } from './logData'
+import type { LogGame } from './logGame'
 import { logRows, type LogRow } from './logRows'
-import type { Act } from './line'
+import type { Act } from './acts'
 import { textOf } from './parts'
 import { questionOf } from './questions'
 import { sentenceOf } from './sentence'
@@ -22,14 +23,16 @@ import { useThrownAway } from './useThrownAway'
 export interface LogOptions {
   team: string
   person: string
-  game: ScoutedGameRow
+  game: LogGame
+  /** Our counters, where a row can say which was called. */
+  calls: readonly Call[]
   /** The server's rows, as the page was given them. */
   rows: () => PossessionRow[]
   changed: (rows: PossessionRow[]) => void
 }
 
 /** Everything the log page does, put together: the line, what is on its way, pictures, and what was thrown away. */
-export function useLog({ team, person, game, rows: given, changed }: LogOptions) {
+export function useLog({ team, person, game, calls, rows: given, changed }: LogOptions) {
   const pack = rulePack(game.rulePack)
   const rows = shallowRef(given())
   watch(given, (now) => (rows.value = now))
@@ -63,7 +66,7 @@ export function useLog({ team, person, game, rows: given, changed }: LogOptions)
   })
   const log = useLogLine({
     person,
-    game: game.id,
+    game,
     rows: list,
     save: (line, body) => {
       outbox.put(line.id, body, line.version)
@@ -72,7 +75,7 @@ export function useLog({ team, person, game, rows: given, changed }: LogOptions)
   })
 
   const { line } = log
-  const answers = computed(() => answersOf(line.value, pack))
+  const answers = computed(() => answersOf(line.value, pack, calls))
   const typed = computed(() => typedOf(line.value.draft, line.value.open))
   const row = computed(() => list.value.find((each) => each.id === line.value.id) ?? null)
   const question = computed(() =>
@@ -84,7 +87,7 @@ export function useLog({ team, person, game, rows: given, changed }: LogOptions)
   function say(before: string): void {
     const whole = line.value.open === null && log.complete.value
     heard.value = whole
-      ? `${textOf(sentenceOf(line.value))} Enter saves it.`
+      ? `${textOf(sentenceOf(line.value, calls))} Enter saves it.`
       : [before, question.value].filter(Boolean).join(' ')
   }
 
@@ -104,7 +107,7 @@ export function useLog({ team, person, game, rows: given, changed }: LogOptions)
 
   function openRow(which: LogRow): void {
     log.openRow(which)
-    heard.value = `No. ${which.draft.number} is open. ${textOf(sentenceOf(line.value))}`
+    heard.value = `No. ${which.draft.number} is open. ${textOf(sentenceOf(line.value, calls))}`
   }
 
   async function throwAway(): Promise<void> {

@@ -1,6 +1,6 @@
 import { useEventListener } from '@vueuse/core'
-import type { Answer } from './answers'
-import type { Act } from './line'
+import type { Answer } from './answer'
+import type { Act } from './acts'
 
 export interface LogKeys {
   answers: () => readonly Answer[]

@@ -3,13 +3,15 @@ import { bodyOfDraft } from './draft'
 import { halfRowsOf, isBegun, lineOfHalf, nextLine, readHalfRows, renumbered } from './halfRow'
 import { forget, keep, keyOf, recall } from '@/composables/kept'
 import { newId } from '@/composables/newId'
-import { applyAct, courtTap, isComplete, lineOf, openSlot, stepBack, type Act, type Line } from './line'
+import type { Act } from './acts'
+import { applyAct, courtTap, isComplete, lineOf, openSlot, stepBack, type Line } from './line'
+import type { LogGame } from './logGame'
 import type { LogRow } from './logRows'
 import type { Slot } from './slots'
 
 export interface LogLineOptions {
   person: string
-  game: string
+  game: Pick<LogGame, 'id' | 'ours'>
   /** All rows, newest first; null until they are known. */
   rows: Ref<readonly LogRow[] | null>
   /** Keeps the row and sends it. */
@@ -21,7 +23,7 @@ export interface LogLineOptions {
  * on this device and is there again when the page is.
  */
 export function useLogLine({ person, game, rows, save: keepRow }: LogLineOptions) {
-  const key = keyOf('half', person, game)
+  const key = keyOf('half', person, game.id)
   const half = recall(key, readHalfRows)
   const all = () => rows.value ?? []
   const fresh = shallowRef<Line>(nextLine(newId(), game, all()))

@@ -30,7 +30,7 @@ describe('five touches', () => {
       shape: '1-2-1-1',
       pickup: 'full',
       outcome: 'lost-live',
-      traps: [{ x: 0.08, y: 0.11, t: null, cue: null, result: null }],
+      traps: [{ x: 0.08, y: 0.11, t: null, cue: null, trappers: null, result: null }],
       number: 1,
       tripId: ROW,
     })
@@ -73,7 +73,9 @@ describe('traps', () => {
   it('asks the side of a spot named by key', () => {
     const asked = press(fresh(), '1 2 1 4')
     expect(asked.open).toMatchObject({ field: 'trap', trap: 0, spot: 'just-over-half' })
-    expect(press(asked, '2').draft.traps).toEqual([{ x: 0.56, y: 0.89, t: null, cue: null, result: null }])
+    expect(press(asked, '2').draft.traps).toEqual([
+      { x: 0.56, y: 0.89, t: null, cue: null, trappers: null, result: null },
+    ])
     expect(press(asked, '<').open).toEqual({ field: 'trap', trap: 0 })
   })
 
@@ -140,15 +142,17 @@ describe('film', () => {
     expect(keysOf(press(fresh(), '3 7'))).toBe('9 .')
   })
 
-  it('walks cue, result and time of a trap', () => {
+  it('walks cue, result, time and trappers of a trap', () => {
     const cue = press(fresh(), '1 2 1 1 1 4 7')
     expect(cue.open).toEqual({ field: 'trapCue', trap: 0 })
     const time = press(cue, '1 3')
     expect(time.open).toEqual({ field: 'trapTime', trap: 0 })
-    const done = applyAct(time, { do: 'set', slot: { field: 'trapTime', trap: 0 }, value: 1.8 })
+    const who = applyAct(time, { do: 'set', slot: { field: 'trapTime', trap: 0 }, value: 1.8 })
+    expect(who.open).toEqual({ field: 'trappers', trap: 0 })
+    const done = applyAct(who, { do: 'set', slot: { field: 'trappers', trap: 0 }, value: [4, 11] })
     expect(done.open).toBeNull()
     expect(said(done)).toContain(
-      'trapped in the left deep corner at 1.8 s on the catch, lost, and it ended lost, live.',
+      'trapped in the left deep corner at 1.8 s on the catch by 4 and 11, lost, and it ended lost, live.',
     )
   })
 
@@ -212,7 +216,7 @@ describe('stepping back', () => {
 })
 
 describe('the next row', () => {
-  const last = { number: 13, period: 3, clock: 3200, margin: -2, tripId: 'a-trip' }
+  const last = { number: 13, period: 3, clock: 3200, margin: -2, onFloor: null, tripId: 'a-trip' }
 
   it('carries over period, clock and margin and says so until they are told', () => {
     const line = newLine(ROW, GAME, [{ ...last, number: 12, clock: 9000 }, last])
