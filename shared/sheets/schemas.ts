@@ -13,6 +13,8 @@ export const FrozenCounter = z.object({
   name: z.string(),
   call: z.string(),
   diagram: Diagram,
+  /** Passing options in order; older sheets were frozen without them. */
+  looks: z.array(z.string()).default([]),
   roles: z.array(
     z.object({
       role: Role,
@@ -88,6 +90,12 @@ export const SheetView = z.object({
     .object({ squadPlayerId: z.uuid(), firstCallRole: Role.nullable(), changeUpRole: Role.nullable() })
     .nullable(),
   budget: z.object({ words: z.number().int(), limit: z.number().int(), over: z.boolean() }),
+  /** The head coach chose the fuller page for paper. */
+  fuller: z.boolean().default(false),
+  /** When it was called back; null while it holds. */
+  recalledAt: z.iso.datetime().nullable().default(null),
+  /** The newest sheet of the same game, when that is another one. */
+  newest: z.object({ id: z.uuid(), planNumber: z.number().int() }).nullable().default(null),
 })
 export type SheetView = z.infer<typeof SheetView>
 
@@ -99,6 +107,10 @@ export const SheetRow = z.object({
   opponentName: z.string(),
   tipOff: z.iso.datetime(),
   createdAt: z.iso.datetime(),
+  /** Who signed the plan; null once that person was erased. */
+  signedBy: z.string().nullable().default(null),
+  fuller: z.boolean().default(false),
+  recalledAt: z.iso.datetime().nullable().default(null),
 })
 export type SheetRow = z.infer<typeof SheetRow>
 export const SheetList = z.object({ rows: z.array(SheetRow), total: z.number().int() })

@@ -21,6 +21,8 @@ export interface Fixture {
   rule: string
   plan: string
   sheet: string
+  /** A numbered paper of the sheet. */
+  copy: string
 }
 
 export const opponentBody = (name = 'Port Selby Gulls') => ({ name, shortName: name.slice(0, 20) })
@@ -117,6 +119,7 @@ export async function makeFixture(test: TestApp, teamId = TEAM): Promise<Fixture
     game: randomUUID(),
     plan: randomUUID(),
     sheet: randomUUID(),
+    copy: randomUUID(),
   }
   const url = (path: string) => teamUrl(path, teamId)
   await expectStatus(head.put(url(`/opponents/${ids.opponent}`)).send(opponentBody()), 201)
@@ -155,5 +158,6 @@ export async function makeFixture(test: TestApp, teamId = TEAM): Promise<Fixture
       .send({ planId: ids.plan, sheetId: ids.sheet }),
     200,
   )
+  await expectStatus(head.post(url(`/sheets/${ids.sheet}/copies`)).send({ copies: [{ id: ids.copy }] }), 200)
   return { ...ids, counters, rule: rules[0] ?? '' }
 }

@@ -18,7 +18,12 @@ export interface Column {
 }
 
 /** Their name and when we meet them, over a thick rule. */
-export function headerBlock(doc: Page, page: SheetContent, { x, width }: Column, sizes: Sizes): Block {
+export function headerBlock(
+  doc: Page,
+  page: Pick<SheetContent, 'title' | 'when'>,
+  { x, width }: Column,
+  sizes: Sizes,
+): Block {
   const whenStyle = STYLES.label(Math.min(sizes.body, 14) * 0.93)
   const whenWidth = widthOf(doc, page.when, whenStyle)
   const beside = width - whenWidth - 18
@@ -101,6 +106,58 @@ export function linesBlock(doc: Page, page: SheetContent, { x, width }: Column, 
   }
 }
 
+/** The same points under each other, counts at the right edge; for the fuller page. */
+export function pointRows(
+  doc: Page,
+  page: Pick<SheetContent, 'lines' | 'unknown'>,
+  { x, width }: Column,
+  sizes: Sizes,
+): Block {
+  const indent = sizes.letter * 2 + 6
+  const said =
+    page.unknown === null
+      ? page.lines.map(({ letter, lead, strong, count, ink }) => {
+          const number = { text: count, style: STYLES.count(sizes.count, ink) }
+          const room = widthOf(doc, count, number.style) + 10
+          const runs = [
+            { text: lead, style: STYLES.text(sizes.body) },
+            { text: strong, style: STYLES.strong(sizes.body) },
+          ]
+          return {
+            letter,
+            words: paragraph(doc, runs, width - indent - room, 1.22),
+            count: paragraph(doc, [number], width),
+          }
+        })
+      : []
+  const unknown = page.unknown
+  if (unknown !== null) {
+    const words = paragraph(doc, [{ text: unknown, style: STYLES.text(sizes.body) }], width)
+    return {
+      height: words.height,
+      draw: (y, tree) => tagged(doc, tree, 'P', () => drawParagraph(doc, words, x, y)),
+    }
+  }
+  const pad = sizes.body * 0.62
+  const heightOf = ({ words }: (typeof said)[number]) => Math.max(words.height, 2 * sizes.letter) + 2 * pad
+  return {
+    height: said.reduce((sum, point) => sum + heightOf(point), 0),
+    draw(y, tree) {
+      let top = y
+      for (const point of said) {
+        const at = top
+        artifact(doc, () => rule(doc, x, at, width, 0.75, PRINT_INKS['court-line']))
+        tagged(doc, tree, 'P', () => {
+          letterDisc(doc, point.letter, x + sizes.letter, at + pad + sizes.letter, sizes.letter)
+          drawParagraph(doc, point.words, x + indent, at + pad + sizes.letter - sizes.body * 0.345)
+          drawParagraph(doc, point.count, x, at + pad + sizes.letter - sizes.count * 0.345, { width })
+        })
+        top += heightOf(point)
+      }
+    },
+  }
+}
+
 function letterDisc(doc: Page, letter: string, x: number, y: number, r: number): void {
   const style = { ...STYLES.strong(r * 1.25), ink: 'paper' as const }
   doc.circle(x, y, r).fill(PRINT_INKS.graphite)
@@ -131,7 +188,12 @@ export function otherBlock(doc: Page, page: SheetContent, { x, width }: Column, 
 }
 
 /** The loudest lines: as many beside each other as fit. */
-export function keysBlock(doc: Page, page: SheetContent, { x, width }: Column, sizes: Sizes): Block | null {
+export function keysBlock(
+  doc: Page,
+  page: Pick<SheetContent, 'keys'>,
+  { x, width }: Column,
+  sizes: Sizes,
+): Block | null {
   if (page.keys.length === 0) return null
   const style = STYLES.key(sizes.key)
   const gap = 22
@@ -168,7 +230,12 @@ export function keysBlock(doc: Page, page: SheetContent, { x, width }: Column, s
 }
 
 /** Number of the sheet, whose it is, and that it comes back. */
-export function footBlock(doc: Page, page: SheetContent, { x, width }: Column, sizes: Sizes): Block {
+export function footBlock(
+  doc: Page,
+  page: Pick<SheetContent, 'foot'>,
+  { x, width }: Column,
+  sizes: Sizes,
+): Block {
   const { sheet, owner, back } = page.foot
   const left = paragraph(
     doc,

@@ -1,9 +1,13 @@
 import PDFDocument from 'pdfkit'
 import { sheetContent } from '@shared/sheets/content'
+import { fullerContent } from '@shared/sheets/fuller'
 import type { Paper, SheetView } from '@shared/sheets/schemas'
 import { registerFonts } from './fonts'
-import { layOut } from './sheetLayout'
+import { layOutFuller } from './fullerLayout'
+import { layOut, type Frame } from './sheetLayout'
 import { PAPERS } from './sheetSizes'
+import type { Tag } from './tags'
+import type { Page } from './typeset'
 
 export interface SheetPdfOptions {
   paper: Paper
@@ -13,20 +17,33 @@ export interface SheetPdfOptions {
   copies?: number
 }
 
+type Reading = Omit<SheetView, 'budget'>
+
 /**
  * The printed page of a sheet for the reader that the view names (`mine`), or for everybody: always one
- * page, tagged, fonts embedded. First names and numbers only.
+ * page, tagged, fonts embedded. First names and numbers only. The fuller page where the view asks for it.
  * @returns the whole PDF file
  * @throws SheetTooFull when it does not fit on one page at the smallest type that may be printed
  */
-export async function sheetPdf(
-  view: Omit<SheetView, 'budget'>,
-  { paper, copy, copies }: SheetPdfOptions,
+export const sheetPdf = (view: Reading, { paper, copy, copies }: SheetPdfOptions): Promise<Buffer> =>
+  copiesPdf([{ view, copy }], paper, copies)
+
+/**
+ * Several copies in one file, a page each with its own number and reader.
+ * @param copies how many copies of the sheet there are in all
+ * @throws SheetTooFull
+ */
+export async function copiesPdf(
+  pages: readonly { view: Reading; copy?: number }[],
+  paper: Paper,
+  copies?: number,
 ): Promise<Buffer> {
-  const page = sheetContent(view, { copy, copies })
   const { size, margin } = PAPERS[paper]
   const [width, height] = size
-  const title = `${plain(page.title)}, ${page.when}`
+  const [first] = pages
+  if (!first) throw new Error('a file of copies needs one at least')
+  const { title: name, when } = sheetContent(first.view)
+  const title = `${plain(name)}, ${when}`
   const doc = new PDFDocument({
     size: [width, height],
     margin: 0,
@@ -38,18 +55,27 @@ export async function sheetPdf(
   })
   const file = collected(doc)
   registerFonts(doc)
-  const draw = layOut(doc, page, view.content, {
-    x: margin,
-    y: margin,
-    width: width - 2 * margin,
-    height: height - 2 * margin,
-  })
+  const frame = { x: margin, y: margin, width: width - 2 * margin, height: height - 2 * margin }
   const tree = doc.struct('Document', { title })
   doc.addStructure(tree)
-  draw(tree)
+  pages.forEach(({ view, copy }, index) => {
+    if (index > 0) doc.addPage({ size: [width, height], margin: 0 })
+    drawing(doc, view, { copy, copies }, frame)(tree)
+  })
   tree.end()
   doc.end()
   return file
+}
+
+function drawing(
+  doc: Page,
+  view: Reading,
+  number: { copy?: number; copies?: number },
+  frame: Frame,
+): (tree: Tag) => void {
+  return view.fuller
+    ? layOutFuller(doc, fullerContent(view, number), view.content, frame)
+    : layOut(doc, sheetContent(view, number), view.content, frame)
 }
 
 /** The title also goes into the file's XML as it is, so it must not hold what XML reads as markup. */

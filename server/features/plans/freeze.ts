@@ -39,6 +39,7 @@ const freezeCounter = (counter: CounterRow, seats: Seats): FrozenCounter => ({
   name: counter.name,
   call: counter.call,
   diagram: counter.diagram,
+  looks: counter.looks,
   roles: counter.roles.map(({ role, title, jobs, changeUpLine, keyStep }) => ({
     role,
     title,

@@ -12,6 +12,7 @@ export interface WholeSheet {
   timeZone: string
   /** Names as they are now; an erased player is not among them. */
   players: SheetView['players']
+  newest: SheetView['newest']
 }
 
 /** The row of a list. */
@@ -20,7 +21,8 @@ export const presentSheetRow = ({
   gameId,
   planNumber,
   content,
-}: Omit<WholeSheet, 'timeZone' | 'players'>): SheetRow => ({
+  signedBy,
+}: Omit<WholeSheet, 'timeZone' | 'players' | 'newest'> & { signedBy: string | null }): SheetRow => ({
   id: sheet.id,
   gameId,
   planId: sheet.planId,
@@ -28,6 +30,9 @@ export const presentSheetRow = ({
   opponentName: content.opponentName,
   tipOff: content.tipOff,
   createdAt: sheet.createdAt,
+  signedBy,
+  fuller: sheet.fuller,
+  recalledAt: sheet.recalledAt,
 })
 
 /** What stands on the sheet of one reader; `readerId` is a squad player, or null for the general sheet. */
@@ -42,6 +47,9 @@ export const pageOfSheet = (whole: WholeSheet, readerId: string | null): Omit<Sh
       content: whole.content,
       players: whole.players,
       mine: null,
+      fuller: whole.sheet.fuller,
+      recalledAt: whole.sheet.recalledAt,
+      newest: whole.newest,
     },
     readerId,
   )
