@@ -36,12 +36,12 @@ export async function guard(
   return true
 }
 
-/** Where "/" and a team's bare address lead: one team needs no choosing, staff starts at the opponents. */
+/** Where "/" and a team's bare address lead: one team needs no choosing, staff starts at the week. */
 export function homeOf(session: SessionStore, teamId?: string): RouteLocationRaw {
   const [only, ...more] = session.teams
   const team = teamId === undefined ? only : session.teams.find((each) => each.id === teamId)
   if (team === undefined || (teamId === undefined && more.length > 0)) return { name: 'teams' }
-  return { name: team.can.includes('opponent:read') ? 'opponents' : 'sheets', params: { team: team.id } }
+  return { name: team.can.includes('game:read') ? 'week' : 'sheets', params: { team: team.id } }
 }
 
 /** The not-found page under the address that was asked for. */

@@ -29,7 +29,7 @@ const team = (id: string, role: SessionTeam['role'], can: SessionTeam['can']): S
   can,
   squadPlayerId: null,
 })
-const staff = team(TEAM, 'head-coach', ['opponent:read', 'sheet:read'])
+const staff = team(TEAM, 'head-coach', ['game:read', 'opponent:read', 'sheet:read'])
 const player = team(TEAM, 'player', ['sheet:read'])
 const of = (...teams: SessionTeam[]): Session => ({
   person: { id: '33333333-3333-4333-8333-333333333333', name: 'Maren Oduya', initials: 'MO' },
@@ -85,9 +85,9 @@ describe('the guard', () => {
     expect(router.currentRoute.value.name).toBe('library')
   })
 
-  it('sends staff to the opponents, players to their sheets, and who has two teams to choose', async () => {
+  it('sends staff to the week, players to their sheets, and who has two teams to choose', async () => {
     answer(of(staff))
-    expect((await open('/')).name).toBe('opponents')
+    expect((await open('/')).name).toBe('week')
     setActivePinia(createPinia())
     answer(of(player))
     expect((await open('/')).name).toBe('sheets')
@@ -107,7 +107,7 @@ describe('the guard', () => {
   it('leads a signed-in person from sign-in to the wanted address, never to a foreign one', async () => {
     answer(of(staff))
     expect((await open(`/sign-in?to=/t/${TEAM}/library`)).name).toBe('library')
-    expect((await open('/sign-in?to=https://elsewhere.example/t')).name).toBe('opponents')
+    expect((await open('/sign-in?to=https://elsewhere.example/t')).name).toBe('week')
   })
 
   it('says that there is no signal and keeps the address, when nobody can be asked', async () => {
