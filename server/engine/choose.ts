@@ -127,6 +127,7 @@ export async function chooseCounters(input: ChooseInput): Promise<ChosenCounters
     backcourtCount: input.pack.backcourtCount,
     given: {
       timeOutWhileThrowing: Number(rulePack(input.pack.key).timeOutWhileThrowing),
+      timeOutAdvance: Number(rulePack(input.pack.key).timeOutAdvance),
       disguised: countOf(input.tendencies, 'disguise').k,
       ...input.given,
     },

@@ -40,6 +40,9 @@ const NOTHING_GIVEN: GivenFacts = {
   disguised: null,
   ownThrowInCounts: null,
   filmDays: null,
+  theirStealsInMiddle: null,
+  ourStealsInMiddle: null,
+  timeOutAdvance: null,
   blindScreens: null,
 }
 

@@ -1,4 +1,6 @@
 import { z } from 'zod'
+import { Id } from '../http/common'
+import { RuleBody } from '../rules/schemas'
 import { Interval } from '../tendencies/schemas'
 import { Role } from '../court/diagram'
 import { STRENGTHS, valuesOf } from '../vocabulary'
@@ -83,3 +85,25 @@ export const Choices = z.object({
   warnings: z.array(z.object({ ruleId: z.uuid(), text: z.string() })),
 })
 export type Choices = z.infer<typeof Choices>
+
+/**
+ * What would turn the order: if their next rows showed a habit so often, another counter would lead. `counterId` is
+ * the counter that it is told of; for the one that leads `leads` takes its place, for the others it is itself.
+ */
+export const Turn = z.object({
+  counterId: z.uuid(),
+  habitKey: z.string(),
+  /** Whether more or less of the habit would do it. */
+  is: z.enum(['more', 'less']),
+  /** So many of the next `of` rows. */
+  rows: z.number().int(),
+  of: z.number().int(),
+  leads: z.uuid(),
+})
+export type Turn = z.infer<typeof Turn>
+export const Turns = z.object({ rows: z.array(Turn), total: z.number().int() })
+export type Turns = z.infer<typeof Turns>
+
+/** A rule as it would read, for the order it would give. */
+export const RulePreview = z.object({ id: Id, rule: RuleBody })
+export type RulePreview = z.infer<typeof RulePreview>

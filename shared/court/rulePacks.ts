@@ -47,6 +47,8 @@ export interface RulePack {
   closelyGuarded: { seconds: number; within: number; where: 'anywhere' | 'frontcourt' } | null
   /** Whether the thrower's team gets a time-out once the thrower has the ball. From memory. */
   timeOutWhileThrowing: boolean
+  /** Whether a time-out late in the game lets the coach have the throw-in moved past half (DOMAIN.md section 6; from memory where it is silent). */
+  timeOutAdvance: boolean
   /** From memory. */
   periods: { count: number; minutes: number; overtimeMinutes: number }
 }
@@ -74,6 +76,7 @@ const NFHS = {
   countStarts: 'control',
   closelyGuarded: { seconds: 5, within: ft(6), where: 'frontcourt' },
   timeOutWhileThrowing: true,
+  timeOutAdvance: false,
   periods: { count: 4, minutes: 8, overtimeMinutes: 4 },
 } as const
 
@@ -97,6 +100,8 @@ export const RULE_PACKS: Readonly<Record<RulePackKey, RulePack>> = {
     countStarts: 'touch',
     closelyGuarded: { seconds: 5, within: 1, where: 'anywhere' },
     timeOutWhileThrowing: false,
+    // In the last two minutes of the fourth period and of overtime.
+    timeOutAdvance: true,
     periods: { count: 4, minutes: 10, overtimeMinutes: 5 },
   },
   nfhs84: {
@@ -127,6 +132,8 @@ export const RULE_PACKS: Readonly<Record<RulePackKey, RulePack>> = {
     countStarts: 'touch',
     closelyGuarded: { seconds: 5, within: ft(6), where: 'frontcourt' },
     timeOutWhileThrowing: true,
+    // The women may, in the last minute; the men, whose halves stand here, may not.
+    timeOutAdvance: false,
     // Halves, as the men play; the women play four of ten.
     periods: { count: 2, minutes: 20, overtimeMinutes: 5 },
   },
@@ -144,6 +151,7 @@ export const RULE_PACKS: Readonly<Record<RulePackKey, RulePack>> = {
     countStarts: 'touch',
     closelyGuarded: null,
     timeOutWhileThrowing: true,
+    timeOutAdvance: true,
     periods: { count: 4, minutes: 12, overtimeMinutes: 5 },
   },
 }

@@ -41,6 +41,12 @@ export const FACTS = [
   'ownThrowInCounts',
   /** Days from the newest counted game of theirs to our game; no answer while none is counted. */
   'filmDays',
+  /** Most passes in the middle that one of theirs, known by her number, has taken. */
+  'theirStealsInMiddle',
+  /** Our own passes in the middle that were taken, in our games. */
+  'ourStealsInMiddle',
+  /** 1 where a time-out late in the game lets the coach move the throw-in up the court, else 0. */
+  'timeOutAdvance',
   /** Counters of the book with a screen that its defender cannot see. */
   'blindScreens',
 ] as const

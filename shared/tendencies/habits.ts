@@ -1,4 +1,5 @@
 import { SPOT_NAMES } from '../court/trapSpots'
+import { FORCED_SIDES } from '../filmWords'
 import {
   DENIED,
   LANES,
@@ -109,6 +110,9 @@ export const HABITS: readonly Habit[] = [
     habit(`deny:${term.value}`, 'entry', `Deny ${term.label}`, 'pressed, denials logged'),
   ),
   habit('sag', 'ball', 'Sag on a weak handler', 'pressed, a weak handler had it, the ball seen'),
+  ...FORCED_SIDES.map((side) =>
+    habit(`forced:${side.value}`, 'ball', `Turn the ball ${side.label}`, 'pressed, the forced side seen'),
+  ),
   habit('light', 'ball', 'Contain and deny nobody', 'pressed, the ball seen, denials logged'),
   habit('all-out', 'ball', 'Pressure and deny two or more', 'pressed, the ball seen, denials logged'),
   habit('disguise', 'press', 'Show one shape and play another', 'pressed, the shown shape logged'),

@@ -5,7 +5,7 @@ import { SpotName, SpotSide } from '../court/trapSpots'
 import { CLAIMS, GRADES, PICKUPS, SHAPES, TRIGGERS, valuesOf } from '../vocabulary'
 
 /** The situation; every filter may be left out or empty. Lists come as comma-separated text in the query. */
-const list = <T extends z.ZodType<unknown, unknown>>(item: T) =>
+export const list = <T extends z.ZodType<unknown, unknown>>(item: T) =>
   z
     .string()
     .transform((text): unknown[] => text.split(',').filter(Boolean))

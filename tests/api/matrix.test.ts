@@ -12,6 +12,7 @@ import {
 import { Mail } from '@server/database/entities/Mail'
 import { Membership } from '@server/database/entities/Membership'
 import { Person } from '@server/database/entities/Person'
+import { SquadPlayer } from '@server/database/entities/SquadPlayer'
 import { OTHER_TEAM, PLAYER, startTestApp, TEAM, type Agent, type TestApp } from '../support/testApp'
 import { DEMO_RULES } from '@server/database/demo/rules'
 
@@ -48,6 +49,18 @@ const player = {
   firstName: 'Wren',
   skills: { handle: 1, 'throw-in': 1, 'long-arm': 1, decide: 1, sprint: 1, screen: 1 },
 }
+
+/** A change of many rows that its undo finds: the same in both tests. */
+const BATCH = '55555555-5555-4555-8555-555555555555'
+const batchBody = (id: string) => ({
+  batchId: BATCH,
+  rows: [{ id, version: 1 }],
+  field: 'handler',
+  from: null,
+  to: 'weak',
+})
+
+const invitation = { role: 'assistant-coach', way: 'link' }
 
 const TABLE: Record<string, Row> = {
   'get /opponents': { at: () => ({}), success: 200, bad: { field: '' } },
@@ -105,6 +118,28 @@ const TABLE: Record<string, Row> = {
     success: 200,
     bad: { query: 'size=huge', field: 'size' },
   },
+  'get /stills/{id}/row': { at: (rows) => ({ id: rows.still }), success: 200, bad: badId },
+  'patch /stills/{id}': {
+    at: (rows) => ({ id: rows.still }),
+    success: 200,
+    // Nothing new, so that the version stays what the blur below names.
+    body: () => ({ caption: '' }),
+    ifMatch: '"1"',
+    bad: { body: { caption: 'one two three four five six seven eight nine' }, field: 'caption' },
+  },
+  'post /stills/{id}/blur': {
+    at: (rows) => ({ id: rows.still }),
+    success: 200,
+    body: () => ({ regions: [{ x: 0.1, y: 0.1, w: 0.1, h: 0.1 }] }),
+    ifMatch: '"1"',
+    bad: { body: { regions: [] }, field: 'regions' },
+  },
+  'get /opponents/{id}/stills': {
+    at: rowsOf.opponent,
+    success: 200,
+    query: 'report=1',
+    bad: { query: 'limit=0', field: 'limit' },
+  },
   'delete /possessions/{id}/stills/{still}': { at: rowsOf.still, success: 204, bad: badId },
   'get /counters': { at: () => ({}), success: 200, bad: { field: '' } },
   'get /counters/{id}': { at: (rows) => ({ id: rows.counters[0] ?? '' }), success: 200, bad: badId },
@@ -145,6 +180,14 @@ const TABLE: Record<string, Row> = {
   'post /games/{id}/read-sign-off': { at: rowsOf.game, headOnly: true, success: 200, bad: badId },
   'delete /games/{id}/read-sign-off': { at: rowsOf.game, headOnly: true, success: 200, bad: badId },
   'get /games/{id}/choices': { at: rowsOf.game, success: 200, bad: badId },
+  'get /games/{id}/turns': { at: rowsOf.game, success: 200, bad: badId },
+  'post /games/{id}/choices/preview': {
+    at: rowsOf.game,
+    headOnly: true,
+    success: 200,
+    body: (rows) => ({ id: rows.rule, rule: ruleBody }),
+    bad: { body: { id: 'first', rule: ruleBody }, field: 'id' },
+  },
   'get /games/{id}/plan': { at: rowsOf.game, success: 200, bad: badId },
   'put /games/{id}/plan': {
     at: rowsOf.game,
@@ -163,6 +206,45 @@ const TABLE: Record<string, Row> = {
   'get /games/{id}/sheets': { at: rowsOf.game, player: true, success: 200, bad: badId },
   'get /sheets': { at: () => ({}), player: true, success: 200, bad: { field: '' } },
   'get /sheets/{id}': { at: (rows) => ({ id: rows.sheet }), player: true, success: 200, bad: badId },
+  'patch /sheets/{id}': {
+    at: (rows) => ({ id: rows.sheet }),
+    headOnly: true,
+    success: 200,
+    body: () => ({ fuller: true, seenWarning: true }),
+    bad: { body: { fuller: 'yes' }, field: 'fuller' },
+  },
+  'get /sheets/{id}/copies': { at: (rows) => ({ id: rows.sheet }), success: 200, bad: badId },
+  'post /sheets/{id}/copies': {
+    at: (rows) => ({ id: rows.sheet }),
+    success: 200,
+    body: (rows) => ({ copies: [{ id: rows.copy }] }),
+    bad: { body: { copies: [] }, field: 'copies' },
+  },
+  'get /sheets/{id}/copies.pdf': {
+    at: (rows) => ({ id: rows.sheet }),
+    success: 200,
+    bad: { query: 'paper=napkin', field: 'paper' },
+  },
+  'patch /copies/{id}': {
+    at: (rows) => ({ id: rows.copy }),
+    success: 200,
+    ifMatch: '"1"',
+    body: () => ({ place: 'out' }),
+    bad: { body: { place: 'lost' }, field: 'place' },
+  },
+  'post /sheets/{id}/letters': {
+    at: (rows) => ({ id: rows.sheet }),
+    success: 200,
+    body: () => ({ players: [] }),
+    bad: { body: { players: ['nell'] }, field: 'players.0' },
+  },
+  'get /sheets/{id}/openings': { at: (rows) => ({ id: rows.sheet }), success: 200, bad: badId },
+  'post /sheets/{id}/recall': {
+    at: (rows) => ({ id: rows.sheet }),
+    headOnly: true,
+    success: 200,
+    bad: badId,
+  },
   'get /sheets/{id}.pdf': {
     at: (rows) => ({ id: rows.sheet }),
     player: true,
@@ -176,6 +258,30 @@ const TABLE: Record<string, Row> = {
     bad: { query: 'row=first', field: 'row' },
   },
   'get /changes': { at: () => ({}), success: 200, bad: { query: 'since=yesterday', field: 'since' } },
+  'get /opponents/{id}/possessions': {
+    at: rowsOf.opponent,
+    success: 200,
+    bad: { query: 'sort=luck', field: 'sort' },
+  },
+  'post /possessions/{id}/put-back': {
+    at: rowsOf.possession,
+    success: 200,
+    body: (rows) => ({ changeId: rows.change, field: 'outcome' }),
+    ifMatch: '"1"',
+    bad: { body: { changeId: 'first', field: 'outcome' }, field: 'changeId' },
+  },
+  'post /possessions/batch': {
+    at: () => ({}),
+    success: 200,
+    body: (rows) => batchBody(rows.possession),
+    bad: { body: { ...batchBody(randomUUID()), field: 'id' }, field: 'field' },
+  },
+  'post /possessions/batch/{batch}/undo': {
+    at: () => ({ batch: BATCH }),
+    success: 200,
+    body: () => ({}),
+    bad: { field: '' },
+  },
   'get /opponents/{id}/players': { at: rowsOf.opponent, success: 200, bad: badId },
   'put /opponent-players/{id}': {
     at: (rows) => ({ id: rows.opponentPlayer }),
@@ -213,10 +319,74 @@ const TABLE: Record<string, Row> = {
     success: 200,
     bad: badId,
   },
+  'get /people': { at: () => ({}), success: 200, bad: { field: '' } },
+  'get /people/export': {
+    at: () => ({}),
+    player: true,
+    success: 200,
+    query: `kind=squad-player&id=${PLAYER}`,
+    bad: { query: `kind=nobody&id=${PLAYER}`, field: 'kind' },
+  },
+  'patch /members/{id}': {
+    at: (rows) => ({ id: placesOf(rows).member }),
+    headOnly: true,
+    success: 200,
+    ifMatch: '"1"',
+    body: () => ({ role: 'assistant-coach' }),
+    bad: { body: { role: 'owner' }, field: 'role' },
+  },
+  'delete /members/{id}': {
+    at: (rows) => ({ id: placesOf(rows).leaver }),
+    headOnly: true,
+    success: 204,
+    bad: badId,
+  },
+  'put /invitations/{id}': {
+    at: (rows) => ({ id: placesOf(rows).invitation }),
+    headOnly: true,
+    success: 200,
+    body: () => invitation,
+    bad: { body: { ...invitation, role: 'owner' }, field: 'role' },
+  },
+  'post /invitations/{id}/resend': {
+    at: (rows) => ({ id: placesOf(rows).invitation }),
+    headOnly: true,
+    success: 200,
+    body: () => ({ days: 3 }),
+    bad: { body: { days: 400 }, field: 'days' },
+  },
+  'delete /invitations/{id}': {
+    at: (rows) => ({ id: placesOf(rows).invitation }),
+    headOnly: true,
+    success: 204,
+    bad: badId,
+  },
+  'get /erasures/preview': {
+    at: () => ({}),
+    headOnly: true,
+    success: 200,
+    query: `kind=squad-player&subjectId=${PLAYER}`,
+    bad: { query: `kind=nobody&subjectId=${PLAYER}`, field: 'kind' },
+  },
+  'put /erasures/{id}': {
+    at: (rows) => ({ id: placesOf(rows).erasure }),
+    headOnly: true,
+    success: 200,
+    body: (rows) => ({ kind: 'squad-player', subjectId: placesOf(rows).leaving }),
+    bad: { body: { kind: 'squad-player', subjectId: 'she' }, field: 'subjectId' },
+  },
+  'post /erasures/{id}/stop': {
+    at: (rows) => ({ id: placesOf(rows).erasure }),
+    success: 200,
+    body: () => ({}),
+    bad: badId,
+  },
+  'delete /membership': { at: () => ({}), player: true, success: 204, bad: { field: '' } },
 }
 
 /** Rows that change what later rows need go last, and in this order. */
 const LAST = [
+  'post /sheets/{id}/recall',
   'put /games/{id}/plan',
   'delete /possessions/{id}/stills/{still}',
   'delete /possessions/{id}',
@@ -238,9 +408,28 @@ let own: Fixture
 let other: Fixture
 let headId = ''
 
-/** Of each team: two letters that wait, and somebody's membership. */
-const places = new Map<string, { again: string; withdraw: string; member: string }>()
-const placesOf = ({ game }: Fixture) => places.get(game) ?? { again: '', withdraw: '', member: '' }
+/** Of each team: two letters that wait, somebody's membership and another's, and who is asked in and to be erased. */
+interface Places {
+  again: string
+  withdraw: string
+  member: string
+  leaver: string
+  invitation: string
+  erasure: string
+  /** Whom the erasure is about. */
+  leaving: string
+}
+const NO_PLACES: Places = {
+  again: '',
+  withdraw: '',
+  member: '',
+  leaver: '',
+  invitation: '',
+  erasure: '',
+  leaving: '',
+}
+const places = new Map<string, Places>()
+const placesOf = ({ game }: Fixture) => places.get(game) ?? NO_PLACES
 
 async function addPlaces({ game }: Fixture, teamId: string, name: string): Promise<void> {
   const { manager } = test.context.db
@@ -260,7 +449,17 @@ async function addPlaces({ game }: Fixture, teamId: string, name: string): Promi
     })
   const { id: personId } = await manager.findOneByOrFail(Person, { name })
   const { id: member } = await manager.findOneByOrFail(Membership, { personId, teamId })
-  places.set(game, { ...ids, member })
+  const both = await manager.findOneByOrFail(Person, { name: 'Test both' })
+  const { id: leaver } = await manager.findOneByOrFail(Membership, { personId: both.id, teamId })
+  const { id: leaving } = await manager.findOneByOrFail(SquadPlayer, { teamId, jersey: 10 })
+  const head = await test.as(teamId === TEAM ? 'head' : 'otherHead')
+  const made = { invitation: randomUUID(), erasure: randomUUID() }
+  await head.put(`/api/teams/${teamId}/invitations/${made.invitation}`).send(invitation).expect(201)
+  await head
+    .put(`/api/teams/${teamId}/erasures/${made.erasure}`)
+    .send({ kind: 'squad-player', subjectId: leaving })
+    .expect(201)
+  places.set(game, { ...ids, member, leaver, leaving, ...made })
 }
 
 beforeAll(async () => {

@@ -25,6 +25,7 @@ export const TWENTY: readonly Row[] = [
     leftOpen: ['middle'],
     goalie: 'home',
     shownShape: '1-2-1-1',
+    forcedSide: 'right',
     outcome: 'lost-live',
   },
   // 2
@@ -41,6 +42,7 @@ export const TWENTY: readonly Row[] = [
     goalie: 'left-early',
     shownShape: '2-2-1',
     crossedAt: 6,
+    forcedSide: 'left',
     outcome: 'through-with-numbers',
   },
   // 3: looked for a trap and there was none, so lanes and safety say nothing of a trap
@@ -56,6 +58,7 @@ export const TWENTY: readonly Row[] = [
     leftOpen: ['far-side'],
     goalie: 'home',
     crossedAt: 6.5,
+    forcedSide: 'left',
     outcome: 'through',
   },
   // 4
@@ -95,6 +98,7 @@ export const TWENTY: readonly Row[] = [
     traps: 'not-visible',
     leftOpen: 'not-visible',
     goalie: 'not-visible',
+    forcedSide: 'not-visible',
     outcome: 'foul-drawn',
   },
   // 7: a live ball has no thrower, whatever was written
@@ -109,6 +113,7 @@ export const TWENTY: readonly Row[] = [
     traps: [trap(0.5, 0.8, { cue: 'not-visible', result: 'lost' })],
     leftOpen: ['pass-back'],
     goalie: 'left-early',
+    forcedSide: 'middle',
     outcome: 'lost-live',
   },
   // 8
@@ -126,6 +131,7 @@ export const TWENTY: readonly Row[] = [
       trap(0.9, 0.9),
     ],
     leftOpen: ['sideline'],
+    forcedSide: 'left',
     outcome: 'count',
   },
   // 9

@@ -12,7 +12,8 @@ const MARGIN_BANDS = {
   ahead: 'p.margin >= 6',
 } as const
 
-const oneOf = (column: string, values: readonly (string | number)[] | undefined): Where | null =>
+/** A column holds one of the values; null when nothing is asked of it. */
+export const oneOf = (column: string, values: readonly (string | number)[] | undefined): Where | null =>
   values === undefined
     ? null
     : { sql: `${column} IN (${values.map(() => '?').join(', ') || 'NULL'})`, parameters: [...values] }

@@ -1,15 +1,21 @@
 import type { EntityManager } from 'typeorm'
-import type { Choices } from '@shared/choices/schemas'
+import type { Choices, Turn } from '@shared/choices/schemas'
 import type { CounterRow } from '@shared/counters/schemas'
 import { rulePack } from '@shared/court/rulePacks'
 import type { Trigger } from '@shared/vocabulary'
-import { countOwnSuccess, countOwnThrowInCounts } from '../../database/counting/records'
+import {
+  countOurStealsInMiddle,
+  countOwnSuccess,
+  countOwnThrowInCounts,
+  countTheirStealsInMiddle,
+} from '../../database/counting/records'
 import { Game } from '../../database/entities/Game'
 import { SquadPlayer } from '../../database/entities/SquadPlayer'
 import { Team } from '../../database/entities/Team'
 import { findInTeam } from '../../database/findInTeam'
-import { chooseCounters } from '../../engine/choose'
+import { chooseCounters, type ChooseInput } from '../../engine/choose'
 import type { GivenFacts } from '../../engine/facts'
+import { whatWouldTurn } from '../../engine/turns'
 import { dayInZone } from '../../http/zone'
 import { listCounters } from '../counters/counters.service'
 import { listRules } from '../rules/rules.service'
@@ -55,14 +61,18 @@ export function givenFacts(
   }
 }
 
-/** Our counters in order against the opponent of a game, with reasons. @throws NotFound */
-export async function chooseFor(manager: EntityManager, teamId: string, gameId: string): Promise<Choices> {
+/** Everything that the order for a game is worked out from. @throws NotFound */
+export async function chooseInput(
+  manager: EntityManager,
+  teamId: string,
+  gameId: string,
+): Promise<{ input: ChooseInput; opponentId: string; cells: OpponentRead['cells'] }> {
   const game = await findInTeam(manager, Game, teamId, gameId, 'game')
   const read = await readOpponent(manager, game.opponentId, {})
   const pack = rulePack(game.rulePack)
   const counters = await listCounters(manager, teamId)
   const day = await dayOf(manager, teamId, game.tipOff)
-  const chosen = await chooseCounters({
+  const input: ChooseInput = {
     tendencies: read.tendencies,
     rules: await listRules(manager, teamId),
     counters,
@@ -72,7 +82,38 @@ export async function chooseFor(manager: EntityManager, teamId: string, gameId: 
     given: {
       ...givenFacts(read, counters, day),
       ownThrowInCounts: await countOwnThrowInCounts(manager, teamId),
+      theirStealsInMiddle: await countTheirStealsInMiddle(manager, game.opponentId),
+      ourStealsInMiddle: await countOurStealsInMiddle(manager, teamId),
     },
-  })
-  return { gameId, opponentId: game.opponentId, ...chosen }
+  }
+  return { input, opponentId: game.opponentId, cells: read.cells }
+}
+
+/** Our counters in order against the opponent of a game, with reasons. @throws NotFound */
+export async function chooseFor(manager: EntityManager, teamId: string, gameId: string): Promise<Choices> {
+  const { input, opponentId } = await chooseInput(manager, teamId, gameId)
+  return { gameId, opponentId, ...(await chooseCounters(input)) }
+}
+
+/**
+ * The same order as it would be were a rule written like this; nothing is kept. A rule of the team's with this id
+ * is replaced, another one joins them.
+ * @throws NotFound
+ */
+export async function previewRule(
+  manager: EntityManager,
+  teamId: string,
+  gameId: string,
+  rule: ChooseInput['rules'][number],
+): Promise<Choices> {
+  const { input, opponentId } = await chooseInput(manager, teamId, gameId)
+  const at = input.rules.findIndex(({ id }) => id === rule.id)
+  const rules = at < 0 ? [...input.rules, rule] : input.rules.with(at, rule)
+  return { gameId, opponentId, ...(await chooseCounters({ ...input, rules })) }
+}
+
+/** What their next rows would have to show for another counter to lead. @throws NotFound */
+export async function turnsFor(manager: EntityManager, teamId: string, gameId: string): Promise<Turn[]> {
+  const { input, cells } = await chooseInput(manager, teamId, gameId)
+  return whatWouldTurn(input, cells)
 }

@@ -11,7 +11,7 @@ import {
   countSpots,
   type CountedGame,
 } from '../../database/counting/tendencyCounts'
-import { luckOf, tendencies, type EngineTendency } from '../../engine/tendencies'
+import { luckOf, tendencies, type EngineTendency, type HabitCell } from '../../engine/tendencies'
 
 /** What is counted of an opponent in a situation, with the engine's own numbers beside it. */
 export interface OpponentRead {
@@ -19,6 +19,8 @@ export interface OpponentRead {
   notCovered: number
   situations: TendencyRead['situations']
   tendencies: EngineTendency[]
+  /** The counts behind them, game by game. */
+  cells: HabitCell[]
   pickup: TendencyRead['pickup']
   spots: TendencyRead['spots']
   luck: TendencyRead['luck']
@@ -70,6 +72,7 @@ export async function readOpponent(
       ),
     ],
     tendencies: list,
+    cells,
     pickup: medianPickup(await countPickups(manager, opponentId, filter)),
     spots: spots.map((spot) => ({ ...spot, n: (spot.order === 'first' ? trapped?.n : again?.n) ?? 0 })),
     luck: luckOf(list, narrows(filter)),

@@ -105,6 +105,18 @@ const FACT_WORDS: Record<FactName, FactWords> = {
         : `had five called on ${amount(fact, 'throw-in', 'throw-ins')}`,
   }),
   filmDays: (fact) => ({ subject: 'their newest film', words: `is ${size(fact, 'days old')}` }),
+  theirStealsInMiddle: (fact) => ({
+    subject: 'one of theirs',
+    words: `has taken ${amount(fact, 'pass', 'passes')} in the middle`,
+  }),
+  ourStealsInMiddle: (fact) => ({
+    subject: 'we',
+    words: `have lost ${amount(fact, 'pass', 'passes')} in the middle`,
+  }),
+  timeOutAdvance: ({ value }) => ({
+    subject: 'a late time-out',
+    words: value === 0 ? 'leaves the throw-in where it is' : 'moves the throw-in past half',
+  }),
   blindScreens: (fact) => ({
     subject: 'our book',
     words:
@@ -121,6 +133,7 @@ const THEIR_FACTS: readonly FactName[] = [
   'pressedAfterDeadBall',
   'pressedAfterBreak',
   'disguised',
+  'theirStealsInMiddle',
   'filmDays',
 ]
 

@@ -35,6 +35,9 @@ const OPEN_WHY = 'trapped, open lanes logged, none counts as logged: 3 no trap, 
 const SAFETY = [1, 2, 7, 11, 20]
 const SAFETY_WHY = 'trapped, safety seen: 3 no trap, 5 not visible, 8 and 12 not logged'
 
+const FORCED = [1, 2, 3, 7, 8]
+const FORCED_WHY = 'pressed, the forced side seen: 6 not visible, the others not logged; 16 is no press'
+
 const at = (k: number[]): Known => ({ n: TRAPS, k, why: TRAPS_WHY })
 const cue = (k: number[]): Known => ({ n: CUE, k, why: CUE_WHY })
 const open = (k: number[]): Known => ({ n: OPEN, k, why: OPEN_WHY })
@@ -77,6 +80,9 @@ const KNOWN: Record<string, Known> = {
   'deny:pass-back': deny([1, 20]),
   'deny:best-handler': deny([7, 11]),
   sag: { n: [1, 3, 4, 10], k: [3, 4], why: WEAK },
+  'forced:left': { n: FORCED, k: [2, 3, 8], why: FORCED_WHY },
+  'forced:right': { n: FORCED, k: [1], why: FORCED_WHY },
+  'forced:middle': { n: FORCED, k: [7], why: FORCED_WHY },
   light: { n: BALL, k: [2, 10], why: `${BALL_WHY}; in 5 they contained but denied the middle` },
   'all-out': { n: BALL, k: [1, 8, 20], why: `${BALL_WHY}; in 7 they denied only one` },
   disguise: { n: [1, 2, 5, 13, 20], k: [2, 5], why: 'pressed, shown shape logged: 14 was a fake' },

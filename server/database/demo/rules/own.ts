@@ -1,7 +1,21 @@
-import { atLeast, atMost, plain, type DemoRule } from './terms'
+import { atLeast, atMost, exactly, plain, type DemoRule } from './terms'
 
 /** DOMAIN.md section 4, rules 47 to 57: our own squad, the rule set and how much we know. */
 export const OWN_RULES: DemoRule[] = [
+  {
+    ...plain,
+    key: 'rule-46',
+    number: 46,
+    title: 'Late time-out moves the ball up: weigh it',
+    when: exactly('timeOutAdvance', 1),
+    then: [
+      {
+        effect: 'warn',
+        text: 'Late in the game a time-out moves the throw-in up: weigh it against the break.',
+      },
+    ],
+    because: 'Under these rules the coach may have the throw-in past half after a late time-out.',
+  },
   {
     ...plain,
     key: 'rule-47',

@@ -38,6 +38,18 @@ export const READ_RULES: DemoRule[] = [
   },
   {
     ...plain,
+    key: 'rule-35',
+    number: 35,
+    title: 'They turn us to one side: start on the other',
+    when: { any: [above('forced:left', 0.7), above('forced:right', 0.7)] },
+    then: [
+      { effect: 'want', trait: 'far-side-reversal', strength: 'medium' },
+      { effect: 'warn', text: 'Start the ball on the side that they do not want it.' },
+    ],
+    because: 'They wait on one side, so the other is the longer way for them.',
+  },
+  {
+    ...plain,
     key: 'rule-36',
     number: 36,
     title: 'Safety leaves early: somebody fast and deep',
@@ -58,6 +70,18 @@ export const READ_RULES: DemoRule[] = [
     when: above('safety-home'),
     then: [{ effect: 'warn', text: 'Over half do not throw long: finish three against two.' }],
     because: 'The safety takes the long pass away and is one of two who defend the basket.',
+  },
+  {
+    ...plain,
+    key: 'rule-38',
+    number: 38,
+    title: 'One of theirs waits in the middle: the line first',
+    when: atLeast('theirStealsInMiddle', 2),
+    then: [
+      { effect: 'want', trait: 'sideline-entry', strength: 'medium' },
+      { effect: 'warn', text: 'Fake to the player in front of their thief, then look up the line.' },
+    ],
+    because: 'The same one has taken the pass to the middle before, and goes on the first look.',
   },
   {
     ...plain,

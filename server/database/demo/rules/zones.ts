@@ -1,4 +1,4 @@
-import { above, atMost, below, plain, type DemoRule } from './terms'
+import { above, atLeast, atMost, below, plain, type DemoRule } from './terms'
 
 /** DOMAIN.md section 4, rules 11 to 22: zone presses. */
 export const ZONE_RULES: DemoRule[] = [
@@ -143,5 +143,14 @@ export const ZONE_RULES: DemoRule[] = [
     because: 'They wait for the ball to change sides, so the next pass is the open one.',
     unless: atMost('backcourtCount', 8),
     unlessBecause: 'Eight seconds leave no time to change sides twice.',
+  },
+  {
+    ...plain,
+    key: 'rule-23',
+    number: 23,
+    title: 'Our middle passes were taken: the best decider there',
+    when: atLeast('ourStealsInMiddle', 2),
+    then: [{ effect: 'warn', text: 'Put the best decider in the middle, not the biggest.' }],
+    because: 'Our pass to the middle has been taken twice or more; there the head counts before the height.',
   },
 ]
