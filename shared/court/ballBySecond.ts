@@ -27,6 +27,26 @@ export function ballBySecond(rows: readonly Tracked[], seconds = 10): BallSecond
   })
 }
 
+/** Slower than this, as a share of the court a second (about 1 m), the ball is held up. */
+const HELD_UNDER = 0.04
+/** Two seconds in a row are a stretch, one is a catch. */
+const HELD_SECONDS = 2
+
+/** The longest stretch of seconds in which the ball hardly comes on, the first of equals; null where there is none. */
+export function heldStretch(
+  ticks: readonly { second: number; x: number }[],
+): { from: number; to: number } | null {
+  let best: { from: number; to: number } | null = null
+  let from = 0
+  ticks.forEach(({ second, x }, i) => {
+    const last = ticks[i - 1]
+    if (!last || second !== last.second + 1 || Math.abs(x - last.x) >= HELD_UNDER) from = second
+    const long = second - from
+    if (long >= HELD_SECONDS && (!best || long > best.to - best.from)) best = { from, to: second }
+  })
+  return best
+}
+
 interface Mark {
   t: number
   x: number

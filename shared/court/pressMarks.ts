@@ -94,6 +94,8 @@ export interface DeniedWay {
   node: GroupNode
   /** Round the gate. */
   box: Box
+  /** Along the dotted line, so that no words lie on it. */
+  line: Box[]
 }
 
 /** Denied lane: a dotted line with a gate of two bars across it. */
@@ -132,7 +134,19 @@ export function deniedLane(pack: RulePack, lane: Denied, side: BallSide, pen: Pe
       ],
     },
     box: { x: middle.x - reach, y: middle.y - reach, width: 2 * reach, height: 2 * reach },
+    line: alongLine(a, b, pen.px(3)),
   }
+}
+
+/** Small boxes that follow a line from end to end. */
+function alongLine(a: Point, b: Point, half: number): Box[] {
+  const count = Math.max(1, Math.ceil(Math.hypot(b.x - a.x, b.y - a.y) / (4 * half)))
+  return Array.from({ length: count + 1 }, (_, i) => ({
+    x: a.x + ((b.x - a.x) * i) / count - half,
+    y: a.y + ((b.y - a.y) * i) / count - half,
+    width: 2 * half,
+    height: 2 * half,
+  }))
 }
 
 /** Where the room lies that a press leaves; fractions, for the ball on the right. */

@@ -3,7 +3,7 @@ import type { InFractions } from './frame'
 import type { HatchMedium } from './hatch'
 import type { BallSide } from './pressMarks'
 import type { RulePack } from './rulePacks'
-import type { BallTick } from './rulers'
+import type { BallTick } from './rulerTicks'
 import type { TrapZone } from './trapZones'
 import type { Crop } from './view'
 

@@ -1,3 +1,4 @@
+import { heldStretch } from './ballBySecond'
 import { courtLines } from './courtLines'
 import { toMetres } from './frame'
 import { labelNodes, placeLabels } from './labels'
@@ -69,7 +70,7 @@ export function pressScene(options: PressSceneOptions): Scene {
       ...standing,
       ...(front ? [front.box] : []),
       ...(roomShown ? [roomShown] : []),
-      ...denied.map(({ way }) => way.box),
+      ...denied.flatMap(({ way }) => [way.box, ...way.line]),
     ]
     const wanted = pressLabels({
       options,
@@ -97,6 +98,7 @@ export function pressScene(options: PressSceneOptions): Scene {
       countRuler(pack, end, pen, {
         throwIn: options.throwInRuler === true,
         ballBySecond: options.ballBySecond,
+        held: heldStretch(options.ballBySecond ?? []),
         type: rulerType(options),
       }),
     )

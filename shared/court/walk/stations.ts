@@ -1,5 +1,5 @@
 import { toPlace, type InMetres } from '../frame'
-import type { BallTick } from '../rulers'
+import type { BallTick } from '../rulerTicks'
 import { standingAt } from './standing'
 import type { Timeline } from './timeline'
 

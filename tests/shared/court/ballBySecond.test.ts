@@ -1,6 +1,6 @@
 import fc from 'fast-check'
 import { describe, expect, it } from 'vitest'
-import { ballBySecond, type Tracked } from '@shared/court/ballBySecond'
+import { ballBySecond, heldStretch, type Tracked } from '@shared/court/ballBySecond'
 
 const track = (...marks: [t: number, x: number][]): Tracked => ({
   track: marks.map(([t, x]) => ({ t, x })),
@@ -65,5 +65,27 @@ describe('ballBySecond', () => {
         }
       }),
     )
+  })
+})
+
+describe('heldStretch', () => {
+  const ticks = (...xs: number[]) => xs.map((x, i) => ({ second: i + 1, x }))
+
+  it('finds where the ball hardly comes on for two seconds or more', () => {
+    expect(heldStretch(ticks(0.09, 0.1, 0.12, 0.36, 0.45))).toEqual({ from: 1, to: 3 })
+    expect(heldStretch(ticks(0.1, 0.2, 0.21, 0.3))).toBeNull()
+    expect(heldStretch(ticks(0.1, 0.11, 0.12, 0.3, 0.31, 0.32, 0.33))).toEqual({ from: 4, to: 7 })
+  })
+
+  it('does not bridge a second that nobody speaks for', () => {
+    expect(
+      heldStretch([
+        { second: 1, x: 0.1 },
+        { second: 2, x: 0.1 },
+        { second: 4, x: 0.1 },
+        { second: 5, x: 0.1 },
+      ]),
+    ).toBeNull()
+    expect(heldStretch([])).toBeNull()
   })
 })

@@ -6,7 +6,7 @@ import { rulePack, type RulePack } from '@shared/court/rulePacks'
 import type { Scene } from '@shared/court/scene'
 import type { Crop } from '@shared/court/view'
 import { anyPack, anyPress } from './arbitraries'
-import { groupOf, textsOf, typeBox } from './sceneParts'
+import { groupOf, pathsOf, textsOf, typeBox } from './sceneParts'
 
 /** The whole court, half of it, and a phone's share of it. */
 const anyCrop: fc.Arbitrary<(pack: RulePack) => Crop> = fc.oneof(
@@ -17,8 +17,17 @@ const anyCrop: fc.Arbitrary<(pack: RulePack) => Crop> = fc.oneof(
   })),
 )
 
+/** Ticks anywhere, or bunched as a press bunches them. */
 const anyTicks = fc
-  .array(fc.double({ min: -0.05, max: 1.02, noNaN: true }), { maxLength: 10 })
+  .oneof(
+    fc.array(fc.double({ min: -0.05, max: 1.02, noNaN: true }), { maxLength: 10 }),
+    fc
+      .tuple(
+        fc.double({ min: 0, max: 0.9, noNaN: true }),
+        fc.array(fc.double({ min: 0, max: 0.03, noNaN: true }), { maxLength: 10 }),
+      )
+      .map(([from, gains]) => gains.map((gain) => from + gain)),
+  )
   .map((xs) => xs.map((x, i) => ({ second: i + 1, x })))
 
 const anySetting = fc.tuple(anyPress, anyCrop, anyTicks, fc.boolean(), fc.constantFrom(1, 1.2))
@@ -64,6 +73,17 @@ describe('the words of a press court', () => {
         expect(words('half')).toEqual([])
       }),
     )
+  })
+
+  it('say where the ball is held up, in their ink, with a bar and a bracket', () => {
+    const ballBySecond = [0.09, 0.1, 0.12, 0.36].map((x, i) => ({ second: i + 1, x }))
+    const ruler = groupOf(
+      pressScene({ pack: rulePack('fiba'), pxPerMetre: 30, zones: [], ballBySecond }),
+      'ruler',
+    )!
+    expect(ruler.label).toBe('over half by 8 seconds; held from 1 to 3 seconds')
+    expect(textsOf(ruler.nodes).find(({ ink }) => ink === 'their')?.text).toBe('held, 1 s to 3 s')
+    expect(pathsOf(ruler.nodes).filter(({ stroke }) => stroke === 'their')).toHaveLength(2)
   })
 
   it('put each second’s number by its own tick, also where some lie off the crop', () => {

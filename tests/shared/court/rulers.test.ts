@@ -1,6 +1,6 @@
 import fc from 'fast-check'
 import { describe, expect, it } from 'vitest'
-import { fanned } from '@shared/court/rulers'
+import { fanned } from '@shared/court/fan'
 import { gameMinute, periodLabel } from '@shared/court/gameTime'
 import { penOf, weightFactor } from '@shared/court/pen'
 import { rulePack } from '@shared/court/rulePacks'
