@@ -10,8 +10,13 @@ import { historyRoutes } from './features/history/history.routes'
 import { mailRoutes } from './features/mail/mail.routes'
 import { opponentPlayerRoutes } from './features/opponents/opponentPlayers.routes'
 import { opponentRoutes } from './features/opponents/opponents.routes'
+import { erasureRoutes } from './features/people/erasures.routes'
+import { invitationRoutes } from './features/people/invitations.routes'
+import { mountJoin } from './features/people/join.routes'
+import { peopleRoutes } from './features/people/people.routes'
 import { planRoutes } from './features/plans/plans.routes'
 import { possessionRoutes } from './features/possessions/possessions.routes'
+import { possessionTableRoutes } from './features/possessions/table.routes'
 import { ruleRoutes } from './features/rules/rules.routes'
 import { scoutedGameRoutes } from './features/scoutedGames/scoutedGames.routes'
 import { passwordLinkRoutes } from './features/session/passwordLink.routes'
@@ -50,8 +55,12 @@ export const endpointsOf = (context: Context): Endpoint[] => [
   ...sheetRoutes(context),
   ...handOutRoutes(context),
   ...mailRoutes(context),
+  ...peopleRoutes(context),
+  ...invitationRoutes(context),
+  ...erasureRoutes(context),
   ...passwordLinkRoutes(context),
   ...historyRoutes(context),
+  ...possessionTableRoutes(context),
   ...deletionRoutes(context),
   ...opponentPlayerRoutes(context),
 ]
@@ -85,6 +94,7 @@ export function createApp(context: Context): Express {
   api.get('/openapi.json', (_req, res) => void res.json(description))
   api.use(middleware)
   mountAccounts(api, context, passport)
+  mountJoin(api, context)
   for (const spec of endpoints)
     mount(api, spec, (req, teamId) =>
       req.user ? callerIn(context.db, req.user, teamId) : Promise.resolve(null),

@@ -16,8 +16,11 @@ import { DEMO_SIGN_INS } from './database/demo/people'
 import { Person } from './database/entities/Person'
 import { carryMail } from './features/mail/carrier'
 import { forgetOldMail } from './features/mail/oldMail'
+import { eraseDue } from './features/people/erasures.service'
+import { firstRunToken } from './features/people/firstCoach.service'
 import { purgeDeleted } from './features/deletion/purge.service'
 import { forgetOldLinks } from './features/session/passwordReset.service'
+import { expireStills } from './features/stills/expiry.service'
 import { SESSION_MS } from './http/passport'
 import { SessionStore } from './http/sessionStore'
 
@@ -72,6 +75,7 @@ async function open(config: Config): Promise<Omit<Booted, 'close'>> {
     sessionSecret: await sessionSecret(config),
   }
   if (config.demo) await loadDemo(context)
+  context.firstRunToken = await firstRunToken(context.db)
   const email = In(DEMO_SIGN_INS.map((person) => person.email))
   return { context, demoIsIn: await context.db.getRepository(Person).existsBy({ email }) }
 }
@@ -83,6 +87,8 @@ export function startHousekeeping(context: Context): () => void {
   const sessions = new SessionStore(context.db, context.clock, SESSION_MS)
   const sweep = async () => {
     await purgeDeleted(context.db, context.stillFiles, context.clock())
+    await eraseDue(context.db, context.clock())
+    await expireStills(context.db, context.stillFiles, context.clock())
     await sessions.sweep()
     await pruneBackups(context.config, context.clock())
     await forgetOldLinks(context)

@@ -16,4 +16,6 @@ export interface Context {
   log: Logger
   /** Signs the session cookie. */
   sessionSecret: string
+  /** Opens the first-run page, while there is no team; printed when the server starts. */
+  firstRunToken?: string | null
 }

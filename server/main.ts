@@ -4,6 +4,7 @@ import { createApp } from './app'
 import { boot, startHousekeeping, type Booted } from './boot'
 import { serveClient } from './clientFiles'
 import { ConfigError, readConfig, type Config } from './config'
+import { linkTo } from './features/mail/linkTo'
 import { DEMO_PASSWORD, DEMO_SIGN_INS } from './database/demo/people'
 
 const say = (line: string) => process.stdout.write(`${line}\n`)
@@ -35,9 +36,12 @@ const stopHousekeeping = startHousekeeping(context)
 const server = app.listen(config.port, config.host, () => {
   const address = server.address()
   const port = typeof address === 'object' && address !== null ? address.port : config.port
-  say(
-    `Overtop is at ${config.publicUrl ?? `http://${config.host === '0.0.0.0' ? 'localhost' : config.host}:${port}`}`,
-  )
+  const reached = { ...config, port }
+  say(`Overtop is at ${linkTo(reached, '/').replace(/\/$/, '')}`)
+  if (context.firstRunToken)
+    say(
+      `There is no team yet. Set the first one up at ${linkTo(reached, `/first-run#${context.firstRunToken}`)}`,
+    )
   if (config.demo && demoIsIn) {
     say(`Demo sign-ins, all with the password ${DEMO_PASSWORD}:`)
     for (const { email, says } of DEMO_SIGN_INS) say(`  ${email.padEnd(30)} ${says}`)

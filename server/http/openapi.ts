@@ -2,6 +2,7 @@ import type { z } from 'zod'
 import { Problem } from '@shared/http/common'
 import type { Endpoint } from './endpoint'
 import { accountPaths } from './openapiAccounts'
+import { joinPaths } from './openapiJoin'
 import { json, problem, Schemas, type Json } from './openapiSchemas'
 
 /** Parameters of a path or a query, one by one. */
@@ -95,7 +96,7 @@ function operation(schemas: Schemas, spec: Endpoint): Json {
 /** The API's description in OpenAPI 3.1, from the same values that mount it. */
 export function describeApi(endpoints: readonly Endpoint[]): Json {
   const schemas = new Schemas()
-  const paths = accountPaths(schemas)
+  const paths = { ...accountPaths(schemas), ...joinPaths(schemas) }
   for (const spec of endpoints) {
     const path = spec.path.replace(/:(\w+)/g, '{$1}')
     paths[path] = { ...paths[path], [spec.method]: operation(schemas, spec) }

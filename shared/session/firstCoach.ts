@@ -5,7 +5,7 @@ import { LIMITS } from '../limits'
 import { Email } from './schemas'
 
 /** An IANA name. Bare offsets are not taken: they know no summer time. */
-const TimeZone = z
+export const TimeZone = z
   .string()
   .trim()
   .refine(isZone, { message: 'This is not a time zone. Write it as Europe/London.' })
@@ -32,3 +32,13 @@ export const FirstCoach = z.object({
   password: z.string().min(LIMITS.passwordShortest).max(LIMITS.passwordLongest),
 })
 export type FirstCoach = z.infer<typeof FirstCoach>
+
+/** The same from the first-run page, with the token that the server printed when it started. */
+export const FirstCoachBySelf = FirstCoach.extend({
+  token: z
+    .string()
+    .trim()
+    .min(1, { message: 'This is missing. Open the address that the server printed.' })
+    .max(100),
+})
+export type FirstCoachBySelf = z.infer<typeof FirstCoachBySelf>

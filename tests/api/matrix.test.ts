@@ -401,6 +401,8 @@ const LAST = [
   'post /games/{id}/restore',
   'delete /opponents/{id}',
   'post /opponents/{id}/restore',
+  'delete /members/{id}',
+  'delete /membership',
 ]
 
 let test: TestApp

@@ -58,6 +58,10 @@ describe('the API’s description', () => {
       'delete /session/everywhere',
       'post /password-resets',
       'post /password-resets/use',
+      'post /invitations/look',
+      'post /invitations/accept',
+      'post /teams',
+      'post /first-coach',
     ]
     expect(operations.map(([path, method]) => `${method} ${path}`).sort()).toEqual(
       [...mounted, ...accounts].sort(),
@@ -128,13 +132,13 @@ describe('the API’s description', () => {
           expect(Object.keys(response.content ?? {})).toEqual(['application/problem+json'])
       }
       if (method === 'get' || method === 'delete') expect(operation).not.toHaveProperty('requestBody')
-      if (path.startsWith('/teams')) expect(ACTIONS as readonly string[], at).toContain(operation['x-action'])
+      if (path.startsWith('/teams/')) expect(ACTIONS as readonly string[], at).toContain(operation['x-action'])
     }
   })
 
   it('says what is too large, and that a page may hold no more', () => {
     for (const [path, method, { requestBody, responses }] of operations)
-      if (path.startsWith('/teams'))
+      if (path.startsWith('/teams/'))
         expect('413' in responses, `${method} ${path}`).toBe(requestBody !== undefined)
     expect(document.paths['/teams/{team}/sheets/{id}.pdf']?.['get']?.responses).toHaveProperty('409')
   })
@@ -142,7 +146,7 @@ describe('the API’s description', () => {
   it('asks for If-Match where a change needs it, and says what a stale or missing one answers', () => {
     for (const [path, method, { parameters = [], responses }] of operations) {
       const has = parameters.some((one) => one.in === 'header' && one.name === 'If-Match')
-      const changes = path.startsWith('/teams') && ['put', 'patch', 'delete'].includes(method)
+      const changes = path.startsWith('/teams/') && ['put', 'patch', 'delete'].includes(method)
       expect(has, `${method} ${path}`).toBe(changes || path.endsWith('/sign-off'))
       expect('412' in responses, `${method} ${path}`).toBe(has)
       expect('428' in responses).toBe(method === 'patch' || path.endsWith('/sign-off'))
