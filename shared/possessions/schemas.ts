@@ -3,6 +3,7 @@ import { Id, RowMeta } from '../http/common'
 import { LIMITS } from '../limits'
 import { SpotName, SpotSide } from '../court/trapSpots'
 import { FALLBACKS, FINISHES, FORCED_SIDES } from '../filmWords'
+import { StillMarks } from '../stills/marks'
 import {
   DENIED,
   GOALIES,
@@ -206,6 +207,7 @@ export type PossessionPatch = Partial<PossessionBody>
 
 export const StillRow = z.object({
   id: z.uuid(),
+  version: z.number().int().positive(),
   position: z.number().int(),
   /** Seconds from the first touch, where known. */
   t: z.number().nullable(),
@@ -214,6 +216,14 @@ export const StillRow = z.object({
   height: z.number().int(),
   url: z.string(),
   thumbnailUrl: z.string(),
+  marks: StillMarks,
+  /** Parts burned away; what was under them is gone. */
+  blurred: z.number().int(),
+  /** Faces that can still be made out; null: nobody has counted. */
+  facesLeft: z.number().int().nullable(),
+  inReport: z.boolean(),
+  /** The last day it is kept, in the team's zone; null until the next sweep gives it one. */
+  expiresOn: z.iso.date().nullable(),
 })
 export type StillRow = z.infer<typeof StillRow>
 

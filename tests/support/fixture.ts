@@ -1,5 +1,6 @@
 import { randomUUID } from 'node:crypto'
 import sharp from 'sharp'
+import { Change } from '@server/database/entities/Change'
 import { Counter } from '@server/database/entities/Counter'
 import { Rule } from '@server/database/entities/Rule'
 import { DEMO_COUNTERS } from '@server/database/demo/counters'
@@ -15,6 +16,8 @@ export interface Fixture {
   opponentPlayer: string
   scoutedGame: string
   possession: string
+  /** A line in the history of the possession. */
+  change: string
   still: string
   game: string
   counters: string[]
@@ -115,6 +118,7 @@ export async function makeFixture(test: TestApp, teamId = TEAM): Promise<Fixture
     opponentPlayer: randomUUID(),
     scoutedGame: randomUUID(),
     possession: randomUUID(),
+    change: randomUUID(),
     still: randomUUID(),
     game: randomUUID(),
     plan: randomUUID(),
@@ -137,6 +141,17 @@ export async function makeFixture(test: TestApp, teamId = TEAM): Promise<Fixture
     head.put(url(`/possessions/${ids.possession}`)).send(possessionBody(ids.scoutedGame)),
     201,
   )
+  await test.context.db.manager.insert(Change, {
+    id: ids.change,
+    teamId,
+    kind: 'possessions',
+    rowId: ids.possession,
+    action: 'changed',
+    personId: null,
+    at: test.context.clock().toISOString(),
+    batchId: null,
+    fields: [{ field: 'outcome', from: 'through', to: 'count' }],
+  })
   await expectStatus(
     head
       .put(url(`/possessions/${ids.possession}/stills/${ids.still}`))

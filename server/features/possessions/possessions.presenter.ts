@@ -1,5 +1,6 @@
 import { spotAt } from '@shared/court/trapSpots'
 import type { PossessionBody, PossessionRow, StillRow } from '@shared/possessions/schemas'
+import { marksOf } from '@shared/stills/marks'
 import { NOT_PRESSED, NOT_VISIBLE } from '@shared/vocabulary'
 import type { Possession } from '../../database/entities/Possession'
 import type { Still } from '../../database/entities/Still'
@@ -64,16 +65,23 @@ export function bodyOfPossession(row: Possession, traps: Trap[]): PossessionBody
 }
 
 export function presentStill(still: Still): StillRow {
-  const url = `/api/teams/${still.teamId}/stills/${still.id}`
+  // Its address changes with its pixels, so that nothing that was kept shows what was burned away.
+  const url = `/api/teams/${still.teamId}/stills/${still.id}?pixels=${still.blurred}`
   return {
     id: still.id,
+    version: still.version,
     position: still.position,
     t: still.t,
     caption: still.caption,
     width: still.width,
     height: still.height,
-    url: `${url}?size=full`,
-    thumbnailUrl: `${url}?size=thumbnail`,
+    url: `${url}&size=full`,
+    thumbnailUrl: `${url}&size=thumbnail`,
+    marks: marksOf(still.marks),
+    blurred: still.blurred,
+    facesLeft: still.facesLeft,
+    inReport: still.inReport,
+    expiresOn: still.expiresOn,
   }
 }
 

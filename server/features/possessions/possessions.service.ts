@@ -67,7 +67,12 @@ async function writeTraps(
   if (rows.length > 0) await manager.insert(Trap, rows)
 }
 
-async function put(manager: EntityManager, write: Write, body: PossessionBody): Promise<Put<Possession>> {
+/** Writes a row inside a transaction of the caller's. @throws NotFound, Conflict, StaleVersion */
+export async function writePossession(
+  manager: EntityManager,
+  write: Write,
+  body: PossessionBody,
+): Promise<Put<Possession>> {
   await checkParents(manager, write.teamId, body)
   return putRow<Possession, PossessionBody>({
     ...write,
@@ -94,7 +99,7 @@ export function putPossession(
   body: PossessionBody,
 ): Promise<{ put: Put<Possession>; whole: WholePossession }> {
   return db.transaction(async (manager) => {
-    const done = await put(manager, write, body)
+    const done = await writePossession(manager, write, body)
     return { put: done, whole: await wholeOf(manager, done.row) }
   })
 }
@@ -116,7 +121,7 @@ export function patchPossession(
       { reportInput: true },
     )
     if (!parsed.success) throw new BadInput(faultsOf(parsed.error))
-    const done = await put(manager, write, parsed.data)
+    const done = await writePossession(manager, write, parsed.data)
     return { put: done, whole: await wholeOf(manager, done.row) }
   })
 }
