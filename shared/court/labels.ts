@@ -54,14 +54,16 @@ export function labelSize(label: Pick<Label, 'lines'>): LabelSize {
 
 /**
  * Sets labels one after the other, each at the first of its wishes that keeps clear of the labels before
- * it and of what must stay visible; failing that, where it may cover a mark; failing that, at the nearest
- * free place. Same input, same result.
+ * it, of what must stay visible and of what is better left clear (`avoid`); failing that, of what must stay
+ * visible alone; failing that, where it may cover a mark; failing that, at the nearest free place. Same
+ * input, same result.
  */
 export function placeLabels(
   labels: readonly Label[],
   area: Box,
   keepClear: readonly Box[],
   gap: number,
+  avoid: readonly Box[] = [],
 ): PlacedLabel[] {
   const placed: PlacedLabel[] = []
   for (const label of labels) {
@@ -71,12 +73,14 @@ export function placeLabels(
     const free = (box: Box) => inside(box, area) && !taken.some((other) => overlaps(box, other))
     const clear = (box: Box) =>
       free(box) && !keepClear.some((other) => other !== label.own && overlaps(box, other))
+    const airy = (box: Box) => clear(box) && !avoid.some((other) => overlaps(box, other))
     const wishes = label.wishes(size)
     const wish = boxAt(wishes[0] ?? area)
-    const near = () => nearest(wish, area, gap * 2, clear, label.stray)
+    const found = (fits: (box: Box) => boolean) =>
+      wishes.find((at) => fits(boxAt(at))) ?? nearest(wish, area, gap * 2, fits, label.stray)
     const spot =
-      wishes.find((at) => clear(boxAt(at))) ??
-      near() ??
+      (avoid.length > 0 ? found(airy) : undefined) ??
+      found(clear) ??
       label.fallbacks?.(size).find((at) => free(boxAt(at))) ??
       nearest(wish, area, gap, free) ??
       wish

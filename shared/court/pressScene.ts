@@ -70,7 +70,7 @@ export function pressScene(options: PressSceneOptions): Scene {
       ...standing,
       ...(front ? [front.box] : []),
       ...(roomShown ? [roomShown] : []),
-      ...denied.flatMap(({ way }) => [way.box, ...way.line]),
+      ...denied.map(({ way }) => way.box),
     ]
     const wanted = pressLabels({
       options,
@@ -82,7 +82,13 @@ export function pressScene(options: PressSceneOptions): Scene {
     })
     const inset = pen.px(4)
     const area = { x: inset, y: inset, width: end - 2 * inset, height: pack.court.width - 2 * inset }
-    const placed = placeLabels(wanted, area, keepClear, pen.px(3))
+    const placed = placeLabels(
+      wanted,
+      area,
+      keepClear,
+      pen.px(3),
+      denied.flatMap(({ way }) => way.line),
+    )
     nodes.push({
       kind: 'group',
       id: 'labels',
