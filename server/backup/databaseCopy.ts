@@ -37,6 +37,8 @@ export function clearCopy(file: string, now: Date): void {
     connection.exec('DELETE FROM "sessions"')
     const has = columnsIn(connection)
     if (has('password_resets', 'id')) connection.exec('DELETE FROM "password_resets"')
+    // A link that still opens a team is not carried about; used ones open nothing.
+    if (has('invitations', 'usedAt')) connection.exec('DELETE FROM "invitations" WHERE "usedAt" IS NULL')
     // A restored letter has no words to leave with: what had not left yet is a failed one, for somebody to look at.
     if (has('mails', 'state'))
       connection.exec(`UPDATE "mails" SET "text" = '', "html" = '',

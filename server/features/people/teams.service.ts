@@ -1,7 +1,7 @@
 import type { DataSource } from 'typeorm'
 import type { NewTeam } from '@shared/people/schemas'
 import { Membership } from '../../database/entities/Membership'
-import { Team } from '../../database/entities/Team'
+import type { Team } from '../../database/entities/Team'
 import { Conflict, NotAllowed } from '../../http/problem'
 import { insertTeam } from './newTeam'
 
