@@ -22,36 +22,45 @@ export function placeInWeek(instant: string, days: readonly string[], timeZone: 
 /** A label on a line of its own under the ruler, so that no two words lie over one another. */
 export interface Label extends Placed {
   lane: number
-  /** Px from the left. */
+  /** Px. */
   left: number
+  width: number
   /** The words stand left of their mark. */
   before: boolean
 }
 
-/** Px: a letter at the labels' size, on average, and what stands between two labels. */
-const LETTER = 7.4
-const GAP = 14
+/** Px: a letter at the labels' size, on average and not too little, and what stands between two labels. */
+const LETTER = 6.9
+const GAP = 12
 
 /** Px that the words of a mark take. */
 export const widthOf = ({ title, under }: Pick<Placed, 'title' | 'under'>): number =>
-  Math.max(title.length, under.length) * LETTER + 8
+  Math.ceil(Math.max(title.length, under.length) * LETTER) + 8
 
-/** Lays labels out from the left: each in the first lane where it is free, turned round at the right edge. */
+/**
+ * Lays labels out from the left: each in the first lane where its words are free right of the mark, or left of it.
+ * @param width px of the whole week
+ */
 export function layOut(placed: readonly Placed[], width: number): Label[] {
-  const taken: { from: number; to: number }[][] = []
+  const lanes: { from: number; to: number }[][] = []
+  const isFree = (lane: number, from: number, to: number) =>
+    (lanes[lane] ?? []).every((taken) => to + GAP <= taken.from || from - GAP >= taken.to)
   return [...placed]
     .sort((a, b) => a.days - b.days)
-    .map((each) => {
+    .map((each): Label => {
       const at = (each.days / 7) * width
-      const wide = widthOf(each)
-      const before = at + wide > width && at - wide >= 0
-      const from = before ? at - wide : Math.min(at, Math.max(0, width - wide))
-      const span = { from: from - GAP / 2, to: from + wide + GAP / 2 }
-      const free = taken.findIndex((lane) =>
-        lane.every(({ from: a, to: b }) => span.to <= a || span.from >= b),
-      )
-      const lane = free === -1 ? taken.length : free
-      taken[lane] = [...(taken[lane] ?? []), span]
-      return { ...each, lane, left: from, before }
+      const wide = Math.min(widthOf(each), width)
+      const sides = [
+        { left: at, before: false },
+        { left: at - wide, before: true },
+      ].filter(({ left }) => left >= 0 && left + wide <= width)
+      // Too long for either side: as far as the edge lets it.
+      if (sides.length === 0) sides.push({ left: Math.max(0, width - wide), before: false })
+      for (let lane = 0; ; lane += 1) {
+        const side = sides.find(({ left }) => isFree(lane, left, left + wide))
+        if (side === undefined) continue
+        lanes[lane] = [...(lanes[lane] ?? []), { from: side.left, to: side.left + wide }]
+        return { ...each, ...side, lane, width: wide }
+      }
     })
 }

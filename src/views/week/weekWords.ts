@@ -103,6 +103,9 @@ function detailOf(game: GameRow): string {
 /** A game that was played waits for a look back for a week, or until the date that was set for it. */
 const LOOK_BACK_DAYS = 7
 
+/** A look back without a date waits until everything else is done. */
+const urgency = ({ due, game }: Waiting): string => due ?? (game.station === 'review' ? '9' : game.tipOff)
+
 /** What is with a person: what is due first stands first, then the game that is played first. */
 export function withMe(games: readonly GameRow[], last: GameRow | null, me: string, now: number): Waiting[] {
   const back =
@@ -124,7 +127,7 @@ export function withMe(games: readonly GameRow[], last: GameRow | null, me: stri
         button,
       }
     })
-    .sort((a, b) => (a.due ?? a.game.tipOff).localeCompare(b.due ?? b.game.tipOff))
+    .sort((a, b) => urgency(a).localeCompare(urgency(b)))
 }
 
 /** "Choose, with you, due Wed 18:00" under a game's rail. */
