@@ -17,6 +17,7 @@ import { peopleRoutes } from './features/people/people.routes'
 import { planRoutes } from './features/plans/plans.routes'
 import { possessionRoutes } from './features/possessions/possessions.routes'
 import { possessionTableRoutes } from './features/possessions/table.routes'
+import { practiceRoutes } from './features/practices/practices.routes'
 import { ruleRoutes } from './features/rules/rules.routes'
 import { scoutedGameRoutes } from './features/scoutedGames/scoutedGames.routes'
 import { passwordLinkRoutes } from './features/session/passwordLink.routes'
@@ -52,6 +53,7 @@ export const endpointsOf = (context: Context): Endpoint[] => [
   ...weekRoutes(context),
   ...choiceRoutes(context),
   ...planRoutes(context),
+  ...practiceRoutes(context),
   ...sheetRoutes(context),
   ...handOutRoutes(context),
   ...mailRoutes(context),

@@ -53,7 +53,15 @@ export const CounterRecord = z.object({
   n: z.number().int(),
 })
 
-export const CounterRow = RowMeta.extend({ ...CounterBody.shape, record: z.array(CounterRecord) })
+export const CounterRow = RowMeta.extend({
+  ...CounterBody.shape,
+  record: z.array(CounterRecord),
+  /**
+   * What practices logged of `liveReps` and `practice`: live reps, and of how many it was counted who got
+   * through. Take it off both before the row is written back.
+   */
+  logged: z.object({ n: z.number().int(), counted: z.number().int(), k: z.number().int() }).optional(),
+})
 export type CounterRow = z.infer<typeof CounterRow>
 export const CounterList = z.object({ rows: z.array(CounterRow), total: z.number().int() })
 export type CounterList = z.infer<typeof CounterList>

@@ -6,6 +6,7 @@ import {
   makeFixture,
   opponentBody,
   possessionBody,
+  practiceBody,
   scoutedGameBody,
   type Fixture,
 } from '../support/fixture'
@@ -245,6 +246,22 @@ const TABLE: Record<string, Row> = {
     success: 200,
     bad: badId,
   },
+  'get /practices': { at: () => ({}), success: 200, bad: { field: '' } },
+  'get /games/{id}/practices': { at: rowsOf.game, success: 200, bad: badId },
+  'get /games/{id}/script': {
+    at: rowsOf.game,
+    success: 200,
+    bad: { query: 'minutes=many', field: 'minutes' },
+  },
+  'get /practices/{id}': { at: (rows) => ({ id: rows.practice }), success: 200, bad: badId },
+  'put /practices/{id}': {
+    at: (rows) => ({ id: rows.practice }),
+    success: 200,
+    body: (rows) => practiceBody(rows.game),
+    bad: { body: { startsAt: 'Thursday' }, field: 'startsAt' },
+  },
+  'delete /practices/{id}': { at: (rows) => ({ id: rows.practice }), success: 204, bad: badId },
+  'post /practices/{id}/restore': { at: (rows) => ({ id: rows.practice }), success: 200, bad: badId },
   'get /sheets/{id}.pdf': {
     at: (rows) => ({ id: rows.sheet }),
     player: true,
@@ -386,6 +403,8 @@ const TABLE: Record<string, Row> = {
 
 /** Rows that change what later rows need go last, and in this order. */
 const LAST = [
+  'delete /practices/{id}',
+  'post /practices/{id}/restore',
   'post /sheets/{id}/recall',
   'put /games/{id}/plan',
   'delete /possessions/{id}/stills/{still}',

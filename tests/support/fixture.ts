@@ -7,6 +7,7 @@ import { DEMO_COUNTERS } from '@server/database/demo/counters'
 import { DEMO_RULES } from '@server/database/demo/rules'
 import { CounterBody } from '@shared/counters/schemas'
 import type { PossessionInput } from '@shared/possessions/schemas'
+import type { PracticeInput } from '@shared/practices/schemas'
 import { RuleBody } from '@shared/rules/schemas'
 import { TEAM, type Agent, type TestApp } from './testApp'
 
@@ -24,6 +25,7 @@ export interface Fixture {
   rule: string
   plan: string
   sheet: string
+  practice: string
   /** A numbered paper of the sheet. */
   copy: string
 }
@@ -61,6 +63,20 @@ export const possessionBody = (
   traps: [{ x: 0.08, y: 0.9, t: 1.8, cue: 'on-catch', result: 'passed-out' }],
   outcome: 'through',
   ...more,
+})
+
+/** A practice of twenty minutes with nothing counted yet. */
+export const practiceBody = (gameId: string): PracticeInput => ({
+  gameId,
+  startsAt: '2026-03-19T17:30:00.000Z',
+  script: {
+    minutes: 20,
+    parts: [{ kind: 'walk', from: 0, minutes: 20, leader: '' }],
+    looks: [],
+    reps: [],
+    cautions: [],
+  },
+  reps: [],
 })
 
 export const jpeg = (width = 640, height = 360): Promise<Buffer> =>
@@ -124,6 +140,7 @@ export async function makeFixture(test: TestApp, teamId = TEAM): Promise<Fixture
     plan: randomUUID(),
     sheet: randomUUID(),
     copy: randomUUID(),
+    practice: randomUUID(),
   }
   const url = (path: string) => teamUrl(path, teamId)
   await expectStatus(head.put(url(`/opponents/${ids.opponent}`)).send(opponentBody()), 201)
@@ -174,5 +191,6 @@ export async function makeFixture(test: TestApp, teamId = TEAM): Promise<Fixture
     200,
   )
   await expectStatus(head.post(url(`/sheets/${ids.sheet}/copies`)).send({ copies: [{ id: ids.copy }] }), 200)
+  await expectStatus(head.put(url(`/practices/${ids.practice}`)).send(practiceBody(ids.game)), 201)
   return { ...ids, counters, rule: rules[0] ?? '' }
 }

@@ -1,4 +1,5 @@
 import { CounterBody, type CounterRow } from '@shared/counters/schemas'
+import type { LoggedReps } from '../../database/counting/liveReps'
 import type { Counter } from '../../database/entities/Counter'
 import { metaOf } from '../../http/present'
 
@@ -8,12 +9,17 @@ export function bodyOfCounter(row: Counter): CounterBody | null {
   return parsed.success ? parsed.data : null
 }
 
+/** A counter with what was logged in practices added to what stands in its own row. */
 export const presentCounter = (
   row: Counter,
   body: CounterBody,
   record: CounterRow['record'],
+  logged: Pick<LoggedReps, 'n' | 'counted' | 'k'> = { n: 0, counted: 0, k: 0 },
 ): CounterRow => ({
   ...metaOf(row),
   ...body,
+  liveReps: body.liveReps + logged.n,
+  practice: { k: body.practice.k + logged.k, n: body.practice.n + logged.counted },
+  logged: { n: logged.n, counted: logged.counted, k: logged.k },
   record,
 })

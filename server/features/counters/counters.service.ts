@@ -1,5 +1,6 @@
 import { IsNull, type EntityManager } from 'typeorm'
 import type { CounterRow } from '@shared/counters/schemas'
+import { countLoggedReps } from '../../database/counting/liveReps'
 import { countRecords } from '../../database/counting/records'
 import { Counter } from '../../database/entities/Counter'
 import { NotFound } from '../../http/problem'
@@ -11,12 +12,13 @@ export async function listCounters(manager: EntityManager, teamId: string): Prom
     .getRepository(Counter)
     .find({ where: { teamId, deletedAt: IsNull() }, order: { name: 'ASC' } })
   const cells = await countRecords(manager, teamId)
+  const logged = new Map((await countLoggedReps(manager, teamId)).map((reps) => [reps.counterId, reps]))
   return rows.flatMap((row) => {
     const body = bodyOfCounter(row)
     const record = cells
       .filter((cell) => cell.counterId === row.id)
       .map(({ shape, k, n }) => ({ shape, k, n }))
-    return body ? [presentCounter(row, body, record)] : []
+    return body ? [presentCounter(row, body, record, logged.get(row.id))] : []
   })
 }
 

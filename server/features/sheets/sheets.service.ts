@@ -40,7 +40,8 @@ export async function getSheet(manager: EntityManager, teamId: string, id: strin
   const plan = await manager.getRepository(Plan).findOneByOrFail({ id: sheet.planId })
   if (plan.deletedAt !== null) throw new NotFound('sheet')
   const content = FrozenPlan.safeParse(plan.frozen)
-  if (!content.success) throw new NotFound('sheet')
+  // A sheet goes with its plan when the game is thrown away.
+  if (!content.success || plan.deletedAt !== null) throw new NotFound('sheet')
   const team = await manager.getRepository(Team).findOneByOrFail({ id: teamId })
   const named = new Set(
     [content.data.firstCall, content.data.changeUp].flatMap(
