@@ -97,6 +97,12 @@ const teamPages: RouteRecordRaw[] = [
     meta: { title: 'Squad', section: 'squad', needs: 'squad:read' },
   },
   {
+    path: 'letters',
+    name: 'letters',
+    component: () => import('@/views/mail/LettersView.vue'),
+    meta: { title: 'Letters', section: 'squad', needs: 'mail:read' },
+  },
+  {
     path: 'sheets',
     name: 'sheets',
     component: () => import('@/views/sheets/SheetListView.vue'),
@@ -119,6 +125,24 @@ export const routes: RouteRecordRaw[] = [
     name: 'sign-in',
     component: () => import('@/views/session/SignInView.vue'),
     meta: { title: 'Sign in', open: true },
+  },
+  {
+    path: '/forgotten-password',
+    name: 'forgotten-password',
+    component: () => import('@/views/session/ForgottenPasswordView.vue'),
+    meta: { title: 'Forgotten password', open: true },
+  },
+  {
+    path: '/new-password',
+    name: 'new-password',
+    component: () => import('@/views/session/NewPasswordView.vue'),
+    meta: { title: 'New password', open: true },
+  },
+  {
+    path: '/me',
+    name: 'you',
+    component: () => import('@/views/session/YouView.vue'),
+    meta: { title: 'You' },
   },
   {
     path: '/teams',
