@@ -1,5 +1,7 @@
-import sharp from 'sharp'
+import sharp, { type Sharp } from 'sharp'
 import { LIMITS } from '@shared/limits'
+import type { Region } from '@shared/stills/marks'
+import { mosaic } from './mosaic'
 
 /** A still ready to be kept: upright, without metadata, no edge over the limits; JPEG. */
 export interface PreparedPicture {
@@ -41,18 +43,30 @@ export async function preparePicture(upload: Buffer): Promise<PreparedPicture> {
     .catch(() => null)
   if (!meta?.width || !meta.height) throw new PictureRefused('not-an-image')
   if (meta.width * meta.height > LIMITS.stillPixels) throw new PictureRefused('too-many-pixels')
+  try {
+    return await bothSizes(() => sharp(upload, options).rotate())
+  } catch {
+    throw new PictureRefused('not-an-image')
+  }
+}
+
+/** Both sizes of a picture, each from a reader of its own. */
+async function bothSizes(read: () => Sharp): Promise<PreparedPicture> {
   const sized = (edge: number, quality: number) =>
-    sharp(upload, options)
-      .rotate()
+    read()
       .resize({ width: edge, height: edge, fit: 'inside', withoutEnlargement: true })
       .flatten({ background: '#ffffff' })
       .jpeg({ quality, mozjpeg: true })
       .toBuffer({ resolveWithObject: true })
-  try {
-    const full = await sized(LIMITS.stillEdge, 84)
-    const thumbnail = await sized(LIMITS.thumbnailEdge, 78)
-    return { full: full.data, thumbnail: thumbnail.data, width: full.info.width, height: full.info.height }
-  } catch {
-    throw new PictureRefused('not-an-image')
-  }
+  const full = await sized(LIMITS.stillEdge, 84)
+  const thumbnail = await sized(LIMITS.thumbnailEdge, 78)
+  return { full: full.data, thumbnail: thumbnail.data, width: full.info.width, height: full.info.height }
+}
+
+/** A kept picture with parts of it burned away; the thumbnail is made from what is left, never from before. */
+export async function blurPicture(full: Buffer, regions: readonly Region[]): Promise<PreparedPicture> {
+  const { data, info } = await sharp(full).raw().toBuffer({ resolveWithObject: true })
+  const { width, height, channels } = info
+  for (const region of regions) mosaic({ data, width, height, channels }, region)
+  return bothSizes(() => sharp(data, { raw: { width, height, channels } }))
 }

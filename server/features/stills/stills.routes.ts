@@ -9,12 +9,18 @@ import { OneRow } from '../../http/params'
 import { NotFound } from '../../http/problem'
 import { oneFile } from '../../http/uploads'
 import { presentStill } from '../possessions/possessions.presenter'
+import { editStillRoutes } from './editStill.routes'
 import { deleteStill, findStill, putStill } from './stills.service'
 
 const OneStill = OneRow.extend({ still: Id })
-const Size = z.object({ size: z.enum(['full', 'thumbnail']).default('full') })
+const Size = z.object({
+  size: z.enum(['full', 'thumbnail']).default('full'),
+  /** Tells the picture before a blur from the one after it; the server always sends the present one. */
+  pixels: z.string().max(9).optional(),
+})
 
-export const stillRoutes = ({ db, clock, stillFiles }: Context) => [
+/** A still's picture; what is drawn and said about it is in `editStillRoutes`. */
+const pictureRoutes = ({ db, clock, stillFiles }: Context) => [
   endpoint({
     method: 'put',
     path: '/teams/:team/possessions/:id/stills/:still',
@@ -61,10 +67,10 @@ export const stillRoutes = ({ db, clock, stillFiles }: Context) => [
     query: Size,
     media: { response: 'image/jpeg' },
     handle: async ({ caller, params, query, res }) => {
-      const still = await findStill(db, caller.teamId, params.id)
+      const still = await findStill(db.manager, caller.teamId, params.id)
       const path = stillFiles.pathOf(still.teamId, still.id, query.size)
       await new Promise<void>((resolve, reject) => {
-        // A still never changes, but a person may leave the team: the browser alone keeps it, and asks.
+        // A still may be blurred, and a person may leave the team: the browser alone keeps it, and asks.
         const options = { headers: { 'Cache-Control': 'private, no-cache' }, dotfiles: 'allow' as const }
         res
           .type('image/jpeg')
@@ -77,3 +83,5 @@ export const stillRoutes = ({ db, clock, stillFiles }: Context) => [
     },
   }),
 ]
+
+export const stillRoutes = (context: Context) => [...pictureRoutes(context), ...editStillRoutes(context)]

@@ -9,6 +9,7 @@ import { Still } from '../../database/entities/Still'
 import { findInTeam } from '../../database/findInTeam'
 import { BadInput, Conflict, NotFound } from '../../http/problem'
 import { getPossession } from '../possessions/possessions.service'
+import { seasonEndOf } from './expiry.service'
 
 interface Upload {
   teamId: string
@@ -70,6 +71,11 @@ export async function putStill(
         width: picture.width,
         height: picture.height,
         digest,
+        blurred: 0,
+        facesLeft: null,
+        inReport: false,
+        expiresOn: await seasonEndOf(manager, teamId, now),
+        version: 1,
         createdAt: now.toISOString(),
       }
       await manager.insert(Still, columns)
@@ -95,8 +101,8 @@ async function same(
   if (
     found.possessionId === possessionId &&
     found.digest === digest &&
-    found.caption === fields.caption &&
-    found.t === fields.t
+    // Once it was worked on, its words are no longer those it was sent with.
+    (found.version > 1 || (found.caption === fields.caption && found.t === fields.t))
   )
     return found
   throw new Conflict('Another picture has this id already. Send this one under a new id.')
@@ -129,9 +135,9 @@ export function deleteStill(
 }
 
 /** The still of an id, for serving its file. @throws NotFound, also when its possession was deleted */
-export async function findStill(db: DataSource, teamId: string, id: string): Promise<Still> {
-  const still = await findInTeam(db.manager, Still, teamId, id, 'still')
-  const there = await db.manager.existsBy(Possession, { id: still.possessionId, deletedAt: IsNull() })
+export async function findStill(manager: EntityManager, teamId: string, id: string): Promise<Still> {
+  const still = await findInTeam(manager, Still, teamId, id, 'still')
+  const there = await manager.existsBy(Possession, { id: still.possessionId, deletedAt: IsNull() })
   if (!there) throw new NotFound('still')
   return still
 }
