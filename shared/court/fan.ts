@@ -24,19 +24,24 @@ export function fanned(xs: readonly number[], apart: number): number[] {
   return result
 }
 
-/** Fanned between two bounds; where they leave no room for all, as far apart as they let them be. */
-export function fannedWithin(xs: readonly number[], apart: number, from: number, to: number): number[] {
-  const step = xs.length > 1 ? Math.min(apart, Math.max(0, to - from) / (xs.length - 1)) : apart
-  const order = fanned(xs, step)
+/** Fanned between two bounds, in the order given; those that the bounds leave no room for, from the last, are null. */
+export function fannedWithin(
+  xs: readonly number[],
+  apart: number,
+  from: number,
+  to: number,
+): (number | null)[] {
+  const fit = to < from ? 0 : Math.floor((to - from) / apart + 1e-9) + 1
+  const kept = xs.slice(0, fit)
+  const order = fanned(kept, apart)
     .map((x, i) => ({ x, i }))
     .sort((a, b) => a.x - b.x || a.i - b.i)
-  const result = [...xs]
+  const result: (number | null)[] = xs.map(() => null)
   let least = from
   order.forEach(({ x, i }, place) => {
-    const most = to - (order.length - 1 - place) * step
-    const at = Math.max(least, Math.min(x, most))
+    const at = Math.max(least, Math.min(x, to - (order.length - 1 - place) * apart))
     result[i] = at
-    least = at + step
+    least = at + apart
   })
   return result
 }

@@ -55,8 +55,9 @@ export function labelSize(label: Pick<Label, 'lines'>): LabelSize {
 /**
  * Sets labels one after the other, each at the first of its wishes that keeps clear of the labels before
  * it, of what must stay visible and of what is better left clear (`avoid`); failing that, of what must stay
- * visible alone; failing that, where it may cover a mark; failing that, at the nearest free place. Same
- * input, same result.
+ * visible alone; failing that, where it may cover a mark; failing that, at the nearest free place. Where no
+ * room is left for all its lines it keeps its first, the count; a label without any room is left out, since
+ * two over one another say nothing. Same input, same result.
  */
 export function placeLabels(
   labels: readonly Label[],
@@ -67,27 +68,40 @@ export function placeLabels(
 ): PlacedLabel[] {
   const placed: PlacedLabel[] = []
   for (const label of labels) {
-    const size = labelSize(label)
+    const short = { ...label, lines: label.lines.slice(0, 1) }
     const taken = placed.map((other) => grown(other.box, gap))
-    const boxAt = (at: Point): Box => ({ x: at.x, y: at.y, ...size })
-    const free = (box: Box) => inside(box, area) && !taken.some((other) => overlaps(box, other))
-    const clear = (box: Box) =>
-      free(box) && !keepClear.some((other) => other !== label.own && overlaps(box, other))
-    const airy = (box: Box) => clear(box) && !avoid.some((other) => overlaps(box, other))
-    const wishes = label.wishes(size)
-    const wish = boxAt(wishes[0] ?? area)
-    const found = (fits: (box: Box) => boolean) =>
-      wishes.find((at) => fits(boxAt(at))) ?? nearest(wish, area, gap * 2, fits, label.stray)
-    const spot =
-      (avoid.length > 0 ? found(airy) : undefined) ??
-      found(clear) ??
-      label.fallbacks?.(size).find((at) => free(boxAt(at))) ??
-      nearest(wish, area, gap, free) ??
-      wish
-    const box = boxAt(spot)
-    placed.push({ label, box, align: ('align' in spot && spot.align) || 'start' })
+    const one =
+      placeOne(label, area, taken, keepClear, gap, avoid) ??
+      (label.lines.length > 1 ? placeOne(short, area, taken, keepClear, gap, avoid) : undefined)
+    if (one) placed.push(one)
   }
   return placed
+}
+
+function placeOne(
+  label: Label,
+  area: Box,
+  taken: readonly Box[],
+  keepClear: readonly Box[],
+  gap: number,
+  avoid: readonly Box[],
+): PlacedLabel | undefined {
+  const size = labelSize(label)
+  const boxAt = (at: Point): Box => ({ x: at.x, y: at.y, ...size })
+  const free = (box: Box) => inside(box, area) && !taken.some((other) => overlaps(box, other))
+  const clear = (box: Box) =>
+    free(box) && !keepClear.some((other) => other !== label.own && overlaps(box, other))
+  const airy = (box: Box) => clear(box) && !avoid.some((other) => overlaps(box, other))
+  const wishes = label.wishes(size)
+  const wish = boxAt(wishes[0] ?? area)
+  const found = (fits: (box: Box) => boolean) =>
+    wishes.find((at) => fits(boxAt(at))) ?? nearest(wish, area, gap * 2, fits, label.stray)
+  const spot =
+    (avoid.length > 0 ? found(airy) : undefined) ??
+    found(clear) ??
+    label.fallbacks?.(size).find((at) => free(boxAt(at))) ??
+    nearest(wish, area, gap, free)
+  return spot && { label, box: boxAt(spot), align: ('align' in spot && spot.align) || 'start' }
 }
 
 /** Looks over the area on a grid, nearest first; at equal distance the upper, then the left one. */

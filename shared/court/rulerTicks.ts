@@ -38,7 +38,10 @@ export const ticksIn = (places: readonly BallTick[], pack: RulePack, end: number
     .map(({ second, x }) => ({ second, x: toMetres(pack, { x, y: 0.5 }).x }))
     .filter(({ x }) => x >= 0 && x <= end)
 
-/** Ticks where the ball is each second. Bunched ticks fan out their numbers; none is left out. */
+/**
+ * Ticks where the ball is each second. Bunched ticks fan out their numbers; only where a crop leaves no room for
+ * all of them do the last ones stand without.
+ */
 export function ballTicks(
   ticks: readonly BallTick[],
   half: number,
@@ -68,16 +71,17 @@ export function ballTicks(
     ),
   ]
   return [...short, ...over].flatMap(({ second, x }, i): SceneNode[] => {
-    const at = places[i] ?? x
+    const at = places[i] ?? null
     const top = axis - pen.px(TICK)
+    const elbow = at === null ? [] : [{ x: at, y: top - pen.px(ELBOW) }]
     return [
       {
         kind: 'path',
-        d: lineD({ x, y: axis }, { x, y: top }, { x: at, y: top - pen.px(ELBOW) }),
+        d: lineD({ x, y: axis }, { x, y: top }, ...elbow),
         stroke: 'graphite',
         strokeWidth: pen.px(1.2),
       },
-      rulerText(String(second), at, top - pen.px(TICK), type, 'middle'),
+      ...(at === null ? [] : [rulerText(String(second), at, top - pen.px(TICK), type, 'middle')]),
     ]
   })
 }

@@ -75,6 +75,22 @@ describe('the words of a press court', () => {
     )
   })
 
+  it('leave a count without its words, or out, only where a crop has no room for it', () => {
+    fc.assert(
+      fc.property(anyPress, (options) => {
+        const words = (crop: Crop) =>
+          textsOf(groupOf(pressScene({ ...options, crop }), 'labels')?.nodes ?? []).filter(({ text }) =>
+            text.includes(' of '),
+          ).length
+        const marks =
+          options.zones.length + options.denied.length + (options.pickup ? 1 : 0) + (options.room ? 1 : 0)
+        expect(words('full')).toBe(marks)
+        expect(words('half')).toBeLessThanOrEqual(marks)
+      }),
+      { numRuns: 40 },
+    )
+  })
+
   it('say where the ball is held up, in their ink, with a bar and a bracket', () => {
     const ballBySecond = [0.09, 0.1, 0.12, 0.36].map((x, i) => ({ second: i + 1, x }))
     const ruler = groupOf(

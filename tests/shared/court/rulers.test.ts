@@ -1,6 +1,6 @@
 import fc from 'fast-check'
 import { describe, expect, it } from 'vitest'
-import { fanned } from '@shared/court/fan'
+import { fanned, fannedWithin } from '@shared/court/fan'
 import { gameMinute, periodLabel } from '@shared/court/gameTime'
 import { penOf, weightFactor } from '@shared/court/pen'
 import { rulePack } from '@shared/court/rulePacks'
@@ -17,6 +17,26 @@ describe('fanned ticks', () => {
           .forEach(({ at }, i) => expect(at - (order[i]?.at ?? 0)).toBeGreaterThanOrEqual(0.5 - 1e-9))
       }),
     )
+  })
+  it('stay between their bounds, and the last go without where those leave no room', () => {
+    fc.assert(
+      fc.property(
+        fc.array(fc.double({ min: 0, max: 14, noNaN: true }), { maxLength: 10 }),
+        fc.double({ min: -1, max: 14, noNaN: true }),
+        (xs, to) => {
+          const result = fannedWithin(xs, 0.5, 0, to)
+          const named = result.filter((at) => at !== null)
+          expect(named).toHaveLength(Math.min(xs.length, to < 0 ? 0 : Math.floor(to / 0.5 + 1e-9) + 1))
+          for (const at of named) {
+            expect(at).toBeGreaterThanOrEqual(-1e-9)
+            expect(at).toBeLessThanOrEqual(to + 1e-6)
+          }
+          const sorted = [...named].sort((a, b) => a - b)
+          sorted.slice(1).forEach((at, i) => expect(at - sorted[i]!).toBeGreaterThanOrEqual(0.5 - 1e-6))
+        },
+      ),
+    )
+    expect(fannedWithin([1, 1, 1], 0.5, 0, 0.6)).toEqual([expect.any(Number), expect.any(Number), null])
   })
   it('stay where they are when there is room', () => {
     expect(fanned([1, 5, 9], 0.5)).toEqual([1, 5, 9])
