@@ -67,15 +67,16 @@ function responses(schemas: Schemas, spec: Endpoint): Json {
       : {}),
     ...(spec.body ? { '413': problem('Too large') } : {}),
     ...Object.fromEntries(Object.entries(spec.problems ?? {}).map(([status, why]) => [status, problem(why)])),
-    ...(spec.method === 'patch' || signsOff(spec) ? { '428': problem('If-Match is missing') } : {}),
+    ...(spec.method === 'patch' || needsVersion(spec) ? { '428': problem('If-Match is missing') } : {}),
   }
 }
 
-const signsOff = ({ path }: Endpoint): boolean => path.endsWith('/sign-off')
+/** POSTs that change one row and need its version. */
+const needsVersion = ({ path }: Endpoint): boolean => path.endsWith('/sign-off') || path.endsWith('/put-back')
 
 /** What changes a row and so minds its version. */
 const edits = (spec: Endpoint): boolean =>
-  spec.method === 'put' || spec.method === 'patch' || spec.method === 'delete' || signsOff(spec)
+  spec.method === 'put' || spec.method === 'patch' || spec.method === 'delete' || needsVersion(spec)
 
 function operation(schemas: Schemas, spec: Endpoint): Json {
   const body = requestBody(schemas, spec)

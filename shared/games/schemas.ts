@@ -1,5 +1,5 @@
 import { z } from 'zod'
-import { Id, Instant, Notes, RowMeta } from '../http/common'
+import { Id, Instant, listQuery, Notes, RowMeta, type ListQuery } from '../http/common'
 import { RulePackKey } from '../court/rulePacks'
 import { LIMITS } from '../limits'
 import { STATIONS, valuesOf } from '../vocabulary'
@@ -65,3 +65,7 @@ export const GameRow = RowMeta.extend({
 export type GameRow = z.infer<typeof GameRow>
 export const GameList = z.object({ rows: z.array(GameRow), total: z.number().int() })
 export type GameList = z.infer<typeof GameList>
+
+/** In the order they are played, unless asked otherwise. */
+export const GamesQuery = listQuery(['tipOff', 'opponent', 'station'])
+export type GamesQuery = ListQuery<'tipOff' | 'opponent' | 'station'>

@@ -37,6 +37,26 @@ export const Problem = z.object({
 })
 export type Problem = z.infer<typeof Problem>
 
+/**
+ * What a list may be asked: words that a row must hold, an order, a page. Everything may be left out; then all
+ * rows come in the list's own order. `direction` goes with `sort` and is rising unless it says otherwise.
+ */
+export const listQuery = <S extends string>(sorts: readonly [S, ...S[]]) =>
+  z.object({
+    q: z.string().trim().max(LIMITS.name).optional(),
+    sort: z.enum(sorts).optional(),
+    direction: z.enum(['asc', 'desc']).optional(),
+    offset: z.coerce.number().int().min(0).optional(),
+    limit: z.coerce.number().int().min(1).max(LIMITS.pageRows).optional(),
+  })
+export type ListQuery<S extends string> = {
+  q?: string | undefined
+  sort?: S | undefined
+  direction?: 'asc' | 'desc' | undefined
+  offset?: number | undefined
+  limit?: number | undefined
+}
+
 /** A page of rows and how many there are in all. */
 export const pageOf = <T extends z.ZodType>(row: T) =>
   z.object({ rows: z.array(row), total: z.number().int().nonnegative() })

@@ -1,5 +1,5 @@
 import { z } from 'zod'
-import { Name, Notes, RowMeta } from '../http/common'
+import { listQuery, Name, Notes, RowMeta, type ListQuery } from '../http/common'
 
 export const OpponentBody = z.object({
   name: Name,
@@ -27,3 +27,7 @@ export const OpponentRow = RowMeta.extend({
 export type OpponentRow = z.infer<typeof OpponentRow>
 export const OpponentList = z.object({ rows: z.array(OpponentRow), total: z.number().int() })
 export type OpponentList = z.infer<typeof OpponentList>
+
+/** By their next meeting, unless asked otherwise. */
+export const OpponentsQuery = listQuery(['meeting', 'name', 'possessions', 'pressed'])
+export type OpponentsQuery = ListQuery<'meeting' | 'name' | 'possessions' | 'pressed'>

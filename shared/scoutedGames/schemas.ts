@@ -1,5 +1,5 @@
 import { z } from 'zod'
-import { Day, Id, Name, Notes, RowMeta } from '../http/common'
+import { Day, Id, listQuery, Name, Notes, RowMeta, type ListQuery } from '../http/common'
 import { RulePackKey } from '../court/rulePacks'
 
 /**
@@ -47,3 +47,7 @@ export const ScoutedGameRow = RowMeta.extend({
 export type ScoutedGameRow = z.infer<typeof ScoutedGameRow>
 export const ScoutedGameList = z.object({ rows: z.array(ScoutedGameRow), total: z.number().int() })
 export type ScoutedGameList = z.infer<typeof ScoutedGameList>
+
+/** Newest first, unless asked otherwise. */
+export const ScoutedGamesQuery = listQuery(['playedOn', 'foe', 'possessions', 'pressed'])
+export type ScoutedGamesQuery = ListQuery<'playedOn' | 'foe' | 'possessions' | 'pressed'>

@@ -4,6 +4,13 @@ import {
   type PossessionInput,
   type PossessionPatch,
 } from '@shared/possessions/schemas'
+import {
+  BatchResult,
+  PossessionTable,
+  type BatchBody,
+  type PutBackBody,
+  type TableQuery,
+} from '@shared/possessions/table'
 import { request, requestNothing, teamPath } from './http'
 
 /** The rows of a game that a scout watched, in order. */
@@ -53,4 +60,40 @@ export function deletePossession(team: string, id: string, version: number): Pro
 
 export function restorePossession(team: string, id: string): Promise<PossessionRow> {
   return request('POST', teamPath(team, 'possessions', id, 'restore'), PossessionRow)
+}
+
+/** What the table may be asked; what is left out is not asked. */
+export type TableAsk = { [K in keyof TableQuery]?: TableQuery[K] | undefined }
+
+/** Possessions against an opponent: filtered, in any order, page by page, with every row as a bar. */
+export function possessionTable(
+  team: string,
+  opponent: string,
+  query: TableAsk = {},
+  signal?: AbortSignal,
+): Promise<PossessionTable> {
+  return request('GET', teamPath(team, 'opponents', opponent, 'possessions'), PossessionTable, {
+    query,
+    signal,
+  })
+}
+
+/** Changes one field in the rows that hold the old value. The same batch again changes nothing. */
+export function changePossessions(team: string, body: BatchBody): Promise<BatchResult> {
+  return request('POST', teamPath(team, 'possessions', 'batch'), BatchResult, { body })
+}
+
+/** Puts back what a batch changed, within a day. */
+export function undoPossessions(team: string, batchId: string): Promise<BatchResult> {
+  return request('POST', teamPath(team, 'possessions', 'batch', batchId, 'undo'), BatchResult)
+}
+
+/** Puts one field back to what it was before one line of the row's history. */
+export function putBackPossession(
+  team: string,
+  id: string,
+  body: PutBackBody,
+  version: number,
+): Promise<PossessionRow> {
+  return request('POST', teamPath(team, 'possessions', id, 'put-back'), PossessionRow, { body, version })
 }

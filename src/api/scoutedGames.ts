@@ -1,13 +1,22 @@
 import type { z } from 'zod'
-import { ScoutedGameList, ScoutedGameRow, type ScoutedGameBody } from '@shared/scoutedGames/schemas'
-import { request, teamPath } from './http'
+import {
+  ScoutedGameList,
+  ScoutedGameRow,
+  type ScoutedGameBody,
+  type ScoutedGamesQuery,
+} from '@shared/scoutedGames/schemas'
+import { request, requestNothing, teamPath } from './http'
 
 export function listScoutedGames(
   team: string,
   opponent: string,
   signal?: AbortSignal,
+  query: ScoutedGamesQuery = {},
 ): Promise<ScoutedGameList> {
-  return request('GET', teamPath(team, 'opponents', opponent, 'scouted-games'), ScoutedGameList, { signal })
+  return request('GET', teamPath(team, 'opponents', opponent, 'scouted-games'), ScoutedGameList, {
+    query,
+    signal,
+  })
 }
 
 export function getScoutedGame(team: string, id: string, signal?: AbortSignal): Promise<ScoutedGameRow> {
@@ -22,4 +31,13 @@ export function putScoutedGame(
   version?: number,
 ): Promise<ScoutedGameRow> {
   return request('PUT', teamPath(team, 'scouted-games', id), ScoutedGameRow, { body, version })
+}
+
+/** With its possessions; can be undone for ten minutes with `restoreScoutedGame`. */
+export function deleteScoutedGame(team: string, id: string, version?: number): Promise<void> {
+  return requestNothing('DELETE', teamPath(team, 'scouted-games', id), { version })
+}
+
+export function restoreScoutedGame(team: string, id: string): Promise<ScoutedGameRow> {
+  return request('POST', teamPath(team, 'scouted-games', id, 'restore'), ScoutedGameRow)
 }

@@ -132,7 +132,8 @@ describe('the API’s description', () => {
           expect(Object.keys(response.content ?? {})).toEqual(['application/problem+json'])
       }
       if (method === 'get' || method === 'delete') expect(operation).not.toHaveProperty('requestBody')
-      if (path.startsWith('/teams/')) expect(ACTIONS as readonly string[], at).toContain(operation['x-action'])
+      if (path.startsWith('/teams/'))
+        expect(ACTIONS as readonly string[], at).toContain(operation['x-action'])
     }
   })
 
@@ -147,9 +148,10 @@ describe('the API’s description', () => {
     for (const [path, method, { parameters = [], responses }] of operations) {
       const has = parameters.some((one) => one.in === 'header' && one.name === 'If-Match')
       const changes = path.startsWith('/teams/') && ['put', 'patch', 'delete'].includes(method)
-      expect(has, `${method} ${path}`).toBe(changes || path.endsWith('/sign-off'))
+      const needed = /\/(sign-off|put-back)$/.test(path)
+      expect(has, `${method} ${path}`).toBe(changes || needed)
       expect('412' in responses, `${method} ${path}`).toBe(has)
-      expect('428' in responses).toBe(method === 'patch' || path.endsWith('/sign-off'))
+      expect('428' in responses).toBe(method === 'patch' || needed)
     }
   })
 })

@@ -1,6 +1,7 @@
 import type { Coach, GameBody, GameRow } from '@shared/games/schemas'
-import type { Station, TeamRole } from '@shared/vocabulary'
+import { STATIONS, valuesOf, type Station, type TeamRole } from '@shared/vocabulary'
 import type { Game } from '../../database/entities/Game'
+import type { Listing } from '../../http/listing'
 import { metaOf } from '../../http/present'
 import { mayHandOn } from './games.policy'
 
@@ -91,4 +92,14 @@ export function presentGame(row: Game, facts: GameFacts, now: Date): GameRow {
     },
     mayHandOn: facts.caller !== null && mayHandOn(facts.caller, holder),
   }
+}
+
+/** How the list of games is searched and ordered. */
+export const GAME_LISTING: Listing<GameRow, 'tipOff' | 'opponent' | 'station'> = {
+  words: (row) => row.opponentName,
+  by: {
+    tipOff: (row) => row.tipOff,
+    opponent: (row) => row.opponentName,
+    station: (row) => valuesOf(STATIONS).indexOf(row.station),
+  },
 }

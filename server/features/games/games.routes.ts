@@ -1,9 +1,11 @@
-import { GameBody, GameList, GameRow, HandOnBody } from '@shared/games/schemas'
+import { GameBody, GameList, GameRow, GamesQuery, HandOnBody } from '@shared/games/schemas'
 import type { Context } from '../../context'
 import { endpoint, ok } from '../../http/endpoint'
 import { InTeam, OneRow } from '../../http/params'
-import { listReply, putReply } from '../../http/present'
+import { listPage } from '../../http/listing'
+import { putReply } from '../../http/present'
 import { getGame, listGames, putGame } from './games.service'
+import { GAME_LISTING } from './games.presenter'
 import { handOn, signRead } from './handOn.service'
 
 export const gameRoutes = ({ db, clock }: Context) => [
@@ -13,8 +15,10 @@ export const gameRoutes = ({ db, clock }: Context) => [
     summary: 'Our games in the order they are played, with where the work stands',
     action: 'game:read',
     params: InTeam,
+    query: GamesQuery,
     response: GameList,
-    handle: async ({ caller }) => listReply(await listGames(db, caller.teamId, clock(), caller)),
+    handle: async ({ caller, query }) =>
+      ok(listPage(await listGames(db, caller.teamId, clock(), caller), query, GAME_LISTING)),
   }),
   endpoint({
     method: 'get',

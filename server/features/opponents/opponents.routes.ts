@@ -1,11 +1,12 @@
-import { OpponentBody, OpponentList, OpponentRow } from '@shared/opponents/schemas'
+import { OpponentBody, OpponentList, OpponentRow, OpponentsQuery } from '@shared/opponents/schemas'
 import type { Context } from '../../context'
 import { findInTeam } from '../../database/findInTeam'
 import { Opponent } from '../../database/entities/Opponent'
 import { endpoint, ok } from '../../http/endpoint'
 import { InTeam, OneRow } from '../../http/params'
-import { listReply, putReply } from '../../http/present'
-import { presentOpponent } from './opponents.presenter'
+import { listPage } from '../../http/listing'
+import { putReply } from '../../http/present'
+import { OPPONENT_LISTING, presentOpponent } from './opponents.presenter'
 import { countsOf, listOpponents, putOpponent } from './opponents.service'
 
 export const opponentRoutes = ({ db, clock }: Context) => [
@@ -15,8 +16,10 @@ export const opponentRoutes = ({ db, clock }: Context) => [
     summary: 'Opponents of the team, next meeting first',
     action: 'opponent:read',
     params: InTeam,
+    query: OpponentsQuery,
     response: OpponentList,
-    handle: async ({ caller }) => listReply(await listOpponents(db, caller.teamId, clock())),
+    handle: async ({ caller, query }) =>
+      ok(listPage(await listOpponents(db, caller.teamId, clock()), query, OPPONENT_LISTING)),
   }),
   endpoint({
     method: 'get',

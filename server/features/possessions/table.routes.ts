@@ -59,10 +59,6 @@ export const possessionTableRoutes = ({ db, clock }: Context) => [
     params: OneRow,
     body: PutBackBody,
     response: PossessionRow,
-    problems: {
-      412: 'The row was changed since; the present one comes with it.',
-      428: 'Send If-Match with the version that you read.',
-    },
     handle: async ({ caller, params, body, ifMatch }) => {
       const write = { id: params.id, teamId: caller.teamId, ifMatch, now: clock(), by: caller.personId }
       const { put, whole } = await putBack(db, write, body)

@@ -1,5 +1,6 @@
 import type { Coverage, ScoutedGameBody, ScoutedGameRow } from '@shared/scoutedGames/schemas'
 import type { ScoutedGame } from '../../database/entities/ScoutedGame'
+import type { Listing } from '../../http/listing'
 import { metaOf } from '../../http/present'
 
 const coverageOf = (row: ScoutedGame): Coverage =>
@@ -29,3 +30,14 @@ export const presentScoutedGame = (
   scout: row.scout?.name ?? null,
   counts,
 })
+
+/** How the list of scouted games is searched and ordered. */
+export const SCOUTED_GAME_LISTING: Listing<ScoutedGameRow, 'playedOn' | 'foe' | 'possessions' | 'pressed'> = {
+  words: (row) => `${row.foe} ${row.scout ?? ''}`,
+  by: {
+    playedOn: (row) => row.playedOn,
+    foe: (row) => row.foe,
+    possessions: (row) => row.counts.possessions,
+    pressed: (row) => row.counts.pressed,
+  },
+}

@@ -1,8 +1,15 @@
-import { ScoutedGameBody, ScoutedGameList, ScoutedGameRow } from '@shared/scoutedGames/schemas'
+import {
+  ScoutedGameBody,
+  ScoutedGameList,
+  ScoutedGameRow,
+  ScoutedGamesQuery,
+} from '@shared/scoutedGames/schemas'
 import type { Context } from '../../context'
 import { endpoint, ok } from '../../http/endpoint'
 import { OneRow } from '../../http/params'
-import { listReply, putReply } from '../../http/present'
+import { listPage } from '../../http/listing'
+import { putReply } from '../../http/present'
+import { SCOUTED_GAME_LISTING } from './scoutedGames.presenter'
 import { getScoutedGame, listScoutedGames, putScoutedGame } from './scoutedGames.service'
 
 export const scoutedGameRoutes = ({ db, clock }: Context) => [
@@ -12,8 +19,10 @@ export const scoutedGameRoutes = ({ db, clock }: Context) => [
     summary: 'Games of an opponent that a scout watched, newest first',
     action: 'scouting:read',
     params: OneRow,
+    query: ScoutedGamesQuery,
     response: ScoutedGameList,
-    handle: async ({ caller, params }) => listReply(await listScoutedGames(db, caller.teamId, params.id)),
+    handle: async ({ caller, params, query }) =>
+      ok(listPage(await listScoutedGames(db, caller.teamId, params.id), query, SCOUTED_GAME_LISTING)),
   }),
   endpoint({
     method: 'get',
