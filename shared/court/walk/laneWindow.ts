@@ -9,7 +9,7 @@ export type Verdict = 'open' | 'tight' | 'closed'
 export interface Lane {
   from: InMetres
   at: InMetres
-  flight: PassFlight
+  flight: Pick<PassFlight, 'seconds' | 'heightAt'>
 }
 
 export interface Defender {

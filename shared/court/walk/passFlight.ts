@@ -1,5 +1,5 @@
 import type { Move } from '../diagram'
-import { GRAVITY, launchSpeed } from './projectile'
+import { GRAVITY, apex, launchSpeed } from './projectile'
 import type { WalkSettings } from './settings'
 
 export type Flight = Extract<Move, { kind: 'pass' }>['flight']
@@ -9,6 +9,8 @@ export interface PassFlight {
   seconds: number
   /** How high the ball is at a share (0 to 1) of its flight, metres; null where height plays no part. */
   heightAt: ((share: number) => number) | null
+  /** The highest that it gets, metres above the floor; null where height plays no part. */
+  top: number | null
 }
 
 /**
@@ -17,18 +19,23 @@ export interface PassFlight {
  * angle (the catch is higher than the line) goes straight.
  */
 export function passFlight(flight: Flight, metres: number, settings: WalkSettings): PassFlight {
-  if (flight === 'bounce') return { seconds: metres / settings.bounceSpeed, heightAt: null }
-  const { lobAngle, releaseHeight, catchHeight } = settings
-  const speed = flight === 'lob' ? launchSpeed(metres, lobAngle, catchHeight - releaseHeight) : null
-  if (speed === null) return { seconds: metres / settings.straightSpeed, heightAt: null }
-  const angle = (lobAngle * Math.PI) / 180
-  const seconds = metres / (speed * Math.cos(angle))
-  const up = speed * Math.sin(angle)
+  const { lobAngle: angle, releaseHeight, catchHeight } = settings
+  const speed = flight === 'lob' ? launchSpeed(metres, angle, catchHeight - releaseHeight) : null
+  if (speed === null) {
+    const overFloor = flight === 'bounce' ? settings.bounceSpeed : settings.straightSpeed
+    return { seconds: metres / overFloor, heightAt: null, top: null }
+  }
+  const radians = (angle * Math.PI) / 180
+  const seconds = metres / (speed * Math.cos(radians))
+  const up = speed * Math.sin(radians)
+  const highest = apex({ speed, angle })
   return {
     seconds,
     heightAt: (share) => {
       const t = share * seconds
       return releaseHeight + up * t - (GRAVITY * t * t) / 2
     },
+    // Caught on the way up, the ball is at its highest in the hands.
+    top: highest.seconds < seconds ? releaseHeight + highest.height : catchHeight,
   }
 }

@@ -43,6 +43,8 @@ export interface BallFlight {
   at: InMetres
   /** Metres above the floor at a share of the flight; null where height plays no part. */
   heightAt: ((share: number) => number) | null
+  /** The highest that it gets, metres; null where height plays no part. */
+  top: number | null
 }
 
 /** One player's whole trip, in order of time. */

@@ -135,10 +135,10 @@ export class TripClock {
     if (!by || !receiver) return
     const [from, at] = [by.at, receiver.at]
     const length = Math.hypot(at.x - from.x, at.y - from.y)
-    const { seconds, heightAt } = passFlight(move.flight, length, this.settings)
+    const { seconds, heightAt, top } = passFlight(move.flight, length, this.settings)
     const start = Math.max(began, this.ballFree, this.freeAt(move.from), this.freeAt(move.to) - seconds)
     const end = start + seconds
-    this.flights.push({ step, index, by: move.from, to: move.to, start, end, from, at, heightAt })
+    this.flights.push({ step, index, by: move.from, to: move.to, start, end, from, at, heightAt, top })
     this.moves.push({ step, index, move, from, to: at, start, end, length })
     this.free.set(move.from, Math.max(this.freeAt(move.from), start))
     this.free.set(move.to, Math.max(this.freeAt(move.to), end))

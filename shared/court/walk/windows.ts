@@ -20,6 +20,8 @@ export interface PassWindow extends LaneWindow {
   length: number
   /** In the air. */
   seconds: number
+  /** How high a lob gets, metres; null for any other pass. */
+  top: number | null
   /** "On when X3 is two strides behind; as drawn, one." */
   words: string
 }
@@ -42,6 +44,7 @@ export function passWindows(timeline: Timeline): PassWindow[] {
         start: flight.start,
         length: timed.length,
         seconds: flight.end - flight.start,
+        top: flight.top,
         words: windowWords(window, timeline.settings),
       },
     ]

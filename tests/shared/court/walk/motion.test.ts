@@ -59,7 +59,8 @@ describe('a flight', () => {
   it('of a lob leaves and comes down at the heights of the settings, over both of them between', () => {
     fc.assert(
       fc.property(fc.double({ min: 3, max: 28, noNaN: true }), (far) => {
-        const { heightAt, seconds } = passFlight('lob', far, DEFAULT_WALK)
+        const { heightAt, seconds, top } = passFlight('lob', far, DEFAULT_WALK)
+        expect(top).toBeCloseTo(heightAt?.(0.5) ?? NaN, 9)
         expect(heightAt?.(0)).toBeCloseTo(DEFAULT_WALK.releaseHeight, 9)
         expect(heightAt?.(1)).toBeCloseTo(DEFAULT_WALK.catchHeight, 9)
         const speed = launchSpeed(far, DEFAULT_WALK.lobAngle) ?? NaN
@@ -81,7 +82,21 @@ describe('a flight', () => {
 
   it('of a lob that cannot come down to the catch goes straight', () => {
     const settings = { ...DEFAULT_WALK, releaseHeight: 1, catchHeight: 3, lobAngle: 30 }
-    expect(passFlight('lob', 1, settings)).toEqual({ seconds: 1 / settings.straightSpeed, heightAt: null })
+    expect(passFlight('lob', 1, settings)).toEqual({
+      seconds: 1 / settings.straightSpeed,
+      heightAt: null,
+      top: null,
+    })
+  })
+
+  it('is never higher than its top, also where it is caught on the way up', () => {
+    const settings = { ...DEFAULT_WALK, releaseHeight: 1, catchHeight: 3 }
+    for (const far of [2.6, 3, 6, 15]) {
+      const { heightAt, top } = passFlight('lob', far, settings)
+      const heights = Array.from({ length: 21 }, (_, i) => heightAt?.(i / 20) ?? NaN)
+      expect(Math.max(...heights)).toBeLessThanOrEqual((top ?? NaN) + 1e-9)
+      expect(heightAt?.(1)).toBeCloseTo(3, 9)
+    }
   })
 
   it('knows where no speed is enough', () => {
