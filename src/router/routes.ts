@@ -65,6 +65,13 @@ const teamPages: RouteRecordRaw[] = [
     meta: { title: 'Read', section: 'opponents', needs: 'scouting:read' },
   },
   {
+    path: 'opponents/:opponent/possessions',
+    name: 'possessions',
+    component: () => import('@/views/possessionTable/PossessionsView.vue'),
+    props: true,
+    meta: { title: 'Possessions', section: 'opponents', needs: 'scouting:read' },
+  },
+  {
     path: 'games/:game/choose',
     name: 'choose',
     component: () => import('@/views/choices/ChooseView.vue'),
