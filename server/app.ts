@@ -14,6 +14,7 @@ import { erasureRoutes } from './features/people/erasures.routes'
 import { invitationRoutes } from './features/people/invitations.routes'
 import { mountJoin } from './features/people/join.routes'
 import { peopleRoutes } from './features/people/people.routes'
+import { stripRoutes } from './features/opponents/strips.routes'
 import { planRoutes } from './features/plans/plans.routes'
 import { possessionRoutes } from './features/possessions/possessions.routes'
 import { possessionTableRoutes } from './features/possessions/table.routes'
@@ -27,6 +28,7 @@ import { handOutRoutes } from './features/sheets/handOut.routes'
 import { sheetRoutes } from './features/sheets/sheets.routes'
 import { squadRoutes } from './features/squad/squad.routes'
 import { stillRoutes } from './features/stills/stills.routes'
+import { teamRoutes } from './features/team/team.routes'
 import { tendencyRoutes } from './features/tendencies/tendencies.routes'
 import { weekRoutes } from './features/week/week.routes'
 import { notTooDeep } from './http/depth'
@@ -42,12 +44,14 @@ import { LIMITS } from '@shared/limits'
 /** Every team endpoint of the API; mounted and described from this one list. */
 export const endpointsOf = (context: Context): Endpoint[] => [
   ...opponentRoutes(context),
+  ...stripRoutes(context),
   ...scoutedGameRoutes(context),
   ...possessionRoutes(context),
   ...stillRoutes(context),
   ...tendencyRoutes(context),
   ...counterRoutes(context),
   ...ruleRoutes(context),
+  ...teamRoutes(context),
   ...squadRoutes(context),
   ...gameRoutes(context),
   ...weekRoutes(context),

@@ -65,6 +65,7 @@ const invitation = { role: 'assistant-coach', way: 'link' }
 
 const TABLE: Record<string, Row> = {
   'get /opponents': { at: () => ({}), success: 200, bad: { field: '' } },
+  'get /strips': { at: () => ({}), success: 200, bad: { field: '' } },
   'get /opponents/{id}': { at: rowsOf.opponent, success: 200, bad: badId },
   'put /opponents/{id}': {
     at: rowsOf.opponent,
