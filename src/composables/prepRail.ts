@@ -61,6 +61,6 @@ function pageOf(game: GameRow, station: Station, team: string): RouteLocationRaw
   if (station === 'scout') return { name: 'scouted-games', params: { team, opponent: game.opponentId } }
   if (station === 'read') return { name: 'read', params: { team, opponent: game.opponentId } }
   if (station === 'choose') return { name: 'choose', params: { team, game: game.id } }
-  if (station === 'teach' && game.plan?.signedAt) return { name: 'sheets', params: { team } }
+  if (station === 'teach') return { name: 'teach', params: { team, game: game.id } }
   return undefined
 }

@@ -37,6 +37,13 @@ const teamPages: RouteRecordRaw[] = [
     redirect: (to) => ({ name: 'read', params: to.params }),
   },
   {
+    path: 'opponents/:opponent/about',
+    name: 'about-opponent',
+    component: () => import('@/views/opponents/AboutView.vue'),
+    props: true,
+    meta: { title: 'About them', section: 'opponents', needs: 'opponent:read' },
+  },
+  {
     path: 'opponents/:opponent/scouted-games',
     name: 'scouted-games',
     component: () => import('@/views/scoutedGames/ScoutedGamesView.vue'),
@@ -79,6 +86,13 @@ const teamPages: RouteRecordRaw[] = [
     meta: { title: 'Choose', section: 'opponents', needs: 'plan:read' },
   },
   {
+    path: 'games/:game/teach',
+    name: 'teach',
+    component: () => import('@/views/teach/TeachView.vue'),
+    props: true,
+    meta: { title: 'Teach', section: 'opponents', needs: 'practice:read' },
+  },
+  {
     path: 'library',
     name: 'library',
     component: () => import('@/views/counters/LibraryView.vue'),
@@ -102,6 +116,12 @@ const teamPages: RouteRecordRaw[] = [
     name: 'squad',
     component: () => import('@/views/squad/SquadView.vue'),
     meta: { title: 'Squad', section: 'squad', needs: 'squad:read' },
+  },
+  {
+    path: 'people',
+    name: 'people',
+    component: () => import('@/views/people/PeopleView.vue'),
+    meta: { title: 'People', section: 'squad', needs: 'team:read' },
   },
   {
     path: 'letters',
@@ -150,6 +170,18 @@ export const routes: RouteRecordRaw[] = [
     name: 'you',
     component: () => import('@/views/session/YouView.vue'),
     meta: { title: 'You' },
+  },
+  {
+    path: '/join',
+    name: 'join',
+    component: () => import('@/views/people/JoinView.vue'),
+    meta: { title: 'Join a team', open: true },
+  },
+  {
+    path: '/first-run',
+    name: 'first-run',
+    component: () => import('@/views/firstRun/FirstRunView.vue'),
+    meta: { title: 'Set the first team up', open: true },
   },
   {
     path: '/teams',
