@@ -24,7 +24,11 @@ export async function linkForMember(
     const mine = new Set(led.map(({ teamId }) => teamId))
     if (!theirs.every(({ teamId }) => mine.has(teamId)))
       throw new Conflict(
-        'This person is also on a team that you do not coach. They can ask for a link themselves, on the page “Forgotten password”.',
+        `This person is also on a team that you do not coach, so no link is made here. ${
+          context.mail === null
+            ? 'Whoever runs this server can set a mail server; then they can ask for a link themselves.'
+            : 'They can ask for one themselves, on the page “Forgotten password”.'
+        }`,
       )
     return makePasswordLink(context, manager, member.personId)
   })
