@@ -1,5 +1,6 @@
 import { StillRow } from '@shared/possessions/schemas'
-import { requestNothing, teamPath, upload, type UploadOptions } from './http'
+import type { BlurBody, StillPatch } from '@shared/stills/schemas'
+import { request, requestNothing, teamPath, upload, type UploadOptions } from './http'
 
 export interface StillText {
   /** Seconds from the first touch; null when not known. */
@@ -26,4 +27,20 @@ export function putStill(
 
 export function deleteStill(team: string, possession: string, id: string): Promise<void> {
   return requestNothing('DELETE', teamPath(team, 'possessions', possession, 'stills', id))
+}
+
+/** Changes the fields given. `current` of a 412 is the present row. */
+export function patchStill(
+  team: string,
+  id: string,
+  patch: StillPatch,
+  version: number,
+  signal?: AbortSignal,
+): Promise<StillRow> {
+  return request('PATCH', teamPath(team, 'stills', id), StillRow, { body: patch, version, signal })
+}
+
+/** Burns parts of the picture away; nobody can undo it. */
+export function blurStill(team: string, id: string, body: BlurBody, version: number): Promise<StillRow> {
+  return request('POST', teamPath(team, 'stills', id, 'blur'), StillRow, { body, version })
 }
