@@ -11,13 +11,18 @@ const SHOWN = 3
 const LOOKED_AT = 8
 
 /** A habit as it would stand after one more game of theirs in which it came so often. */
-function after(cells: readonly HabitCell[], key: string, k: number): EngineTendency | undefined {
+function after(
+  cells: readonly HabitCell[],
+  key: string,
+  k: number,
+  settings: ChooseInput['settings'],
+): EngineTendency | undefined {
   const own = cells.filter((cell) => cell.habitKey === key)
   const trigger = own[0]?.trigger ?? 'made-basket'
   const older = own.map((cell) => ({ ...cell, gameAge: cell.gameAge + 1 }))
   const next = { habitKey: key, gameId: 'next', gameAge: 0, trigger, k, n: NEXT }
   const habit = habitOf(key)
-  return habit && tendencies([...older, next], { habits: [habit] })[0]
+  return habit && tendencies([...older, next], { habits: [habit], settings })[0]
 }
 
 /** The habits that speak in the reasons of the counters on top, the heaviest first. */
@@ -40,7 +45,7 @@ export async function whatWouldTurn(input: ChooseInput, cells: readonly HabitCel
   const [leader] = now.choices
   if (leader === undefined || now.unknown) return []
   const leaderAfter = async (key: string, k: number): Promise<string | null> => {
-    const changed = after(cells, key, k)
+    const changed = after(cells, key, k, input.settings)
     if (changed === undefined) return null
     const list = input.tendencies.map((tendency) => (tendency.key === key ? changed : tendency))
     return (await chooseCounters({ ...input, tendencies: list })).choices[0]?.counterId ?? null

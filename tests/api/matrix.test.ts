@@ -63,6 +63,15 @@ const batchBody = (id: string) => ({
 
 const invitation = { role: 'assistant-coach', way: 'link' }
 
+const teamBody = {
+  name: 'Herons',
+  squadName: 'U17 girls',
+  timeZone: 'Europe/London',
+  season: '2026-27',
+  rulePack: 'fiba',
+  settings: {},
+}
+
 const TABLE: Record<string, Row> = {
   'get /opponents': { at: () => ({}), success: 200, bad: { field: '' } },
   'get /strips': { at: () => ({}), success: 200, bad: { field: '' } },
@@ -152,6 +161,15 @@ const TABLE: Record<string, Row> = {
     success: 200,
     body: () => ruleBody,
     bad: { body: { ...ruleBody, because: '' }, field: 'because' },
+  },
+  'get /settings': { at: () => ({}), success: 200, bad: { field: '' } },
+  'put /settings': {
+    at: () => ({}),
+    headOnly: true,
+    success: 200,
+    body: () => teamBody,
+    ifMatch: '"1"',
+    bad: { body: { ...teamBody, season: 'this one' }, field: 'season' },
   },
   'get /squad': { at: () => ({}), success: 200, bad: { field: '' } },
   'get /squad/{id}': { at: () => ({ id: PLAYER }), success: 200, bad: badId },

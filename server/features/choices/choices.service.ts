@@ -20,6 +20,7 @@ import { dayInZone } from '../../http/zone'
 import { listCounters } from '../counters/counters.service'
 import { listRules } from '../rules/rules.service'
 import { presentSquadPlayer } from '../squad/squad.presenter'
+import { engineSettings } from '../team/team.service'
 import { readOpponent, type OpponentRead } from '../tendencies/readOpponent'
 
 /** The calendar day of a game in the team's zone. */
@@ -68,12 +69,14 @@ export async function chooseInput(
   gameId: string,
 ): Promise<{ input: ChooseInput; opponentId: string; cells: OpponentRead['cells'] }> {
   const game = await findInTeam(manager, Game, teamId, gameId, 'game')
-  const read = await readOpponent(manager, game.opponentId, {})
+  const settings = await engineSettings(manager, teamId)
+  const read = await readOpponent(manager, game.opponentId, {}, settings)
   const pack = rulePack(game.rulePack)
   const counters = await listCounters(manager, teamId)
   const day = await dayOf(manager, teamId, game.tipOff)
   const input: ChooseInput = {
     tendencies: read.tendencies,
+    settings,
     rules: await listRules(manager, teamId),
     counters,
     squad: await squadOn(manager, teamId, game.tipOff),

@@ -3,8 +3,9 @@ import { Change } from '../../database/entities/Change'
 import { undoUntil } from '../../database/hanging'
 import { NotFound } from '../../http/problem'
 
-/** Whether a row of any table of the team has this id and is there, or can still be put back. */
+/** Whether the team itself or a row of any of its tables has this id and is there, or can still be put back. */
 async function isOfTeam(manager: EntityManager, teamId: string, id: string, now: Date): Promise<boolean> {
+  if (id === teamId) return true
   const tables = manager.connection.entityMetadatas.filter((entity) =>
     ['teamId', 'deletedAt', 'version'].every((column) => entity.findColumnWithPropertyName(column)),
   )

@@ -11,6 +11,7 @@ import {
   countSpots,
   type CountedGame,
 } from '../../database/counting/tendencyCounts'
+import type { EngineSettings } from '../../engine/settings'
 import { luckOf, tendencies, type EngineTendency, type HabitCell } from '../../engine/tendencies'
 
 /** What is counted of an opponent in a situation, with the engine's own numbers beside it. */
@@ -43,17 +44,22 @@ function medianPickup(rows: Awaited<ReturnType<typeof countPickups>>): TendencyR
 const countOf = (list: readonly EngineTendency[], key: string) =>
   list.find((tendency) => tendency.key === key)
 
-/** Counts, tendencies, spots and luck of an opponent. An empty filter is the whole read. */
+/** Counts, tendencies, spots and luck of an opponent. An empty filter is the whole read; figures default to RECORD.md's. */
 export async function readOpponent(
   manager: EntityManager,
   opponentId: string,
   filter: TendencyFilter,
+  settings?: EngineSettings,
 ): Promise<OpponentRead> {
   const { games, notCovered } = await countGames(manager, opponentId, filter)
   const ages = new Map(games.map((game) => [game.id, game.age]))
   // All triggers are counted: what a filter leaves out still says how their rate usually lies (pooling).
   const cells = await countHabits(manager, opponentId, { ...filter, trigger: undefined }, ages)
-  const list = tendencies(cells, { situation: narrows(filter), triggers: filter.trigger ?? null })
+  const list = tendencies(cells, {
+    situation: narrows(filter),
+    triggers: filter.trigger ?? null,
+    settings,
+  })
   const counted = await countSituations(manager, opponentId, filter)
   const all = counted.reduce((sum, row) => ({ n: sum.n + row.n, pressed: sum.pressed + row.pressed }), {
     n: 0,

@@ -5,6 +5,7 @@ import { Opponent } from '../../database/entities/Opponent'
 import { endpoint, ok } from '../../http/endpoint'
 import { OneRow } from '../../http/params'
 import { readEvidence } from './evidence.service'
+import { engineSettings } from '../team/team.service'
 import { readOpponent } from './readOpponent'
 import { presentRead } from './tendencies.presenter'
 
@@ -19,7 +20,12 @@ export const tendencyRoutes = ({ db }: Context) => [
     response: TendencyRead,
     handle: async ({ caller, params, query }) => {
       await findInTeam(db.manager, Opponent, caller.teamId, params.id, 'opponent')
-      return ok(presentRead(params.id, await readOpponent(db.manager, params.id, query)))
+      return ok(
+        presentRead(
+          params.id,
+          await readOpponent(db.manager, params.id, query, await engineSettings(db.manager, caller.teamId)),
+        ),
+      )
     },
   }),
   endpoint({
