@@ -1,14 +1,21 @@
 import { randomUUID } from 'node:crypto'
+import { readFile } from 'node:fs/promises'
+import { join } from 'node:path'
 import sharp from 'sharp'
 import { afterEach, beforeEach, describe, expect, it } from 'vitest'
 import type { LetterBody } from '@server/adapters/mail/letter'
 import { smtpTransport } from '@server/adapters/mail/smtp'
+import { clearCopy, copyDatabase } from '@server/backup/databaseCopy'
+import { openDatabase } from '@server/database/dataSource'
 import { Mail } from '@server/database/entities/Mail'
+import { PasswordReset } from '@server/database/entities/PasswordReset'
+import { Person } from '@server/database/entities/Person'
 import { drawAttachmentsOf } from '@server/features/mail/attachments'
 import { carryMail } from '@server/features/mail/carrier'
 import { forgetOldMail } from '@server/features/mail/oldMail'
 import { queueMail, withdrawMailAbout, type NewMail } from '@server/features/mail/queueMail'
 import { SECRET_PLACE, secretOf } from '@server/features/mail/secretLink'
+import { makePasswordLink } from '@server/features/session/passwordReset.service'
 import { NotFound } from '@server/http/problem'
 import { LIMITS } from '@shared/limits'
 import { MailList, type MailRow } from '@shared/mail/schemas'
@@ -367,6 +374,26 @@ describe('the staff’s page', () => {
     expect(await test.context.db.getRepository(Mail).countBy({ id: sent.id })).toBe(1)
     await forgetOldMail(test.context.db, new Date(START.getTime() + 90 * 86_400_000))
     expect((await test.context.db.getRepository(Mail).find()).map(({ id }) => id)).toEqual([waits.id])
+  })
+})
+
+describe('a backup', () => {
+  it('has no words of letters and no link to a new password; what had not left is a failed letter there', async () => {
+    const words = `Secret ${randomUUID()}`
+    await queue({ body: body([{ kind: 'paragraph', text: words }]) })
+    const person = await test.context.db.getRepository(Person).findOneByOrFail({ name: 'Test head' })
+    await test.context.db.transaction((manager) => makePasswordLink(test.context, manager, person.id))
+    const copy = join(test.dataDir, 'copy.sqlite')
+    await copyDatabase(join(test.dataDir, 'overtop.sqlite'), copy)
+    expect((await readFile(copy)).includes(words)).toBe(true)
+    clearCopy(copy, START)
+    expect((await readFile(copy)).includes(words)).toBe(false)
+    const db = await openDatabase(copy)
+    expect(await db.getRepository(PasswordReset).count()).toBe(0)
+    expect(await db.getRepository(Mail).find()).toMatchObject([
+      { state: 'failed', text: '', html: '', nextTryAt: null, recipient: 'zoe@club.example' },
+    ])
+    await db.destroy()
   })
 })
 

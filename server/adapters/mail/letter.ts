@@ -34,6 +34,8 @@ export interface RenderedLetter {
 
 const INK = { their: '#b93411', our: '#0b5566', graphite: '#212529' } as const
 const FONT = 'font-family:Archivo,Arial,Helvetica,sans-serif'
+/** A mark in its disc, as on the court; where a reader draws no round corners it is a square. */
+const DISC = `display:inline-block;min-width:24px;border-radius:12px;background:${INK.graphite};color:#ffffff;font-size:14px;line-height:24px;font-weight:700;text-align:center`
 /** Width of the one column, px, and of what stands in it. */
 const COLUMN = 592
 const INSIDE = COLUMN - 2 * 30
@@ -114,7 +116,7 @@ ${parts}
 function htmlBlock(block: LetterBlock): string {
   switch (block.kind) {
     case 'heading':
-      return `<h1 style="margin:0 0 10px;color:${INK[block.ink ?? 'graphite']};font-size:29px;line-height:1.2;font-weight:800;${FONT}">${lines(block.text)}</h1>`
+      return `<h1 style="margin:0 0 6px;color:${INK[block.ink ?? 'graphite']};font-size:29px;line-height:1.2;font-weight:800;${FONT}">${lines(block.text)}</h1>`
     case 'paragraph':
       return `<p style="margin:0 0 14px;${FONT}">${lines(block.text)}</p>`
     case 'button':
@@ -136,7 +138,7 @@ const buttonOf = (label: string, url: string): string =>
 function rowsOf(rows: readonly LetterRow[]): string {
   const cell = 'padding:9px 8px 9px 0;border-bottom:1px solid #cfc8b9'
   const row = ({ mark, text, value, ink }: LetterRow) =>
-    `<tr>${mark === undefined ? '' : `<td width="30" valign="top" style="${cell};font-weight:700;${FONT}">${escape(mark)}</td>`}<td valign="top" style="${cell};${FONT}">${lines(text)}</td><td align="right" valign="top" style="${cell};padding-right:0;color:${INK[ink ?? 'graphite']};font-weight:700;white-space:nowrap;${FONT}">${escape(value ?? '')}</td></tr>`
+    `<tr>${mark === undefined ? '' : `<td width="36" valign="top" style="${cell}"><span style="${DISC};${FONT}">${escape(mark)}</span></td>`}<td valign="top" style="${cell};${FONT}">${lines(text)}</td><td align="right" valign="top" style="${cell};padding-right:0;color:${INK[ink ?? 'graphite']};font-weight:700;white-space:nowrap;${FONT}">${escape(value ?? '')}</td></tr>`
   return `<table role="presentation" width="100%" cellpadding="0" cellspacing="0" border="0" style="margin:0 0 14px">
 ${rows.map(row).join('\n')}
 </table>`

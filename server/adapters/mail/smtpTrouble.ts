@@ -47,7 +47,8 @@ export function smtpTrouble(error: unknown): MailTrouble {
   const { code, responseCode, command } = (
     typeof error === 'object' && error !== null ? error : {}
   ) as SmtpError
-  const cause = { cause: error }
+  // The client's error carries addresses; the log needs where it stopped and what was answered, nobody's address.
+  const cause = { cause: typeof code === 'string' ? { code, responseCode, command } : error }
   if (typeof responseCode === 'number' && typeof command === 'string' && ABOUT_THE_LETTER.has(command)) {
     const permanent = responseCode >= 500
     const words = permanent
