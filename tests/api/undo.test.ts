@@ -132,6 +132,8 @@ describe('what hangs on a deleted row', () => {
     `/games/${own.game}/plan`,
     `/games/${own.game}/choices`,
     `/sheets/${own.sheet}`,
+    `/sheets/${own.sheet}/copies`,
+    `/sheets/${own.sheet}/openings`,
   ]
 
   it('goes and comes back with an opponent: games, rows, stills, players, plans and sheets', async () => {

@@ -8,6 +8,7 @@ import { SquadPlayer } from '../../database/entities/SquadPlayer'
 import { findInTeam } from '../../database/findInTeam'
 import { recordChange } from '../../database/history'
 import { Conflict, NeedsIfMatch, NotFound, StaleVersion } from '../../http/problem'
+import { findSheet } from './findSheet'
 import { placeOf, presentCopy } from './copies.presenter'
 
 /** Rows with what stands beside them. */
@@ -53,7 +54,7 @@ export async function listCopies(
   teamId: string,
   sheetId: string,
 ): Promise<CopyRow[]> {
-  await findInTeam(manager, Sheet, teamId, sheetId, 'sheet')
+  await findSheet(manager, teamId, sheetId)
   const rows = await manager.getRepository(Copy).findBy({ sheetId })
   rows.sort((a, b) => (a.number ?? 1000) - (b.number ?? 1000) || a.createdAt.localeCompare(b.createdAt))
   return presentCopies(manager, rows)
@@ -83,7 +84,7 @@ export function makeCopies(
 ): Promise<CopyRow[]> {
   const { teamId, sheetId, body, now, by } = options
   return db.transaction(async (manager) => {
-    const sheet = await findInTeam(manager, Sheet, teamId, sheetId, 'sheet')
+    const { sheet } = await findSheet(manager, teamId, sheetId)
     const copies = manager.getRepository(Copy)
     const there = await copies.findBy({ id: In(body.copies.map(({ id }) => id)) })
     for (const copy of there) checkSame(copy, sheetId, body)
@@ -146,6 +147,7 @@ export function moveCopy(
   const { teamId, id, place, ifMatch, now, by } = options
   return db.transaction(async (manager) => {
     const copy = await findInTeam(manager, Copy, teamId, id, 'copy')
+    await findSheet(manager, teamId, copy.sheetId)
     const shown = async () => (await presentCopies(manager, [copy]))[0] as CopyRow
     if (ifMatch === null) throw new NeedsIfMatch()
     if (ifMatch !== copy.version) throw new StaleVersion(await shown(), copy.version)

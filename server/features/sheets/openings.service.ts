@@ -3,8 +3,7 @@ import { In, type EntityManager } from 'typeorm'
 import type { OpeningRow } from '@shared/sheets/handOut'
 import { Membership } from '../../database/entities/Membership'
 import { Opening } from '../../database/entities/Opening'
-import { Sheet } from '../../database/entities/Sheet'
-import { findInTeam } from '../../database/findInTeam'
+import { findSheet } from './findSheet'
 
 /** Notes that a person opened a sheet: the first time stays, the last one moves. One row a person. */
 export async function noteOpening(
@@ -28,7 +27,7 @@ export async function listOpenings(
   teamId: string,
   sheetId: string,
 ): Promise<OpeningRow[]> {
-  await findInTeam(manager, Sheet, teamId, sheetId, 'sheet')
+  await findSheet(manager, teamId, sheetId)
   const rows = await manager
     .getRepository(Opening)
     .find({ where: { sheetId }, relations: { person: true }, order: { firstAt: 'ASC' } })

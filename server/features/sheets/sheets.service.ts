@@ -2,12 +2,13 @@ import { IsNull, type DataSource, type EntityManager } from 'typeorm'
 import { fullerBudgetOf } from '@shared/sheets/fuller'
 import { FrozenPlan, type SheetRow } from '@shared/sheets/schemas'
 import { Game } from '../../database/entities/Game'
-import { Plan } from '../../database/entities/Plan'
+import type { Plan } from '../../database/entities/Plan'
 import { Sheet } from '../../database/entities/Sheet'
 import { SquadPlayer } from '../../database/entities/SquadPlayer'
 import { Team } from '../../database/entities/Team'
 import { findInTeam } from '../../database/findInTeam'
 import { Conflict, NotFound } from '../../http/problem'
+import { findSheet } from './findSheet'
 import { pageOfSheet, presentSheetRow, type WholeSheet } from './sheets.presenter'
 
 /** Sheets of a team, or of one game, newest first. @throws NotFound for another team's game */
@@ -36,12 +37,9 @@ export async function listSheets(db: DataSource, teamId: string, gameId?: string
 
 /** A sheet with its players' names as they are now. @throws NotFound */
 export async function getSheet(manager: EntityManager, teamId: string, id: string): Promise<WholeSheet> {
-  const sheet = await findInTeam(manager, Sheet, teamId, id, 'sheet')
-  const plan = await manager.getRepository(Plan).findOneByOrFail({ id: sheet.planId })
-  if (plan.deletedAt !== null) throw new NotFound('sheet')
+  const { sheet, plan } = await findSheet(manager, teamId, id)
   const content = FrozenPlan.safeParse(plan.frozen)
-  // A sheet goes with its plan when the game is thrown away.
-  if (!content.success || plan.deletedAt !== null) throw new NotFound('sheet')
+  if (!content.success) throw new NotFound('sheet')
   const team = await manager.getRepository(Team).findOneByOrFail({ id: teamId })
   const named = new Set(
     [content.data.firstCall, content.data.changeUp].flatMap(
