@@ -130,6 +130,12 @@ const teamPages: RouteRecordRaw[] = [
     meta: { title: 'Letters', section: 'squad', needs: 'mail:read' },
   },
   {
+    path: 'settings',
+    name: 'settings',
+    component: () => import('@/views/team/SettingsView.vue'),
+    meta: { title: 'Team', section: 'squad', needs: 'team:read' },
+  },
+  {
     path: 'sheets',
     name: 'sheets',
     component: () => import('@/views/sheets/SheetListView.vue'),
