@@ -175,6 +175,7 @@ const Password = z.string().min(LIMITS.passwordShortest).max(LIMITS.passwordLong
 export const NewAccount = z.object({ secret: Secret, name: Name, email: Email, password: Password })
 export type NewAccount = z.infer<typeof NewAccount>
 export const Joined = z.object({ teamId: z.uuid() })
+export type Joined = z.infer<typeof Joined>
 
 export const NewTeam = z.object({
   name: Name,
@@ -186,3 +187,4 @@ export const NewTeam = z.object({
 })
 export type NewTeam = z.infer<typeof NewTeam>
 export const TeamMade = z.object({ id: z.uuid() })
+export type TeamMade = z.infer<typeof TeamMade>
