@@ -39,11 +39,17 @@ export function ownCourtFaults(base: RulePack, own: OwnCourt): { field: keyof Ow
   const { length, width } = sidesOf(base, own)
   const faults: { field: keyof OwnCourt; message: string }[] = []
   if (own.freeThrowLine !== undefined && own.freeThrowLine > length / 2 - CLEAR)
-    faults.push({ field: 'freeThrowLine', message: 'The free-throw line lies too near half court.' })
+    faults.push({
+      field: 'freeThrowLine',
+      message: 'The free-throw line lies too near half court. Bring it nearer to the endline.',
+    })
   if (own.freeThrowLine !== undefined && own.freeThrowLine <= scaleOf(base, own) * base.basket)
-    faults.push({ field: 'freeThrowLine', message: 'The free-throw line lies behind the basket.' })
+    faults.push({
+      field: 'freeThrowLine',
+      message: 'The free-throw line lies behind the basket. Bring it further up court.',
+    })
   if (own.laneWidth !== undefined && own.laneWidth > width - 2 * CLEAR)
-    faults.push({ field: 'laneWidth', message: 'The lane is as wide as the court.' })
+    faults.push({ field: 'laneWidth', message: 'The lane leaves no room at the sides. Make it narrower.' })
   return faults
 }
 
@@ -66,8 +72,8 @@ const scaleOf = (base: RulePack, own: OwnCourt): number => {
  * book's key, under which everything is stored; places are fractions of the landmark court, so that a drawing
  * keeps its meaning on it. Values that do not fit together (ownCourtFaults) are held to the nearest that do.
  */
-export function customPack(base: RulePack, own: OwnCourt): RulePack {
-  if (Object.values(own).every((value) => value === undefined)) return base
+export function customPack(base: RulePack, own: OwnCourt | null): RulePack {
+  if (!own || Object.values(own).every((value) => value === undefined)) return base
   const court = sidesOf(base, own)
   const scale = scaleOf(base, own)
   const basket = base.basket * scale

@@ -34,7 +34,8 @@ const anyCourt = fc.oneof(
 
 describe('customPack', () => {
   it('is the book itself where nothing is changed', () => {
-    for (const key of RulePackKey.options) expect(customPack(rulePack(key), {})).toBe(rulePack(key))
+    for (const key of RulePackKey.options)
+      for (const own of [{}, null]) expect(customPack(rulePack(key), own)).toBe(rulePack(key))
   })
 
   it('takes a team’s own sides and counts, and keeps the book’s key', () => {

@@ -1,5 +1,6 @@
 import fc from 'fast-check'
 import { describe, expect, it } from 'vitest'
+import { customPack } from '@shared/court/ownCourt'
 import { inside, grown, overlaps, type Box } from '@shared/court/path'
 import { pressScene } from '@shared/court/pressScene'
 import { rulePack, type RulePack } from '@shared/court/rulePacks'
@@ -30,7 +31,14 @@ const anyTicks = fc
   )
   .map((xs) => xs.map((x, i) => ({ second: i + 1, x })))
 
-const anySetting = fc.tuple(anyPress, anyCrop, anyTicks, fc.boolean(), fc.constantFrom(1, 1.2))
+/** The books' courts, and a youth court as small as one may be. */
+const anyHall = fc
+  .tuple(anyPress, fc.boolean())
+  .map(([press, youth]) =>
+    youth ? { ...press, pack: customPack(press.pack, { length: 12, width: 7, throwInSeconds: 10 }) } : press,
+  )
+
+const anySetting = fc.tuple(anyHall, anyCrop, anyTicks, fc.boolean(), fc.constantFrom(1, 1.2))
 
 function apart(boxes: readonly Box[], view: Scene['view']): void {
   boxes.forEach((box, i) => {
