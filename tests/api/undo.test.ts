@@ -224,6 +224,21 @@ describe('a counter', () => {
     expect((await remove(`/counters/${id}`)).status).toBe(204)
   })
 
+  it('that is deleted stays on the trips it was called on, and can be called on no other', async () => {
+    await remove(`/counters/${own.counters[1]}`)
+    const patch = (body: object) =>
+      head
+        .patch(teamUrl(`/possessions/${trip}`))
+        .set('If-Match', '"1"')
+        .send(body)
+    expect((await patch({ counterId: own.counters[1], rightCall: true })).status).toBe(200)
+    await remove(`/counters/${own.counters[2]}`)
+    const other = { gameId: own.game, number: 2, trigger: 'live', counterId: own.counters[2] }
+    expect((await head.put(teamUrl(`/possessions/${randomUUID()}`)).send(other)).status).toBe(404)
+    await purge(later(10))
+    expect((await get(`/possessions/${trip}`)).body).toMatchObject({ counterId: null, rightCall: true })
+  })
+
   it('that is deleted cannot be picked', async () => {
     await remove(`/counters/${own.counters[2]}`)
     expect((await plan({ firstCallId: own.counters[2] })).status).toBe(404)

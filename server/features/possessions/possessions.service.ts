@@ -7,7 +7,7 @@ import { Game } from '../../database/entities/Game'
 import { Possession } from '../../database/entities/Possession'
 import { ScoutedGame } from '../../database/entities/ScoutedGame'
 import { Trap } from '../../database/entities/Trap'
-import { findInTeam } from '../../database/findInTeam'
+import { findAlsoDeleted, findInTeam } from '../../database/findInTeam'
 import { putRow, type Put } from '../../database/putRow'
 import { faultsOf } from '../../http/faults'
 import { BadInput, NeedsIfMatch, NotFound, StaleVersion } from '../../http/problem'
@@ -49,11 +49,20 @@ export async function getPossession(
 }
 
 /** The games and the counter that a body names must be the team's own. */
-async function checkParents(manager: EntityManager, teamId: string, body: PossessionBody): Promise<void> {
+async function checkParents(
+  manager: EntityManager,
+  { teamId, id }: Pick<Write, 'teamId' | 'id'>,
+  body: PossessionBody,
+): Promise<void> {
   if (body.scoutedGameId !== null)
     await findInTeam(manager, ScoutedGame, teamId, body.scoutedGameId, 'scouted game')
   if (body.gameId !== null) await findInTeam(manager, Game, teamId, body.gameId, 'game')
-  if (body.counterId !== null) await findInTeam(manager, Counter, teamId, body.counterId, 'counter')
+  if (body.counterId === null) return
+  const counter = await findAlsoDeleted(manager, Counter, teamId, body.counterId, 'counter')
+  // A trip keeps the counter that it was played with, also while that one is deleted.
+  const kept =
+    counter.deletedAt === null || (await manager.existsBy(Possession, { id, counterId: counter.id }))
+  if (!kept) throw new NotFound('counter')
 }
 
 async function writeTraps(
@@ -73,7 +82,7 @@ export async function writePossession(
   write: Write,
   body: PossessionBody,
 ): Promise<Put<Possession>> {
-  await checkParents(manager, write.teamId, body)
+  await checkParents(manager, write, body)
   return putRow<Possession, PossessionBody>({
     ...write,
     manager,
