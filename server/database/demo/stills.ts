@@ -43,7 +43,12 @@ function stills(): DemoStill[] {
   const trapped = (row: Row, index: number, caption: string) => {
     const trap = trapsOf(row)[index]
     if (!trap) throw new Error(`no trap ${index + 1} in ${row.key}`)
-    add(row, trap.t ?? null, caption, (seed) => trapScene(trap, seed, random))
+    // Room and a way out are marked only where the row says that the middle was left.
+    const open = Array.isArray(row.leftOpen) && row.leftOpen.includes('middle')
+    add(row, trap.t ?? null, caption, (seed) => {
+      const scene = trapScene(trap, seed, random)
+      return open ? scene : { ...scene, room: null, pass: null }
+    })
   }
   const out = (row: Row, caption: string) => {
     const [first] = trapsOf(row)

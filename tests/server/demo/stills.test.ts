@@ -4,6 +4,8 @@ import { LIMITS } from '@shared/limits'
 import { StillFields } from '@shared/stills/schemas'
 import { DEMO_POSSESSIONS } from '@server/database/demo/scenario'
 import { DEMO_STILLS, renderStill } from '@server/database/demo/stills'
+import { marksOn } from '@server/database/demo/stills/marks'
+import { marksOf, StillMarks } from '@shared/stills/marks'
 
 describe('the invented stills', () => {
   it('hang on rows that exist, within the limits, with eight words at most', () => {
@@ -29,6 +31,23 @@ describe('the invented stills', () => {
       if (caption.includes('right')) expect(trap?.y).toBeGreaterThan(0.5)
       if (caption.includes('past half')) expect(trap?.x).toBeGreaterThan(0.5)
     }
+  })
+
+  it('carry marks inside the picture that agree with their row', () => {
+    const rows = new Map(DEMO_POSSESSIONS.map((row) => [row.key, row]))
+    const drawn = DEMO_STILLS.map((still) => ({ ...still, marks: marksOn(still.spec) }))
+    for (const { possessionKey, caption, marks } of drawn) {
+      expect(StillMarks.safeParse(marks).success, caption).toBe(true)
+      expect(marksOf(marks)).toEqual(marks)
+      expect(marks.ring, caption).not.toBeNull()
+      const leftOpen = rows.get(possessionKey)?.leftOpen
+      if (marks.shade) expect(leftOpen, caption).toContain('middle')
+    }
+    // The one whose words say it shows it: the room, and the pass into it.
+    const { marks } = drawn.find(({ caption }) => caption.includes('The middle is open')) ?? {}
+    const { shade, pass } = marks ?? {}
+    expect(shade && pass && pass.to.x > shade.x && pass.to.x < shade.x + shade.w).toBe(true)
+    expect(drawn.filter((still) => still.marks.pass).length).toBeGreaterThanOrEqual(6)
   })
 
   it(

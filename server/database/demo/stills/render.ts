@@ -1,10 +1,10 @@
 import sharp from 'sharp'
 import { toMetres } from '@shared/court/frame'
 import { rulePack } from '@shared/court/rulePacks'
-import { seeded } from '../random'
-import { cameraAt, type Vec } from './camera'
+import { seeded, type Random } from '../random'
+import { cameraAt, type Camera, type Vec } from './camera'
 import { figure, type Kit, type Pose } from './figures'
-import { arc, basket, boards, crowd, floor } from './hall'
+import { basket, boards, crowd, floor } from './hall'
 
 export interface StillPlayer {
   /** Fractions of the court, as everywhere (RECORD.md section 2). */
@@ -21,27 +21,39 @@ export interface StillSpec {
   /** 1 is a wide picture of a third of the floor; 2 is twice as near. */
   zoom: number
   players: StillPlayer[]
-  /** A white ring on the floor round this place. */
-  ring: { x: number; y: number } | null
+  /** What a scout would mark on it, as places on the floor: whom they trap, the room they leave, the way out. */
+  ring: Place | null
+  room: Place | null
+  pass: { from: Place; to: Place } | null
 }
 
-const WIDTH = 1600
-const HEIGHT = 900
+export interface Place {
+  x: number
+  y: number
+}
+
+export const WIDTH = 1600
+export const HEIGHT = 900
 /** Where the film camera stands: up in the seats behind the right sideline. */
 const CAMERA = { back: 5.2, high: 3.3 }
 const FIBA = rulePack('fiba')
 
-const metres = (place: { x: number; y: number }) => {
+export const metres = (place: Place) => {
   const { x, y } = toMetres(FIBA, { x: place.x, y: place.y })
   return { x, y }
+}
+
+/** The camera of a spec; the first that its random numbers decide. */
+export function cameraOf(spec: StillSpec, random: Random): Camera {
+  const target = metres(spec.look)
+  const from: Vec = [target.x + random.between(1.5, 3), FIBA.court.width + CAMERA.back, CAMERA.high]
+  return cameraAt(from, [target.x, target.y, 1.05], 0.95 * spec.zoom, WIDTH, HEIGHT)
 }
 
 /** Draws a still: grey, 1600 by 900, JPEG; the same bytes for the same spec on one version of sharp. */
 export async function renderStill(spec: StillSpec): Promise<Buffer> {
   const random = seeded(spec.seed)
-  const target = metres(spec.look)
-  const from: Vec = [target.x + random.between(1.5, 3), FIBA.court.width + CAMERA.back, CAMERA.high]
-  const camera = cameraAt(from, [target.x, target.y, 1.05], 0.95 * spec.zoom, WIDTH, HEIGHT)
+  const camera = cameraOf(spec, random)
   const stands = crowd(camera, random)
   const players = spec.players
     .map((player) => ({ ...player, ...metres(player) }))
@@ -54,7 +66,6 @@ export async function renderStill(spec: StillSpec): Promise<Buffer> {
       floor(camera) +
       boards(camera) +
       basket(camera) +
-      ringOn(spec, camera) +
       players.join('') +
       `<rect width="100%" height="100%" fill="url(#dim)"/>`,
   )
@@ -84,16 +95,6 @@ const svg = (body: string, size = 1) =>
   Buffer.from(
     `<svg xmlns="http://www.w3.org/2000/svg" width="${Math.round(WIDTH * size)}" height="${Math.round(HEIGHT * size)}" viewBox="0 0 ${WIDTH} ${HEIGHT}">${body}</svg>`,
   )
-
-function ringOn({ ring }: StillSpec, camera: ReturnType<typeof cameraAt>): string {
-  if (!ring) return ''
-  const { x, y } = metres(ring)
-  const outline = camera.outline(arc(x, y, 1.25, 0, Math.PI * 2, 40).map(([a, b]): Vec => [a, b, 0]))
-  return (
-    `<polygon points="${outline}" fill="none" stroke="#222" stroke-width="11" opacity=".55"/>` +
-    `<polygon points="${outline}" fill="none" stroke="#fff" stroke-width="6.5" stroke-dasharray="26 15"/>`
-  )
-}
 
 /** Film grain: every pixel a little lighter or darker. One byte a pixel. */
 function grained(pixels: Buffer, seed: number): Buffer {

@@ -28,7 +28,7 @@ function loosened(players: StillPlayer[], random: Random): StillPlayer[] {
 }
 
 /** The far side needs a longer lens: the camera stands behind the right sideline. */
-const zoomFor = (at: At) => 1.05 + (1 - at.y) * 0.75
+const zoomFor = (at: At) => 0.98 + (1 - at.y) * 0.7
 
 /** Two on the ball at a place; the rest as a press stands behind a trap, the middle empty. */
 export function trapScene(at: At, seed: number, random: Random): StillSpec {
@@ -38,7 +38,7 @@ export function trapScene(at: At, seed: number, random: Random): StillSpec {
     [
       stand('white', 'call', { x: early ? 0.03 : at.x - 0.16, y: at.y < 0.5 ? 0.36 : 0.64 }),
       stand('dark', 'arms-wide', { x: early ? 0.07 : at.x - 0.12, y: at.y < 0.5 ? 0.42 : 0.58 }),
-      stand('white', 'call', { x: at.x + 0.24, y: 0.5 }),
+      stand('white', 'call', { x: at.x + 0.15, y: at.y < 0.5 ? 0.36 : 0.54 }),
       stand('dark', 'ready', { x: at.x + 0.17, y: at.y < 0.5 ? 0.24 : 0.76 }),
       stand('white', 'run', { x: at.x + 0.26, y: at.y < 0.5 ? 0.1 : 0.9 }),
       stand('white', 'run', { x: at.x + 0.2, y: at.y < 0.5 ? 0.86 : 0.14 }),
@@ -57,32 +57,35 @@ export function trapScene(at: At, seed: number, random: Random): StillSpec {
       ...rest,
     ],
     ring: { x: at.x + 0.1 * UP, y: at.y + inwards * 0.4 * ACROSS },
+    // The one who calls in the middle: nobody is within three metres of her.
+    room: rest[2] ?? null,
+    pass: rest[2] ? { from: at, to: rest[2] } : null,
   }
 }
 
 /** The ball has come out of a corner to the middle; the trappers are behind it. */
 export function middleScene(at: At, seed: number, random: Random): StillSpec {
   const caught = { x: 0.34, y: 0.5 }
+  const rest = loosened(
+    [
+      stand('white', 'ready', at),
+      stand('dark', 'run', at, 1.1, at.y < 0.5 ? 0.7 : -0.7),
+      stand('dark', 'ready', at, -0.6, at.y < 0.5 ? 1 : -1),
+      stand('dark', 'run', caught, 1.4, at.y < 0.5 ? -2 : 2),
+      stand('white', 'run', caught, 4.5, 4.4),
+      stand('white', 'run', caught, 4.2, -4.6),
+      stand('dark', 'arms-wide', caught, 7.5, 0),
+    ],
+    random,
+  )
   return {
     seed,
     look: { x: 0.33, y: 0.64 },
     zoom: 1.1,
-    players: [
-      stand('white', 'hold', caught),
-      ...loosened(
-        [
-          stand('white', 'ready', at),
-          stand('dark', 'run', at, 1.1, at.y < 0.5 ? 0.7 : -0.7),
-          stand('dark', 'ready', at, -0.6, at.y < 0.5 ? 1 : -1),
-          stand('dark', 'run', caught, 1.4, at.y < 0.5 ? -2 : 2),
-          stand('white', 'run', caught, 4.5, 4.4),
-          stand('white', 'run', caught, 4.2, -4.6),
-          stand('dark', 'arms-wide', caught, 7.5, 0),
-        ],
-        random,
-      ),
-    ],
+    players: [stand('white', 'hold', caught), ...rest],
     ring: caught,
+    room: null,
+    pass: { from: at, to: caught },
   }
 }
 
@@ -105,12 +108,13 @@ export function waitingScene(shape: '1-2-1-1' | '2-2-1', seed: number, random: R
           { x: 0.7, y: 0.5 },
         ]
   const first = spots[0] ?? { x: 0, y: 0.5 }
+  const thrower = { x: -0.025, y: 0.69 }
   return {
     seed,
-    look: { x: 0.19, y: 0.6 },
+    look: { x: 0.16, y: 0.6 },
     zoom: 0.92,
     players: [
-      stand('white', 'hold', { x: -0.025, y: 0.69 }),
+      stand('white', 'hold', thrower),
       stand('dark', shape === '1-2-1-1' ? 'arms-up' : 'arms-wide', first),
       ...loosened(
         [
@@ -123,6 +127,8 @@ export function waitingScene(shape: '1-2-1-1' | '2-2-1', seed: number, random: R
         random,
       ),
     ],
-    ring: null,
+    ring: thrower,
+    room: null,
+    pass: null,
   }
 }
