@@ -24,7 +24,8 @@ export function listed(rows: readonly SheetRow[]): ListedSheet[] {
 /** The sheet in force of the game that is played next; null when every game is over. */
 export function nextSheet(rows: readonly SheetRow[], now: number): SheetRow | null {
   const ahead = listed(rows).filter(
-    ({ row, replacedBy }) => replacedBy === null && Date.parse(row.tipOff) + GAME_HOURS * 3_600_000 > now,
+    ({ row, replacedBy }) =>
+      replacedBy === null && !row.recalledAt && Date.parse(row.tipOff) + GAME_HOURS * 3_600_000 > now,
   )
   const [next] = ahead.sort((a, b) => Date.parse(a.row.tipOff) - Date.parse(b.row.tipOff))
   return next?.row ?? null

@@ -32,6 +32,14 @@ export const timeOf = (instant: string, timeZone: string): string =>
 export const startOf = ({ day, time }: ScriptDraft, timeZone: string): string =>
   instantOf(day, time, timeZone)
 
+/** "Thursday" */
+export const weekdayOf = (day: string): string =>
+  day === ''
+    ? 'No day yet'
+    : new Intl.DateTimeFormat('en-GB', { timeZone: 'UTC', weekday: 'long' }).format(
+        new Date(`${day}T00:00:00Z`),
+      )
+
 /** "17:42", so many minutes after the start. */
 export function clockAt(time: string, minutes: number): string {
   const [hours = 0, mins = 0] = time.split(':').map(Number)
