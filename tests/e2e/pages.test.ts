@@ -17,7 +17,9 @@ const WIDTHS = [
 ] as const
 
 const PAGES = {
+  week: '/t/{team}/week',
   opponents: '/t/{team}/opponents',
+  'about an opponent': '/t/{team}/opponents/{opponent}/about',
   'scouted games': '/t/{team}/opponents/{opponent}/scouted-games',
   log: '/t/{team}/scouted-games/{scouted}/log',
   read: '/t/{team}/opponents/{opponent}/read',
@@ -143,7 +145,7 @@ describe('the ways in and out', () => {
     await priya.page.waitForURL(/\/teams/)
     expect(await seriousFaults(priya.page)).toEqual([])
     await priya.page.getByRole('link', { name: /U15/ }).first().click()
-    await priya.page.waitForURL(/\/opponents/)
+    await priya.page.waitForURL(/\/week/)
     await priya.page.locator('main h1').waitFor()
     await priya.page.waitForLoadState('networkidle')
     expect(await priya.page.getByText('Port Selby Gulls').count()).toBe(0)

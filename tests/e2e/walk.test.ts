@@ -53,8 +53,11 @@ describe('one possession to one printed sheet', () => {
   it('an assistant coach reads, logs a possession with a still by keyboard and tap, and the count moves', async () => {
     const { page } = tomas
     await signIn(page, 'tomas')
+    await page.getByRole('heading', { level: 1, name: /Port Selby Gulls/ }).waitFor()
+    expect(await seriousFaults(page)).toEqual([])
+    await page.getByRole('link', { name: 'Opponents', exact: true }).click()
     await page
-      .getByRole('link', { name: /Port Selby Gulls/ })
+      .getByRole('link', { name: /^Port Selby Gulls/ })
       .first()
       .click()
     await page.getByRole('heading', { level: 1, name: /Port Selby Gulls/ }).waitFor()
@@ -151,8 +154,9 @@ describe('one possession to one printed sheet', () => {
   it('the head coach picks, writes a key and signs off', async () => {
     const { page } = maren
     await signIn(page, 'maren')
+    await page.getByRole('link', { name: 'Opponents', exact: true }).click()
     await page
-      .getByRole('link', { name: /Port Selby Gulls/ })
+      .getByRole('link', { name: /^Port Selby Gulls/ })
       .first()
       .click()
     await page
