@@ -72,7 +72,7 @@ function responses(schemas: Schemas, spec: Endpoint): Json {
 }
 
 /** POSTs that change one row and need its version. */
-const needsVersion = ({ path }: Endpoint): boolean => path.endsWith('/sign-off') || path.endsWith('/put-back')
+const needsVersion = ({ path }: Endpoint): boolean => /\/(sign-off|put-back|blur)$/.test(path)
 
 /** What changes a row and so minds its version. */
 const edits = (spec: Endpoint): boolean =>

@@ -148,7 +148,7 @@ describe('the API’s description', () => {
     for (const [path, method, { parameters = [], responses }] of operations) {
       const has = parameters.some((one) => one.in === 'header' && one.name === 'If-Match')
       const changes = path.startsWith('/teams/') && ['put', 'patch', 'delete'].includes(method)
-      const needed = /\/(sign-off|put-back)$/.test(path)
+      const needed = /\/(sign-off|put-back|blur)$/.test(path)
       expect(has, `${method} ${path}`).toBe(changes || needed)
       expect('412' in responses, `${method} ${path}`).toBe(has)
       expect('428' in responses).toBe(method === 'patch' || needed)
