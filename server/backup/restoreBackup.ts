@@ -4,6 +4,7 @@ import { FolderInUse, lockFolder } from '../adapters/folderLock'
 import { CommandError } from '../commands/commandError'
 import { openDatabase } from '../database/dataSource'
 import { countRows, databaseFaults } from './databaseCopy'
+import { doneErasures, eraseAgain } from './erasedSince'
 import { copyWhole, exists, namesIn } from './files'
 import { DATABASE_FILE, differingRows, STILLS_FOLDER, type Manifest } from './manifest'
 import { BEFORE_RESTORE, RESTORING } from './retention'
@@ -17,6 +18,11 @@ export interface Restored {
   aside: string | null
   /** Names of migrations that the restored database has had since it was backed up. */
   migrated: string[]
+  /**
+   * How many people the backup held who were erased since and were erased again; null where there was no data to
+   * learn of erasures from.
+   */
+  erasedAgain: number | null
 }
 
 /** What a data folder's own data is; its backups, its secret and its lock stay where they are. */
@@ -45,9 +51,9 @@ export async function restoreBackup(options: {
       )
     const part = join(dataDir, RESTORING + stampOf(now))
     try {
-      const migrated = await prepare(backup, part, manifest)
+      const { migrated, erasedAgain } = await prepare(backup, part, manifest, await doneErasures(dataDir))
       const aside = join(dataDir, BEFORE_RESTORE + stampOf(now))
-      return { manifest, migrated, aside: (await swap(dataDir, part, aside)) ? aside : null }
+      return { manifest, migrated, erasedAgain, aside: (await swap(dataDir, part, aside)) ? aside : null }
     } finally {
       await rm(part, { recursive: true, force: true })
     }
@@ -70,8 +76,13 @@ async function holdsData(dataDir: string): Promise<boolean> {
   return (await namesIn(join(dataDir, STILLS_FOLDER))).length > 0
 }
 
-/** A backup's files in a folder of their own, migrated and checked. Returns the migrations that ran. */
-async function prepare(backup: string, part: string, manifest: Manifest): Promise<string[]> {
+/** A backup's files in a folder of their own, migrated and checked, without whoever was erased since. */
+async function prepare(
+  backup: string,
+  part: string,
+  manifest: Manifest,
+  erasures: Awaited<ReturnType<typeof doneErasures>>,
+): Promise<Pick<Restored, 'migrated' | 'erasedAgain'>> {
   await mkdir(part, { mode: 0o700 })
   await mkdir(join(part, STILLS_FOLDER), { mode: 0o700 })
   for (const { path } of manifest.files) await copyWhole(join(backup, path), join(part, path))
@@ -82,13 +93,16 @@ async function prepare(backup: string, part: string, manifest: Manifest): Promis
   }
   refuse(databaseFaults(file))
   refuse(differingRows(manifest.rows, countRows(file)))
-  const migrated = await migrate(file)
+  const done = await migrate(file, erasures)
   refuse(databaseFaults(file))
   refuse((await stillsWithoutFiles(part)).map((id) => `still ${id} has no picture`))
-  return migrated
+  return done
 }
 
-async function migrate(file: string): Promise<string[]> {
+async function migrate(
+  file: string,
+  erasures: Awaited<ReturnType<typeof doneErasures>>,
+): Promise<Pick<Restored, 'migrated' | 'erasedAgain'>> {
   const namesHad = (rows: { name: string }[]) => rows.map(({ name }) => name)
   const before = countRows(file)['migrations'] ?? 0
   const db = await openDatabase(file)
@@ -100,7 +114,8 @@ async function migrate(file: string): Promise<string[]> {
       throw new CommandError(
         `The backup was made by a newer Overtop (${unknown}). Update this one, then restore. Nothing was changed.`,
       )
-    return had.slice(before)
+    const erasedAgain = erasures && (await eraseAgain(db, erasures))
+    return { migrated: had.slice(before), erasedAgain }
   } finally {
     await db.destroy()
   }

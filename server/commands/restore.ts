@@ -15,7 +15,7 @@ export async function restoreCommand(
   { config, terminal, clock }: { config: Config; terminal: Terminal; clock: Clock },
 ): Promise<void> {
   const { backup, replace } = await readArgs(args, config)
-  const { manifest, migrated, aside } = await restoreBackup({
+  const { manifest, migrated, erasedAgain, aside } = await restoreBackup({
     backup,
     replace,
     dataDir: config.dataDir,
@@ -26,6 +26,14 @@ export async function restoreCommand(
   )
   if (migrated.length > 0)
     terminal.say(`The backup was older than this Overtop; brought up to date: ${migrated.join(', ')}.`)
+  if (erasedAgain === null)
+    terminal.say(
+      `There was no data to learn from who was erased since ${manifest.madeAt}. Whoever was is back: erase them again on the page People.`,
+    )
+  else if (erasedAgain > 0)
+    terminal.say(
+      `Erased again, as they were since the backup was made: ${erasedAgain} ${erasedAgain === 1 ? 'person' : 'people'}.`,
+    )
   if (aside !== null)
     terminal.say(
       `What was there before is in ${aside}. Delete it when you no longer need it; npm run backup does after ${config.backupDays} days.`,

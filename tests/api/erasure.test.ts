@@ -1,8 +1,12 @@
 import { randomUUID } from 'node:crypto'
-import { readFile } from 'node:fs/promises'
+import { mkdtemp, readFile, rm } from 'node:fs/promises'
+import { tmpdir } from 'node:os'
 import { join } from 'node:path'
 import request from 'supertest'
 import { afterEach, beforeEach, describe, expect, it } from 'vitest'
+import { makeBackup } from '@server/backup/makeBackup'
+import { restoreBackup } from '@server/backup/restoreBackup'
+import { openDatabase } from '@server/database/dataSource'
 import { Change } from '@server/database/entities/Change'
 import { Membership } from '@server/database/entities/Membership'
 import { Person } from '@server/database/entities/Person'
@@ -225,5 +229,31 @@ describe('what stays', () => {
     await eraseDue(test.context.db, MIDNIGHT)
     expect(await manager().countBy(Membership, { personId: me.personId })).toBe(1)
     expect((await head.get(teamUrl('/people'))).body.erasures).toEqual([])
+  })
+})
+
+describe('a backup that was made before', () => {
+  it('does not bring anybody back: a restore erases again, and says when it cannot know', async () => {
+    const safe = await mkdtemp(join(tmpdir(), 'overtop-safe-'))
+    const empty = await mkdtemp(join(tmpdir(), 'overtop-empty-'))
+    try {
+      await withAccount()
+      const { folder: backup } = await makeBackup(test.dataDir, safe, START)
+      await set({ kind: 'squad-player', subjectId: her })
+      await eraseDue(test.context.db, MIDNIGHT)
+      await test.context.db.destroy()
+      const where = { backup, replace: true, now: MIDNIGHT }
+      expect((await restoreBackup({ ...where, dataDir: test.dataDir })).erasedAgain).toBe(1)
+      const left = await bytes()
+      for (const word of [NAME, LAST, GUARDIAN, OWN])
+        expect([word, left.includes(word)]).toEqual([word, false])
+      // The restored data remembers for the next restore.
+      expect((await restoreBackup({ ...where, now: START, dataDir: test.dataDir })).erasedAgain).toBe(1)
+      expect((await restoreBackup({ ...where, dataDir: empty })).erasedAgain).toBeNull()
+    } finally {
+      await rm(safe, { recursive: true, force: true })
+      await rm(empty, { recursive: true, force: true })
+      test.context.db = await openDatabase(join(test.dataDir, 'overtop.sqlite'))
+    }
   })
 })

@@ -12,6 +12,7 @@ import { insertBook, unused } from '../insertBook'
 import { DEMO_COUNTERS } from './counters'
 import { Ids, meta, type Load } from './loading'
 import { loadScenario } from './loadScenario'
+import { localInstant } from './days'
 import { loadDemoStills } from './loadStills'
 import { DEMO_PEOPLE, DEMO_TEAM_KEY, DEMO_TIME_ZONE, demoTeams } from './people'
 import { DEMO_RULES } from './rules'
@@ -43,6 +44,7 @@ async function loadTeamsAndPeople(load: Load, timeZone: string): Promise<void> {
         personId: ids.of(person.key),
         role,
         squadPlayerId: squadKey === null ? null : ids.of(`squad ${squadKey}`),
+        createdAt: localInstant(now, timeZone, role === 'player' ? -44 : -180, '18:30'),
       })
   }
 }

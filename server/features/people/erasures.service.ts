@@ -15,6 +15,7 @@ import { findInTeam } from '../../database/findInTeam'
 import { putRow, type Put } from '../../database/putRow'
 import { Conflict, NotFound } from '../../http/problem'
 import { countSessions, eraseSubject } from './eraseSubject'
+import { leaveNoByte } from './leaveNoByte'
 import { keepAHead } from './members.service'
 import { presentErasure } from './people.presenter'
 import { nameOf } from './people.service'
@@ -189,10 +190,4 @@ async function eraseOne(manager: EntityManager, id: string, stamp: string): Prom
   }
   await eraseSubject(manager, row.teamId, { kind: row.kind, id: row.subjectId })
   await end('doneAt')
-}
-
-/** Moving rows about leaves old copies in a page's free room, which secure_delete does not see; a rewrite does. */
-async function leaveNoByte(db: DataSource): Promise<void> {
-  await db.query('VACUUM')
-  await db.query('PRAGMA wal_checkpoint(TRUNCATE)')
 }
