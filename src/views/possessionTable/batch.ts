@@ -11,6 +11,8 @@ export interface BatchDraft {
   to?: unknown
 }
 
+export type BatchPart = 'field' | 'from' | 'to'
+
 /** A value that a slot can hold, with its words. */
 export interface ValueChoice {
   value: unknown
@@ -139,6 +141,14 @@ export function changedRows<T extends PossessionRow>(rows: readonly T[], draft: 
   )
 }
 
+/** The slot of the sentence that is to be said next; null when it is whole. */
+export function nextPart(draft: BatchDraft): BatchPart | null {
+  if (draft.field === null) return 'field'
+  if (!('from' in draft)) return 'from'
+  return 'to' in draft ? null : 'to'
+}
+
+/** All three are said, and it would change something. */
 export const isWhole = (draft: BatchDraft): boolean =>
   draft.field !== null && 'from' in draft && 'to' in draft && sameText(draft.from) !== sameText(draft.to)
 
@@ -152,11 +162,11 @@ export function batchSentence(marked: number, draft: BatchDraft, pack: RulePack)
   return `In ${rows} change ${fieldName(field)} from ${from} to ${to}.`
 }
 
-const WHY: Record<BatchResult['leftOut'][number]['why'], string> = {
-  'other-value': 'hold something else by now',
-  'changed-since': 'were changed meanwhile',
-  deleted: 'were thrown away',
-  'does-not-fit': 'would not fit',
+const WHY: Record<BatchResult['leftOut'][number]['why'], [one: string, more: string]> = {
+  'other-value': ['holds something else by now and stays', 'hold something else by now and stay'],
+  'changed-since': ['was changed meanwhile and stays', 'were changed meanwhile and stay'],
+  deleted: ['was thrown away', 'were thrown away'],
+  'does-not-fit': ['would not fit and stays', 'would not fit and stay'],
 }
 
 /** What came of it: "4 rows changed. No. 8 and no. 9 were changed meanwhile and stay." */
@@ -167,7 +177,7 @@ export function resultWords(result: BatchResult, verb = 'changed'): string {
   const rest = kinds.map((why) => {
     const numbers = result.leftOut.filter((each) => each.why === why).map(({ number }) => `no. ${number}`)
     const names = numbers.length > 4 ? `${numbers.length} rows` : numbers.join(', ')
-    return ` ${names.charAt(0).toUpperCase()}${names.slice(1)} ${WHY[why]} and stay.`
+    return ` ${names.charAt(0).toUpperCase()}${names.slice(1)} ${WHY[why][numbers.length === 1 ? 0 : 1]}.`
   })
   return first + rest.join('')
 }

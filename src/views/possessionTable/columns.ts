@@ -39,6 +39,13 @@ export interface Cell {
   fix: Correction | null
 }
 
+/** Endings in one or two words, where a column is narrow. */
+const ENDED: Readonly<Record<string, string>> = {
+  'through-with-numbers': 'With numbers',
+  'foul-drawn': 'Fouled',
+  count: 'Count called',
+}
+
 const asList = (value: unknown): readonly unknown[] => (Array.isArray(value) ? value : [])
 
 /** What a column says of a value of its field; empty where there is nothing to say. */
@@ -50,13 +57,14 @@ function cellWords(column: Column, value: unknown, row: PossessionRow, pack: Rul
   if (column.key === 'firstTrap' || column.key === 'secondTrap') {
     const index = column.key === 'firstTrap' ? 0 : 1
     if (!Array.isArray(value)) return index === 0 && value !== null ? valueWords('traps', value) : ''
-    if (value.length === 0) return index === 0 ? 'none' : ''
+    if (value.length === 0) return index === 0 ? 'No trap' : ''
     return capital(trapWords(asList(value)[index]))
   }
   if (column.key === 'pickup' && row.pressed === false)
     return row.shape === null ? '' : capital(valueWords('shape', row.shape))
   if (column.key === 'shape' && row.pressed === false) return ''
   if (value === null || value === undefined) return ''
+  if (column.key === 'outcome') return ENDED[value as string] ?? capital(valueWords('outcome', value))
   const words = valueWords(column.field, value, pack)
   return isSeveral(column.field) ? words : capital(words)
 }

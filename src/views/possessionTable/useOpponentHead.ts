@@ -15,7 +15,13 @@ export function useOpponentHead(teamId: string, opponent: () => string) {
         getOpponent(teamId, opponent(), signal),
         listGames(teamId, signal),
       ])
-      return { opponent: row, next: games.rows.find(({ id }) => id === row.nextGame?.id) ?? null }
+      return {
+        opponent: row,
+        next: games.rows.find(({ id }) => id === row.nextGame?.id) ?? null,
+        played: games.rows
+          .filter((game) => game.opponentId === row.id && Date.parse(game.tipOff) < Date.now())
+          .sort((a, b) => b.tipOff.localeCompare(a.tipOff)),
+      }
     },
     { watch: opponent },
   )
@@ -26,6 +32,9 @@ export function useOpponentHead(teamId: string, opponent: () => string) {
     next,
     zone,
     name: computed(() => about.data?.opponent.name ?? ''),
+    /** Our games against them that are over, newest first. */
+    played: computed(() => about.data?.played ?? []),
+    shortName: computed(() => about.data?.opponent.shortName ?? ''),
     rail: computed(() => next.value && railOf(next.value, zone.value, teamId)),
     pack: computed(() => rulePack(next.value?.rulePack ?? team.value.rulePack)),
   }
