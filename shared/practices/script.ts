@@ -11,7 +11,7 @@ export const SCRIPT_SETTINGS = {
   most: { walk: 12, overload: 12, live: 20 },
   /** No look that is taught gets fewer. */
   leastOfALook: 2,
-  /** One rep in so many is the other call. */
+  /** One rep in so many of a look is the other call. */
   otherCallEvery: 5,
   /** Looks shown; the rest are too rare to teach. */
   looks: 4,
@@ -160,6 +160,14 @@ function ticks(order: readonly Shape[], parts: readonly ScriptPart[], changeUp: 
   const active = parts.filter(({ kind }) => isRep(kind))
   const planned = repsOf(active)
   const reps: ScriptRep[] = []
+  const runOf = new Map<Shape, number>()
+  /** Counted look by look: in one count over all, looks that take turns could leave it to the same one. */
+  const callOf = (shape: Shape): ScriptRep['call'] => {
+    const run = (runOf.get(shape) ?? 0) + 1
+    runOf.set(shape, run)
+    const { otherCallEvery } = SCRIPT_SETTINGS
+    return changeUp && run % otherCallEvery === Math.ceil(otherCallEvery / 2) ? 'changeUp' : 'firstCall'
+  }
   let done = 0
   let plannedSoFar = 0
   active.forEach((part) => {
@@ -171,7 +179,7 @@ function ticks(order: readonly Shape[], parts: readonly ScriptPart[], changeUp: 
         at: Math.round((part.from + ((at + 0.5) * part.minutes) / own.length) * 10) / 10,
         shape,
         kind: isRep(part.kind) ? part.kind : 'walk',
-        call: changeUp && (done + at + 1) % SCRIPT_SETTINGS.otherCallEvery === 0 ? 'changeUp' : 'firstCall',
+        call: callOf(shape),
       }),
     )
     done = until

@@ -111,9 +111,13 @@ describe('a script', () => {
     expect(of('live')).toBeLessThanOrEqual(SCRIPT_SETTINGS.most.live)
   })
 
-  it('has the other call in every fifth rep, and not at all without a change-up', () => {
+  it('has the other call in every fifth rep of a look, and not at all without a change-up', () => {
     const { reps } = proposeScript(facts())
-    expect(reps.filter(({ call }) => call === 'changeUp')).toHaveLength(Math.floor(reps.length / 5))
+    for (const { shape } of looks) {
+      const own = reps.filter((rep) => rep.shape === shape)
+      expect(own.filter(({ call }) => call === 'changeUp')).toHaveLength(Math.floor((own.length + 2) / 5))
+    }
+    expect(reps.some(({ call }) => call === 'changeUp')).toBe(true)
     expect(proposeScript(facts({ changeUp: false })).reps.some(({ call }) => call === 'changeUp')).toBe(false)
   })
 
