@@ -29,11 +29,27 @@ const TAGS = 'p br strong em del ul ol li h3 h4 h5 blockquote code pre a hr tabl
 /** Other sites, letters and our own pages; nothing that runs. */
 const ADDRESS = /^(?:https?:\/\/|mailto:|\/(?![/\\]))/i
 
+/** Quotes in quotes past the sixth are the sixth: thousands of them would be walked one inside the other. */
+const TOO_DEEP = /^(?:[ \t]*>){7,}/gm
+const DEEP = '>'.repeat(6)
+
 /**
  * The Markdown of a note as elements to put into the page: cleaned, without pictures, scripts or styles. Links to
  * other sites open apart and tell them nothing; a link that leads nowhere safe is its words.
  */
 export function renderNotes(text: string): DocumentFragment {
+  try {
+    return rendered(text.replace(TOO_DEEP, DEEP))
+  } catch {
+    // Nested past what can be walked: it still reads as it was typed.
+    const fragment = document.createDocumentFragment()
+    const plain = fragment.appendChild(document.createElement('pre'))
+    plain.textContent = text
+    return fragment
+  }
+}
+
+function rendered(text: string): DocumentFragment {
   const fragment = DOMPurify.sanitize(markdown.parse(text, { async: false }), {
     RETURN_DOM_FRAGMENT: true,
     ALLOWED_TAGS: TAGS,

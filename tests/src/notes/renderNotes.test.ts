@@ -77,6 +77,13 @@ describe('hostile notes', () => {
     expect(html('[the film](javascript:alert(1))')).toContain('the film')
   })
 
+  it('do not nest without end, and are not lost when they try', () => {
+    const deep = html(`${'> '.repeat(3000)}at the bottom`)
+    expect(deep).toContain('at the bottom')
+    expect(deep.match(/<blockquote>/g)?.length).toBe(6)
+    for (const part of ['- ', '1. ', '[', '*a _b ']) expect(html(part.repeat(2000))).not.toBe('')
+  }, 30_000)
+
   it('as long as a note may be are read in a moment', () => {
     const began = performance.now()
     for (const part of ['[', '*a ', '> ', '<a>', '`', '- x\n', '# x\n'])
