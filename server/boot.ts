@@ -11,7 +11,6 @@ import { pruneBackups } from './backup/prune'
 import type { Config } from './config'
 import type { Context } from './context'
 import { openDatabase } from './database/dataSource'
-import { loadDemo } from './database/demo/load'
 import { DEMO_SIGN_INS } from './database/demo/people'
 import { Person } from './database/entities/Person'
 import { carryMail } from './features/mail/carrier'
@@ -21,6 +20,7 @@ import { firstRunToken } from './features/people/firstCoach.service'
 import { purgeDeleted } from './features/deletion/purge.service'
 import { forgetOldLinks } from './features/session/passwordReset.service'
 import { expireStills } from './features/stills/expiry.service'
+import { fillDemo } from './features/demo/fillDemo.service'
 import { SESSION_MS } from './http/passport'
 import { SessionStore } from './http/sessionStore'
 
@@ -74,7 +74,7 @@ async function open(config: Config): Promise<Omit<Booted, 'close'>> {
     log: createLog(config.logLevel),
     sessionSecret: await sessionSecret(config),
   }
-  if (config.demo) await loadDemo(context)
+  if (config.demo) await fillDemo(context)
   context.firstRunToken = await firstRunToken(context.db)
   const email = In(DEMO_SIGN_INS.map((person) => person.email))
   return { context, demoIsIn: await context.db.getRepository(Person).existsBy({ email }) }
