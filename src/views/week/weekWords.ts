@@ -70,7 +70,7 @@ export interface Waiting {
   detail: string
   due: string | null
   /** Name of the page where it is done. */
-  page: 'scouted-games' | 'read' | 'choose' | 'sheets'
+  page: 'scouted-games' | 'read' | 'choose' | 'teach'
   button: string
 }
 
@@ -85,7 +85,7 @@ const PAGES: Record<Station, [page: Waiting['page'], button: string]> = {
   scout: ['scouted-games', 'Watch and log'],
   read: ['read', 'Open the read'],
   choose: ['choose', 'Compare them'],
-  teach: ['sheets', 'Open the sheet'],
+  teach: ['teach', 'Plan the practice'],
   review: ['read', 'Open what is counted'],
 }
 

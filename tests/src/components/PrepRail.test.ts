@@ -64,7 +64,7 @@ describe('railOf', () => {
     const fresh = { ...game, station: 'scout' as const, counts: { possessions: 0, scoutedGames: 2 } }
     const { stations } = railOf(fresh, 'UTC', 'team')
     expect(stations[0]!.what).toBe('Nothing counted yet')
-    expect(stations.map((each) => each.to !== undefined)).toEqual([true, true, true, false, false])
+    expect(stations.map((each) => each.to !== undefined)).toEqual([true, true, true, true, false])
   })
 })
 
