@@ -12,7 +12,7 @@ export const MAY: Record<TeamRole, string> = {
 const capital = (words: string) => words.charAt(0).toUpperCase() + words.slice(1)
 export const roleName = (role: TeamRole): string => capital(labelOf(TEAM_ROLES, role))
 
-const SMALL = ['No', 'One', 'Two', 'Three', 'Four', 'Five', 'Six', 'Seven', 'Eight', 'Nine', 'Ten']
+const SMALL = 'No One Two Three Four Five Six Seven Eight Nine Ten Eleven Twelve'.split(' ')
 const counted = (count: number, one: string, more: string) =>
   `${SMALL[count] ?? String(count)} ${count === 1 ? one : more}`
 
