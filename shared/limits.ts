@@ -32,6 +32,8 @@ export const LIMITS = {
   /** Longest words on a still. */
   stillWords: 8,
   batchRows: 200,
+  /** Possessions kept with a signed plan for one habit: more than a season of one opponent has. */
+  groundRows: 2000,
   invitationDays: 7,
   resetMinutes: 60,
   mailTries: 6,

@@ -1,3 +1,4 @@
+import { Grounds } from '@shared/plans/grounds'
 import { PlanRow, PlanState, type PlanInput, type SignOffBody } from '@shared/plans/schemas'
 import { request, teamPath } from './http'
 
@@ -19,4 +20,9 @@ export function signOffPlan(
   version: number,
 ): Promise<PlanState> {
   return request('POST', teamPath(team, 'games', game, 'plan', 'sign-off'), PlanState, { body, version })
+}
+
+/** What the newest signed version stood on. */
+export function getGrounds(team: string, game: string, signal?: AbortSignal): Promise<Grounds> {
+  return request('GET', teamPath(team, 'games', game, 'plan', 'grounds'), Grounds, { signal })
 }

@@ -216,6 +216,11 @@ const TABLE: Record<string, Row> = {
     body: () => ({ id: randomUUID() }),
     bad: { body: { id: randomUUID(), keys: ['a', 'b', 'c', 'd'] }, field: 'keys' },
   },
+  'get /games/{id}/plan/grounds': {
+    at: rowsOf.game,
+    success: 200,
+    bad: { query: 'plan=first', field: 'plan' },
+  },
   'post /games/{id}/plan/sign-off': {
     at: rowsOf.game,
     headOnly: true,

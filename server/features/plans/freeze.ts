@@ -1,4 +1,5 @@
 import type { EntityManager } from 'typeorm'
+import type { Ground } from '@shared/plans/grounds'
 import { FrozenPlan, type FrozenCounter } from '@shared/sheets/schemas'
 import type { CounterRow } from '@shared/counters/schemas'
 import { Game } from '../../database/entities/Game'
@@ -8,6 +9,7 @@ import { findInTeam } from '../../database/findInTeam'
 import { chooseFor } from '../choices/choices.service'
 import { getCounter } from '../counters/counters.service'
 import { readOpponent } from '../tendencies/readOpponent'
+import { groundsOf } from './grounds'
 import { describePress } from './pressLines'
 
 type Seats = ReadonlyMap<string, string | null>
@@ -51,14 +53,14 @@ const freezeCounter = (counter: CounterRow, seats: Seats): FrozenCounter => ({
 })
 
 /**
- * Everything a sheet needs, as it stands at this moment; later changes to counters, counts or roles do
- * not reach it. Players are kept by id only.
+ * Everything a sheet needs, as it stands at this moment, and what the picks stood on, for staff: later changes to
+ * counters, counts or roles do not reach either. Players are kept by id only.
  * @throws NotFound when a picked counter is gone
  */
 export async function freezePlan(
   manager: EntityManager,
   plan: Plan & { firstCallId: string },
-): Promise<FrozenPlan> {
+): Promise<FrozenPlan & { grounds: Ground[] }> {
   const { teamId } = plan
   const game = await findInTeam(manager, Game, teamId, plan.gameId, 'game')
   const opponent = await findInTeam(manager, Opponent, teamId, game.opponentId, 'opponent')
@@ -69,7 +71,7 @@ export async function freezePlan(
     const suggested = choices.choices.find((choice) => choice.counterId === id)?.roles ?? []
     return freezeCounter(counter, seatsOf(plan, counter, suggested))
   }
-  return FrozenPlan.parse({
+  const content = FrozenPlan.parse({
     version: 1,
     opponentName: opponent.name,
     tipOff: game.tipOff,
@@ -84,4 +86,6 @@ export async function freezePlan(
     changeUp: plan.changeUpId === null ? null : await frozen(plan.changeUpId),
     keys: plan.keys,
   } satisfies FrozenPlan)
+  const picked = [plan.firstCallId, plan.changeUpId].filter((id) => id !== null)
+  return { ...content, grounds: await groundsOf(manager, choices, picked) }
 }

@@ -1,8 +1,10 @@
+import { Grounds, GroundsQuery } from '@shared/plans/grounds'
 import { PlanBody, PlanRow, PlanState, SignOffBody } from '@shared/plans/schemas'
 import type { Context } from '../../context'
 import { endpoint, ok } from '../../http/endpoint'
 import { OneRow } from '../../http/params'
-import { putReply } from '../../http/present'
+import { listReply, putReply } from '../../http/present'
+import { planGrounds } from './grounds'
 import { presentPlan } from './plans.presenter'
 import { planState, putPlan } from './plans.service'
 import { signOff } from './signOff.service'
@@ -41,6 +43,17 @@ export const planRoutes = ({ db, clock }: Context) => {
         })
         return putReply(put, presentPlan(put.row))
       },
+    }),
+    endpoint({
+      method: 'get',
+      path: '/teams/:team/games/:id/plan/grounds',
+      summary: 'What a signed version stood on: its reasons with the possessions behind them',
+      action: 'plan:read',
+      params: OneRow,
+      query: GroundsQuery,
+      response: Grounds,
+      handle: async ({ caller, params, query }) =>
+        listReply(await planGrounds(db.manager, caller.teamId, params.id, query.plan)),
     }),
     endpoint({
       method: 'post',
