@@ -70,3 +70,21 @@ export function tickWords(script: Script, shape: ScriptLook['shape'], otherCall:
     .map(([count, words]) => `${count} ${words}`)
   return `${parts.join(', ') || 'no reps'}${other > 0 ? `; ${other} on ${otherCall}` : ''}`
 }
+
+/** Minutes as a share of the whole practice, for CSS. */
+export const shareOf = (script: Script, minutes: number): string => `${(100 * minutes) / script.minutes}%`
+
+export const placeIn = (script: Script, { from, minutes }: { from: number; minutes: number }) => ({
+  left: shareOf(script, from),
+  width: shareOf(script, minutes),
+})
+
+/** Parts in which reps are run, with their place in the script and how many they hold. */
+export const repPartsOf = (script: Script) =>
+  script.parts
+    .map((part, index) => ({
+      ...part,
+      index,
+      count: script.reps.filter(({ kind }) => kind === part.kind).length,
+    }))
+    .filter(({ kind }) => kind === 'walk' || kind === 'overload' || kind === 'live')
