@@ -32,6 +32,7 @@ async function page(query = '') {
     routes: [
       { path: '/t/:team/read/:opponent', name: 'read', component: ReadView, props: true },
       { path: '/t/:team/scout/:opponent', name: 'scouted-games', component: { template: '<i />' } },
+      { path: '/t/:team/possessions/:opponent', name: 'possessions', component: { template: '<i />' } },
     ],
   })
   await router.push(`/t/${TEAM}/read/${OPPONENT}${query}`)
