@@ -46,6 +46,25 @@ export const CounterBody = z.object({
 })
 export type CounterBody = z.infer<typeof CounterBody>
 
+/**
+ * A counter that is still being drawn: it may have no name, no look and no rule set yet, and its drawing may have
+ * faults. It is kept as it is and never offered; counterFaults says what is left to do.
+ */
+export const CounterDraft = CounterBody.extend({
+  name: z.string().trim().max(40),
+  looks: z.array(z.string().max(60)).max(4),
+  rulePacks: z.array(RulePackKey),
+})
+export type CounterDraft = z.infer<typeof CounterDraft>
+
+/** What is put: in the book (`draft: false`) only without faults. */
+export const CounterInput = CounterDraft.extend({ draft: z.boolean().default(false) })
+export type CounterInput = z.infer<typeof CounterInput>
+
+/** Which counters are listed: the book, those still being drawn, those taken out of it, or all of them. */
+export const CounterQuery = z.object({ show: z.enum(['book', 'drafts', 'archived', 'all']).default('book') })
+export type CounterShow = z.infer<typeof CounterQuery>['show']
+
 /** Our own record with it: game trips against a shape, and practice trips. */
 export const CounterRecord = z.object({
   shape: z.string(),
@@ -54,7 +73,13 @@ export const CounterRecord = z.object({
 })
 
 export const CounterRow = RowMeta.extend({
-  ...CounterBody.shape,
+  ...CounterDraft.shape,
+  /** Still being drawn: never offered. */
+  draft: z.boolean().default(false),
+  /** When it was taken out of the book; null while it is in it. */
+  archivedAt: z.iso.datetime().nullable().default(null),
+  /** When it was last walked on a screen. */
+  walkedAt: z.iso.datetime().nullable().default(null),
   record: z.array(CounterRecord),
   /**
    * What practices logged of `liveReps` and `practice`: live reps, and of how many it was counted who got

@@ -15,6 +15,7 @@ import { Membership } from '@server/database/entities/Membership'
 import { Person } from '@server/database/entities/Person'
 import { SquadPlayer } from '@server/database/entities/SquadPlayer'
 import { OTHER_TEAM, PLAYER, startTestApp, TEAM, type Agent, type TestApp } from '../support/testApp'
+import { DEMO_COUNTERS } from '@server/database/demo/counters'
 import { DEMO_RULES } from '@server/database/demo/rules'
 
 /**
@@ -43,7 +44,9 @@ const rowsOf = {
   possession: (rows: Fixture) => ({ id: rows.possession }),
   game: (rows: Fixture) => ({ id: rows.game }),
   still: (rows: Fixture) => ({ id: rows.possession, still: rows.still }),
+  counter: (rows: Fixture) => ({ id: rows.counters[0] ?? '' }),
 }
+const { key: _counter, ...counterBody } = DEMO_COUNTERS[0] ?? { key: '' }
 const { key: _key, ...ruleBody } = DEMO_RULES[0] ?? { key: '' }
 const player = {
   jersey: 44,
@@ -152,8 +155,30 @@ const TABLE: Record<string, Row> = {
     bad: { query: 'limit=0', field: 'limit' },
   },
   'delete /possessions/{id}/stills/{still}': { at: rowsOf.still, success: 204, bad: badId },
-  'get /counters': { at: () => ({}), success: 200, bad: { field: '' } },
-  'get /counters/{id}': { at: (rows) => ({ id: rows.counters[0] ?? '' }), success: 200, bad: badId },
+  'get /counters': { at: () => ({}), success: 200, bad: { query: 'show=mine', field: 'show' } },
+  'get /book.pdf': {
+    at: () => ({}),
+    success: 200,
+    query: (rows) => `counters=${rows.counters[0] ?? ''}`,
+    bad: { query: 'paper=a3', field: 'paper' },
+  },
+  'get /counters/{id}': { at: rowsOf.counter, success: 200, bad: badId },
+  'put /counters/{id}': {
+    at: rowsOf.counter,
+    success: 200,
+    body: () => counterBody,
+    bad: { body: { ...counterBody, name: '' }, field: 'name' },
+  },
+  'post /counters/preview': {
+    at: () => ({}),
+    success: 200,
+    body: () => counterBody,
+    bad: { body: { name: 'no drawing' }, field: 'diagram' },
+  },
+  'get /counters/{id}/export.json': { at: rowsOf.counter, success: 200, bad: badId },
+  'post /counters/{id}/walked': { at: rowsOf.counter, success: 200, body: () => ({}), bad: badId },
+  'post /counters/{id}/archive': { at: rowsOf.counter, success: 200, body: () => ({}), bad: badId },
+  'post /counters/{id}/unarchive': { at: rowsOf.counter, success: 200, body: () => ({}), bad: badId },
   'get /rules': { at: () => ({}), success: 200, bad: { field: '' } },
   'put /rules/{id}': {
     at: (rows) => ({ id: rows.rule }),
