@@ -21,12 +21,15 @@ import { possessionTableRoutes } from './features/possessions/table.routes'
 import { practiceRoutes } from './features/practices/practices.routes'
 import { ruleRoutes } from './features/rules/rules.routes'
 import { scoutedGameRoutes } from './features/scoutedGames/scoutedGames.routes'
+import { mountAccount } from './features/session/account.routes'
 import { passwordLinkRoutes } from './features/session/passwordLink.routes'
-import { mountAccounts } from './features/session/session.routes'
+import { mountPasswordResets } from './features/session/passwordReset.routes'
+import { mountSession } from './features/session/session.routes'
 import { callerIn } from './features/session/session.service'
 import { handOutRoutes } from './features/sheets/handOut.routes'
 import { sheetRoutes } from './features/sheets/sheets.routes'
 import { squadRoutes } from './features/squad/squad.routes'
+import { editStillRoutes } from './features/stills/editStill.routes'
 import { stillRoutes } from './features/stills/stills.routes'
 import { teamRoutes } from './features/team/team.routes'
 import { tendencyRoutes } from './features/tendencies/tendencies.routes'
@@ -48,6 +51,7 @@ export const endpointsOf = (context: Context): Endpoint[] => [
   ...scoutedGameRoutes(context),
   ...possessionRoutes(context),
   ...stillRoutes(context),
+  ...editStillRoutes(context),
   ...tendencyRoutes(context),
   ...counterRoutes(context),
   ...ruleRoutes(context),
@@ -99,7 +103,9 @@ export function createApp(context: Context): Express {
   const description = describeApi(endpoints)
   api.get('/openapi.json', (_req, res) => void res.json(description))
   api.use(middleware)
-  mountAccounts(api, context, passport)
+  mountSession(api, context, passport)
+  mountAccount(api, context)
+  mountPasswordResets(api, context)
   mountJoin(api, context)
   for (const spec of endpoints)
     mount(api, spec, (req, teamId) =>

@@ -21,7 +21,8 @@ interface Import {
   own: boolean
 }
 
-const IMPORT = /(?:from|import)\s*\(?\s*['"]([^'"]+)['"]/g
+/** A sentence may end in the word from; no package's name holds a space or a bracket. */
+const IMPORT = /(?:from|import)\s*\(?\s*['"]([\w@./-]+)['"]/g
 
 function importsOf(file: string): Import[] {
   const from = relative(ROOT, file)

@@ -6,21 +6,12 @@ import { SESSION_COOKIE, type SignedIn } from '../../http/passport'
 import { NotSignedIn } from '../../http/problem'
 import { readBody } from '../../http/readBody'
 import { signInLimits } from '../../http/signInLimits'
-import { mountAccount } from './account.routes'
-import { mountPasswordResets } from './passwordReset.routes'
 import { describeSession } from './session.service'
 
 type Passport = Pick<PassportStatic, 'authenticate'>
 
-/** What people do with their own accounts, signed in or not: below /session and /password-resets. */
-export function mountAccounts(router: Router, context: Context, passport: Passport): void {
-  mountSession(router, context, passport)
-  mountAccount(router, context)
-  mountPasswordResets(router, context)
-}
-
 /** GET, POST and DELETE /session: who I am, sign in (a new session id each time), sign out. */
-function mountSession(router: Router, context: Context, passport: Passport): void {
+export function mountSession(router: Router, context: Context, passport: Passport): void {
   router.get('/session', async (req, res) => {
     if (!req.user) throw new NotSignedIn()
     res.json(await describeSession(context.db, req.user))

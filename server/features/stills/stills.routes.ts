@@ -9,7 +9,6 @@ import { OneRow } from '../../http/params'
 import { NotFound } from '../../http/problem'
 import { oneFile } from '../../http/uploads'
 import { presentStill } from '../possessions/possessions.presenter'
-import { editStillRoutes } from './editStill.routes'
 import { deleteStill, findStill, putStill } from './stills.service'
 
 const OneStill = OneRow.extend({ still: Id })
@@ -20,7 +19,7 @@ const Size = z.object({
 })
 
 /** A still's picture; what is drawn and said about it is in `editStillRoutes`. */
-const pictureRoutes = ({ db, clock, stillFiles }: Context) => [
+export const stillRoutes = ({ db, clock, stillFiles }: Context) => [
   endpoint({
     method: 'put',
     path: '/teams/:team/possessions/:id/stills/:still',
@@ -83,5 +82,3 @@ const pictureRoutes = ({ db, clock, stillFiles }: Context) => [
     },
   }),
 ]
-
-export const stillRoutes = (context: Context) => [...pictureRoutes(context), ...editStillRoutes(context)]
