@@ -2,6 +2,7 @@ import express, { Router, type Express } from 'express'
 import { pinoHttp } from 'pino-http'
 import { REQUEST_SERIALIZERS } from './adapters/log'
 import type { Context } from './context'
+import { bookRoutes } from './features/book/book.routes'
 import { choiceRoutes } from './features/choices/choices.routes'
 import { counterRoutes } from './features/counters/counters.routes'
 import { deletionRoutes } from './features/deletion/deletion.routes'
@@ -54,6 +55,7 @@ export const endpointsOf = (context: Context): Endpoint[] => [
   ...editStillRoutes(context),
   ...tendencyRoutes(context),
   ...counterRoutes(context),
+  ...bookRoutes(context),
   ...ruleRoutes(context),
   ...teamRoutes(context),
   ...squadRoutes(context),

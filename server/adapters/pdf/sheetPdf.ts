@@ -2,6 +2,7 @@ import PDFDocument from 'pdfkit'
 import { sheetContent } from '@shared/sheets/content'
 import { fullerContent } from '@shared/sheets/fuller'
 import type { Paper, SheetView } from '@shared/sheets/schemas'
+import { collected, plainTitle } from './collected'
 import { registerFonts } from './fonts'
 import { layOutFuller } from './fullerLayout'
 import { layOut, type Frame } from './sheetLayout'
@@ -43,7 +44,7 @@ export async function copiesPdf(
   const [first] = pages
   if (!first) throw new Error('a file of copies needs one at least')
   const { title: name, when } = sheetContent(first.view)
-  const title = `${plain(name)}, ${when}`
+  const title = `${plainTitle(name)}, ${when}`
   const doc = new PDFDocument({
     size: [width, height],
     margin: 0,
@@ -76,16 +77,4 @@ function drawing(
   return view.fuller
     ? layOutFuller(doc, fullerContent(view, number), view.content, frame)
     : layOut(doc, sheetContent(view, number), view.content, frame)
-}
-
-/** The title also goes into the file's XML as it is, so it must not hold what XML reads as markup. */
-const plain = (text: string): string => text.replace(/&/g, 'and').replace(/[<>]/g, '')
-
-function collected(doc: InstanceType<typeof PDFDocument>): Promise<Buffer> {
-  return new Promise((resolve, reject) => {
-    const chunks: Buffer[] = []
-    doc.on('data', (chunk: Buffer) => chunks.push(chunk))
-    doc.on('end', () => resolve(Buffer.concat(chunks)))
-    doc.on('error', reject)
-  })
 }

@@ -1,11 +1,9 @@
-import type { TrapZone } from '@shared/court/trapZones'
+import type { Choice } from '@shared/choices/schemas'
 import type { GameRow } from '@shared/games/schemas'
 import type { PlanRow } from '@shared/plans/schemas'
 import { getChoices } from '@/api/choices'
 import { listGames } from '@/api/games'
 import { getPlan } from '@/api/plans'
-import { getTendencies } from '@/api/tendencies'
-import { opponentZones } from '@/components/court/opponentZones'
 
 /** The game that is played next; null when none is ahead. `now` in milliseconds since 1970. */
 export function nextGameOf(games: readonly GameRow[], now: number): GameRow | null {
@@ -18,6 +16,8 @@ export interface NextGame {
   /** The shape they show most; null while nothing is counted. */
   mostly: string | null
   plan: PlanRow | null
+  /** The counters in order against them, with who fits which role. */
+  choices: readonly Choice[]
 }
 
 /** What the book marks for the next game: their shape and what is picked. Null when no game is ahead. */
@@ -28,19 +28,7 @@ export async function loadNextGame(team: string, now: number, signal: AbortSigna
     getChoices(team, game.id, signal),
     getPlan(team, game.id, signal),
   ])
-  return { game, mostly: choices.mostly?.shape ?? null, plan }
-}
-
-/** Where the next opponent traps. Null when no game is ahead or no trap was counted. */
-export async function loadNextTraps(
-  team: string,
-  now: number,
-  signal: AbortSignal,
-): Promise<{ game: GameRow; zones: TrapZone[] } | null> {
-  const game = nextGameOf((await listGames(team, signal)).rows, now)
-  if (game === null) return null
-  const zones = opponentZones(await getTendencies(team, game.opponentId, {}, signal))
-  return zones.length === 0 ? null : { game, zones }
+  return { game, mostly: choices.mostly?.shape ?? null, plan, choices: choices.choices }
 }
 
 /** What a counter is picked as in a plan, in words; empty when it is not. */
