@@ -63,6 +63,8 @@ describe('the ruler', () => {
       ['due', '2026-03-16', 'scout', true],
       ['practice', '2026-03-17', null, false],
       ['due', '2026-03-19', 'teach', false],
+      // The fixture's own practice; the other team has one at the same hour.
+      ['practice', '2026-03-19', null, false],
       ['tip-off', '2026-03-20', null, false],
     ])
     expect(marks[2]?.holder?.name).toBe('Test head')
