@@ -7,22 +7,13 @@ import { lockFolder } from './adapters/folderLock'
 import { createLog } from './adapters/log'
 import { smtpTransport } from './adapters/mail/smtp'
 import { diskStillFiles } from './adapters/stillFiles'
-import { pruneBackups } from './backup/prune'
 import type { Config } from './config'
 import type { Context } from './context'
 import { openDatabase } from './database/dataSource'
 import { DEMO_SIGN_INS } from './database/demo/people'
 import { Person } from './database/entities/Person'
-import { carryMail } from './features/mail/carrier'
-import { forgetOldMail } from './features/mail/oldMail'
-import { eraseDue } from './features/people/erasures.service'
 import { firstRunToken } from './features/people/firstCoach.service'
-import { purgeDeleted } from './features/deletion/purge.service'
-import { forgetOldLinks } from './features/session/passwordReset.service'
-import { expireStills } from './features/stills/expiry.service'
 import { fillDemo } from './features/demo/fillDemo.service'
-import { SESSION_MS } from './http/passport'
-import { SessionStore } from './http/sessionStore'
 
 /** The secret of the settings, or one made once and kept beside the data, readable by its owner only. */
 async function sessionSecret(config: Config): Promise<string> {
@@ -78,25 +69,4 @@ async function open(config: Config): Promise<Omit<Booted, 'close'>> {
   context.firstRunToken = await firstRunToken(context.db)
   const email = In(DEMO_SIGN_INS.map((person) => person.email))
   return { context, demoIsIn: await context.db.getRepository(Person).existsBy({ email }) }
-}
-
-const EVERY_MS = 60_000
-
-/** What has to go goes every minute: deletions past their undo, what is past its time, letters that wait. */
-export function startHousekeeping(context: Context): () => void {
-  const sessions = new SessionStore(context.db, context.clock, SESSION_MS)
-  const sweep = async () => {
-    await purgeDeleted(context.db, context.stillFiles, context.clock())
-    await eraseDue(context.db, context.clock())
-    await expireStills(context.db, context.stillFiles, context.clock())
-    await sessions.sweep()
-    await pruneBackups(context.config, context.clock())
-    await forgetOldLinks(context)
-    await forgetOldMail(context.db, context.clock())
-    await carryMail(context)
-  }
-  const report = (error: unknown) => context.log.error({ err: error }, 'housekeeping failed')
-  void sweep().catch(report)
-  const timer = setInterval(() => void sweep().catch(report), EVERY_MS)
-  return () => clearInterval(timer)
 }

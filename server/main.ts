@@ -1,11 +1,12 @@
 import { join } from 'node:path'
 import { FolderInUse } from './adapters/folderLock'
 import { createApp } from './app'
-import { boot, startHousekeeping, type Booted } from './boot'
+import { boot, type Booted } from './boot'
 import { serveClient } from './clientFiles'
 import { ConfigError, readConfig, type Config } from './config'
 import { linkTo } from './features/mail/linkTo'
 import { DEMO_PASSWORD, DEMO_SIGN_INS } from './database/demo/people'
+import { startHousekeeping } from './housekeeping'
 
 const say = (line: string) => process.stdout.write(`${line}\n`)
 

@@ -11,6 +11,7 @@ import { Plan } from '../../database/entities/Plan'
 import { Possession } from '../../database/entities/Possession'
 import { ScoutedGame } from '../../database/entities/ScoutedGame'
 import { Team } from '../../database/entities/Team'
+import { eachAlone } from '../../database/eachAlone'
 import { findInTeam } from '../../database/findInTeam'
 import { putRow, type Put } from '../../database/putRow'
 import { Conflict, NotFound } from '../../http/problem'
@@ -169,8 +170,11 @@ export async function eraseDue(db: DataSource, now: Date): Promise<number> {
   const due = await db
     .getRepository(Erasure)
     .findBy({ doneAt: IsNull(), stoppedAt: IsNull(), dueAt: LessThanOrEqual(stamp) })
-  for (const { id } of due) await db.transaction((manager) => eraseOne(manager, id, stamp))
-  if (due.length > 0) await leaveNoByte(db)
+  try {
+    await eachAlone(due, ({ id }) => db.transaction((manager) => eraseOne(manager, id, stamp)))
+  } finally {
+    if (due.length > 0) await leaveNoByte(db)
+  }
   return due.length
 }
 

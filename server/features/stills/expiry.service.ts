@@ -3,6 +3,7 @@ import { seasonEnd } from '@shared/stills/expiry'
 import type { StillFiles } from '../../adapters/stillFiles'
 import { Still } from '../../database/entities/Still'
 import { Team } from '../../database/entities/Team'
+import { eachAlone } from '../../database/eachAlone'
 import { dayInZone } from '../../http/zone'
 
 /** The day until which a team's stills are kept unless somebody says another. */
@@ -17,18 +18,20 @@ export async function seasonEndOf(manager: EntityManager, teamId: string, now: D
  */
 export async function expireStills(db: DataSource, files: StillFiles, now: Date): Promise<number> {
   let gone = 0
-  for (const { id: teamId, season, timeZone } of await db.manager.find(Team)) {
+  await eachAlone(await db.manager.find(Team), async ({ id: teamId, season, timeZone }) => {
     const today = dayInZone(now, timeZone)
     await db.manager.update(Still, { teamId, expiresOn: IsNull() }, { expiresOn: seasonEnd(season, today) })
     const over = { teamId, expiresOn: LessThan(today) }
-    for (const { id } of await db.manager.find(Still, { where: over, select: { id: true } }))
-      await db.transaction(async (manager) => {
+    const stills = await db.manager.find(Still, { where: over, select: { id: true } })
+    await eachAlone(stills, ({ id }) =>
+      db.transaction(async (manager) => {
         // Asked again under the lock: its day may just have been moved.
         if (!(await manager.existsBy(Still, { ...over, id }))) return
         await files.remove(teamId, id)
         await manager.delete(Still, { id })
         gone += 1
-      })
-  }
+      }),
+    )
+  })
   return gone
 }
