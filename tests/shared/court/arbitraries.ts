@@ -18,7 +18,8 @@ const defender = fc.constantFrom('X1', 'X2', 'X3', 'X4', 'X5')
 const bend = fraction(-0.6, 0.6)
 const beat = fc.integer({ min: 0, max: 5 })
 
-const anyMove: fc.Arbitrary<Move> = fc.oneof(
+/** Any move that a diagram may hold. */
+export const anyMove: fc.Arbitrary<Move> = fc.oneof(
   fc.record({ kind: fc.constant('cut' as const), who: role, to: anyPlace, bend, beat }),
   fc.record({ kind: fc.constant('dribble' as const), who: role, to: anyPlace, bend, beat }),
   fc.record({
