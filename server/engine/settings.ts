@@ -1,5 +1,6 @@
 import type { Strength } from '@shared/vocabulary'
 import { POOL, type PoolSettings } from '@shared/stats/pooling'
+import { LEAST_FIT } from '@shared/stats/roles'
 
 /** Every figure that a head coach may change; the defaults are RECORD.md sections 4 and 5. */
 export interface EngineSettings {
@@ -36,5 +37,5 @@ export const ENGINE_DEFAULTS: EngineSettings = {
   recordWeights: { sameShape: 1, otherShape: 0.25, practice: 0.25 },
   tieWithin: 0.02,
   leastLiveReps: 10,
-  leastFit: 0.5,
+  leastFit: LEAST_FIT,
 }

@@ -1,5 +1,5 @@
 import { describe, it, expect } from 'vitest'
-import { assign } from '@server/engine/roles'
+import { assign } from '@shared/stats/roles'
 
 const total = (values: number[][]) =>
   assign(values).reduce<number>(

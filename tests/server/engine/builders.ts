@@ -1,6 +1,6 @@
 import type { EngineCounter } from '@server/engine/ranking'
 import type { EnginePlayer } from '@server/engine/facts'
-import type { EngineRole } from '@server/engine/roles'
+import type { EngineRole } from '@shared/stats/roles'
 import type { EngineRule } from '@server/engine/rules'
 import { tendencies, type EngineTendency, type HabitCell } from '@server/engine/tendencies'
 import type { Skills } from '@shared/squad/schemas'

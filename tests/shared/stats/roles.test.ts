@@ -1,7 +1,7 @@
 import { describe, it, expect } from 'vitest'
 import fc from 'fast-check'
-import { assign, assignRoles, fitOf } from '@server/engine/roles'
-import { player, roles, six } from './builders'
+import { assign, assignRoles, fitOf } from '@shared/stats/roles'
+import { player, roles, six } from '../../server/engine/builders'
 
 const square = fc.integer({ min: 1, max: 6 }).chain((size) =>
   fc.array(fc.array(fc.integer({ min: 0, max: 30 }), { minLength: size, maxLength: size }), {

@@ -1,7 +1,13 @@
 import { munkres } from 'munkres'
-import type { RoleFit } from '@shared/choices/schemas'
-import type { CounterRole } from '@shared/counters/schemas'
-import type { EnginePlayer } from './facts'
+import type { RoleFit } from '../choices/schemas'
+import type { CounterRole } from '../counters/schemas'
+import type { SquadPlayerRow } from '../squad/schemas'
+
+/** What the assignment needs of a squad player. */
+export type RolePlayer = Pick<SquadPlayerRow, 'id' | 'skills' | 'available'>
+
+/** Share of a role's needs that a player must meet to fill it, unless it is set otherwise (common practice, no source). */
+export const LEAST_FIT = 0.5
 
 /** What the assignment needs of a counter's role. */
 export type EngineRole = Pick<CounterRole, 'role' | 'title' | 'needs'>
@@ -23,7 +29,7 @@ const FILLED = 10
  * How much of a role a player meets, 0 to 1: the mean over its needs of skill / level, each at most 1.
  * A shortfall so counts in part; a role without needs is met by anybody (common practice, no source).
  */
-export function fitOf(player: EnginePlayer, role: EngineRole): number {
+export function fitOf(player: RolePlayer, role: EngineRole): number {
   if (role.needs.length === 0) return 1
   const met = role.needs.map(({ skill, level }) =>
     level === 0 ? 1 : Math.min(1, player.skills[skill] / level),
@@ -31,7 +37,7 @@ export function fitOf(player: EnginePlayer, role: EngineRole): number {
   return met.reduce((sum, share) => sum + share, 0) / met.length
 }
 
-const spareOf = (player: EnginePlayer, role: EngineRole): number =>
+const spareOf = (player: RolePlayer, role: EngineRole): number =>
   role.needs.reduce((sum, { skill, level }) => sum + Math.max(0, player.skills[skill] - level), 0) /
   Math.max(1, role.needs.length)
 
@@ -53,11 +59,11 @@ export function assign(values: readonly (readonly number[])[]): (number | null)[
  */
 export function assignRoles(
   roles: readonly EngineRole[],
-  squad: readonly EnginePlayer[],
+  squad: readonly RolePlayer[],
   leastFit: number,
 ): Assignment {
   const available = squad.filter((player) => player.available)
-  const worth = (player: EnginePlayer, role: EngineRole) => {
+  const worth = (player: RolePlayer, role: EngineRole) => {
     const fit = fitOf(player, role)
     return (fit >= leastFit ? FILLED : 0) + fit + SPARE * spareOf(player, role)
   }
@@ -70,7 +76,7 @@ export function assignRoles(
     const player = seat === null ? undefined : available[seat]
     const runnerUp = bench
       .filter((candidate) => fitOf(candidate, role) >= leastFit)
-      .reduce<EnginePlayer | null>(
+      .reduce<RolePlayer | null>(
         (best, candidate) => (best && worth(best, role) >= worth(candidate, role) ? best : candidate),
         null,
       )
@@ -100,7 +106,7 @@ function squadTermOf(fits: readonly RoleFit[], leastFit: number): number {
 function unfillableOf(
   roles: readonly EngineRole[],
   fits: readonly RoleFit[],
-  available: readonly EnginePlayer[],
+  available: readonly RolePlayer[],
   leastFit: number,
 ): string | null {
   const nobody = roles.find((role) => !available.some((player) => fitOf(player, role) >= leastFit))
