@@ -86,6 +86,11 @@ export const TendencyRead = z.object({
       order: z.enum(['first', 'later']),
     }),
   ),
+  /**
+   * Where the ball is after each second from the first touch: the middle of the n pressed rows whose track says, as a
+   * fraction of the court. Empty where no track was logged.
+   */
+  ball: z.array(z.object({ second: z.number().int(), x: z.number(), n: z.number().int() })).default([]),
   /** How many claims are in view and how many of them chance alone would give at a true rate of one half. */
   luck: z.object({ inView: z.number().int(), claimed: z.number().int(), byChance: z.number() }),
 })

@@ -7,8 +7,8 @@ import { Conflict, NotFound } from '../../http/problem'
 import { listCounters } from '../counters/counters.service'
 
 /**
- * The team's book as a file: every counter by name, or those asked for. Each stands on the team's own book of rules
- * where it is drawn for it, else on the first that it names.
+ * The team's book as a file: every counter by name, or those asked for, which may be drafts or taken out of the
+ * book. Each stands on the team's own book of rules where it is drawn for it, else on the first that it names.
  * @throws NotFound for a counter that the team does not have
  * @throws Conflict when there is none to print
  */
@@ -18,7 +18,7 @@ export async function printBook(
   { paper, counters }: BookQuery,
 ): Promise<Buffer> {
   const team = await manager.getRepository(Team).findOneByOrFail({ id: teamId })
-  const all = await listCounters(manager, teamId)
+  const all = await listCounters(manager, teamId, counters === undefined ? 'book' : 'all')
   const known = new Set(all.map(({ id }) => id))
   if (counters?.some((id) => !known.has(id))) throw new NotFound('counter')
   const rows = counters === undefined ? all : all.filter(({ id }) => counters.includes(id))

@@ -6,7 +6,11 @@ import type { OpponentRead } from './readOpponent'
 export const gameLabel = (game: Pick<CountedGame, 'kind' | 'foe'>): string =>
   game.kind === 'ours' ? 'against us' : `v ${game.foe}`
 
-export function presentRead(opponentId: string, read: OpponentRead): TendencyRead {
+export function presentRead(
+  opponentId: string,
+  read: OpponentRead,
+  ball: TendencyRead['ball'],
+): TendencyRead {
   return {
     opponentId,
     counted: read.games.reduce((sum, game) => sum + game.rows, 0),
@@ -22,6 +26,7 @@ export function presentRead(opponentId: string, read: OpponentRead): TendencyRea
     tendencies: read.tendencies.map(({ posterior: _posterior, ...tendency }) => tendency),
     pickup: read.pickup,
     spots: read.spots,
+    ball,
     luck: read.luck,
   }
 }

@@ -1,5 +1,6 @@
 import { Evidence, EvidenceQuery, TendencyFilter, TendencyRead } from '@shared/tendencies/schemas'
 import type { Context } from '../../context'
+import { ballAgainst } from '../../database/counting/ballTracks'
 import { findInTeam } from '../../database/findInTeam'
 import { Opponent } from '../../database/entities/Opponent'
 import { endpoint, ok } from '../../http/endpoint'
@@ -24,6 +25,7 @@ export const tendencyRoutes = ({ db }: Context) => [
         presentRead(
           params.id,
           await readOpponent(db.manager, params.id, query, await engineSettings(db.manager, caller.teamId)),
+          await ballAgainst(db.manager, params.id, query),
         ),
       )
     },

@@ -21,6 +21,12 @@ export function courtNotes(read: TendencyRead, marks: ReadMarks): string[] {
   if (counts.length > 0) notes.push(`What each count is of: ${counts.join('; ')}.`)
   const shape = standingShape(read.tendencies)
   if (shape) notes.push(`X: where they start in a ${shape.label}, ${shape.k} of ${shape.n} pressed.`)
+  const ball = read.ball.filter(({ n }) => n > 1)
+  const tracked = Math.max(0, ...ball.map(({ n }) => n))
+  if (tracked > 0)
+    notes.push(
+      `Ticks on the edge: where the ball is after each second, the median of up to ${tracked} tracked.`,
+    )
   if (marks.rest.length > 0) notes.push(`Not drawn: ${marks.rest.join(', ')}.`)
   return notes
 }

@@ -50,6 +50,7 @@ describe('the list of habits', () => {
     const text = spoken(
       list([tally('press', 20, 30)], {
         notCovered: 12,
+        ball: [],
         luck: { inView: 54, claimed: 14, byChance: 6.4 },
       }).text(),
     )

@@ -26,6 +26,7 @@ export const readOf = (tendencies: Tendency[], over: Partial<TendencyRead> = {})
   tendencies,
   pickup: null,
   spots: [],
+  ball: [],
   luck: { inView: tendencies.length, claimed: 2, byChance: 1.2 },
   ...over,
 })
