@@ -21,7 +21,7 @@ export const mailRoutes = (context: Context): Endpoint[] => [
     handle: async ({ caller, query }) => {
       const { mails, total } = await listMail(context.db, caller.teamId, query)
       return ok({
-        rows: mails.map((mail) => presentMail(mail, context.sessionSecret)),
+        rows: mails.map((mail) => presentMail(mail, context.sessionSecret, caller.role)),
         total,
         server: context.mail !== null,
       })
@@ -43,7 +43,7 @@ export const mailRoutes = (context: Context): Endpoint[] => [
         server: context.mail !== null,
       })
       pokeMail(context)
-      return ok(presentMail(mail, context.sessionSecret))
+      return ok(presentMail(mail, context.sessionSecret, caller.role))
     },
   }),
   endpoint({
@@ -55,6 +55,12 @@ export const mailRoutes = (context: Context): Endpoint[] => [
     response: MailRow,
     problems: { 409: 'The letter has left' },
     handle: async ({ caller, params }) =>
-      ok(presentMail(await withdrawMail(context.db, caller.teamId, params.id), context.sessionSecret)),
+      ok(
+        presentMail(
+          await withdrawMail(context.db, caller.teamId, params.id),
+          context.sessionSecret,
+          caller.role,
+        ),
+      ),
   }),
 ]

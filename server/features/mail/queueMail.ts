@@ -21,17 +21,17 @@ export interface NewMail {
 
 /**
  * Puts a letter among those that wait, in the caller's transaction: it leaves only when that commits. The same
- * `onceKey` again is the same letter; nothing is changed and the first one is handed back. Call `pokeMail`
- * (carrier.ts) after the commit so that it leaves at once.
+ * `onceKey` again is the same letter; nothing is changed and the first one is handed back, but for one that was
+ * stopped: it never left, and is written anew. Call `pokeMail` (carrier.ts) after the commit so that it leaves at once.
  */
 export async function queueMail(manager: EntityManager, mail: NewMail): Promise<Mail> {
   const mails = manager.getRepository(Mail)
   const before = await mails.findOneBy({ onceKey: mail.onceKey })
-  if (before) return before
+  if (before && before.state !== 'withdrawn') return before
   const subject = mail.subject.replace(/\s+/g, ' ').trim()
   const stamp = mail.now.toISOString()
   const row: Omit<Mail, 'team'> = {
-    id: randomUUID(),
+    id: before?.id ?? randomUUID(),
     teamId: mail.teamId,
     kind: mail.kind,
     onceKey: mail.onceKey,
@@ -47,23 +47,25 @@ export async function queueMail(manager: EntityManager, mail: NewMail): Promise<
     sentAt: null,
     createdAt: stamp,
   }
-  await mails.insert(row)
+  await mails.save(row)
   return row
 }
 
 /**
  * Stops every letter about a row that has not left yet (a revoked invitation, a recalled sheet), and empties its
- * words, for they may hold a link that is dead now. What is leaving this very moment cannot be stopped.
+ * words, for they may hold a link that is dead now. What is leaving this very moment cannot be stopped. Returns how
+ * many were stopped.
  */
 export async function withdrawMailAbout(
   manager: EntityManager,
   aboutId: string,
   kind: MailKind,
-): Promise<void> {
-  await manager
+): Promise<number> {
+  const { affected } = await manager
     .getRepository(Mail)
     .update(
       { aboutId, kind, state: In(['waiting', 'failed', 'kept']) },
       { state: 'withdrawn', text: '', html: '', nextTryAt: null, trouble: null },
     )
+  return affected ?? 0
 }

@@ -23,7 +23,7 @@ import { tracesOf, type Traces } from './traces'
  * @throws NotFound when there is nobody of that id in the team
  */
 export async function eraseSubject(manager: EntityManager, teamId: string, subject: Subject): Promise<void> {
-  const traces = await tracesOf(manager, teamId, subject)
+  const traces = await tracesOf(manager, teamId, subject, 'also-left')
   const { player, membership, person, letterIds, invitationIds } = traces
   await emptySeats(manager, traces)
   if (letterIds.length > 0) {

@@ -184,7 +184,8 @@ async function eraseOne(manager: EntityManager, id: string, stamp: string): Prom
   const end = (how: 'doneAt' | 'stoppedAt') =>
     manager.update(Erasure, { id }, { [how]: stamp, updatedAt: stamp, version: row.version + 1 })
   try {
-    const { membership } = await tracesOf(manager, row.teamId, { kind: row.kind, id: row.subjectId })
+    const subject = { kind: row.kind, id: row.subjectId }
+    const { membership } = await tracesOf(manager, row.teamId, subject, 'also-left')
     if (membership) await keepAHead(manager, membership, 'the team cannot do without')
   } catch (error) {
     // Gone already is done; the only head coach stays.

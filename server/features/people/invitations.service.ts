@@ -3,14 +3,13 @@ import { labelOf, TEAM_ROLES } from '@shared/vocabulary'
 import type { InvitationBody, InvitationMade } from '@shared/people/schemas'
 import type { Context } from '../../context'
 import { Invitation } from '../../database/entities/Invitation'
-import { Mail } from '../../database/entities/Mail'
 import { Person } from '../../database/entities/Person'
 import { Team } from '../../database/entities/Team'
 import { findInTeam } from '../../database/findInTeam'
 import { recordChange } from '../../database/history'
 import { BadInput, Conflict, NotFound, StaleVersion } from '../../http/problem'
 import { linkTo } from '../mail/linkTo'
-import { queueMail } from '../mail/queueMail'
+import { queueMail, withdrawMailAbout } from '../mail/queueMail'
 import { digestOf, SECRET_PLACE, secretOf } from '../mail/secretLink'
 import { checkPlace } from './members.service'
 import { presentInvitation, stateOf } from './people.presenter'
@@ -179,22 +178,10 @@ export function resendInvitation(
     await manager.update(Invitation, { id }, next)
     Object.assign(row, next)
     await recordChange(manager, Invitation, { teamId, rowId: id, action: 'changed', by, now, fields })
-    await withdrawLetters(manager, id)
+    await withdrawMailAbout(manager, id, 'invitation')
     await writeLetter(server, manager, row, now)
     return made(server, manager, row, now)
   })
-}
-
-/** Letters that have not left stay here: their link opens nothing any more, or a newer one says the same. */
-async function withdrawLetters(manager: EntityManager, aboutId: string): Promise<void> {
-  await manager
-    .createQueryBuilder()
-    .update(Mail)
-    .set({ state: 'withdrawn', nextTryAt: null, text: '', html: '' })
-    .where(`aboutId = :aboutId AND kind = 'invitation' AND state IN ('waiting', 'failed', 'kept')`, {
-      aboutId,
-    })
-    .execute()
 }
 
 /** Takes it back; a repeat changes nothing. @throws NotFound, StaleVersion, Conflict once it was used */
@@ -215,6 +202,6 @@ export function revokeInvitation(
     const stamp = now.toISOString()
     await manager.update(Invitation, { id }, { revokedAt: stamp, updatedAt: stamp, version: row.version + 1 })
     await recordChange(manager, Invitation, { teamId, rowId: id, action: 'deleted', by, now })
-    await withdrawLetters(manager, id)
+    await withdrawMailAbout(manager, id, 'invitation')
   })
 }

@@ -1,4 +1,4 @@
-import { In, IsNull, type EntityManager } from 'typeorm'
+import { In, IsNull, Not, type EntityManager } from 'typeorm'
 import { Invitation } from '../../database/entities/Invitation'
 import { Mail } from '../../database/entities/Mail'
 import { Membership } from '../../database/entities/Membership'
@@ -24,8 +24,16 @@ export interface Traces {
   plans: Plan[]
 }
 
-/** @throws NotFound when there is nobody of that id in the team */
-export async function tracesOf(manager: EntityManager, teamId: string, subject: Subject): Promise<Traces> {
+/**
+ * @param who `also-left` takes a member who has left since the erasure was set: what is known of her is still here
+ * @throws NotFound when there is nobody of that id in the team
+ */
+export async function tracesOf(
+  manager: EntityManager,
+  teamId: string,
+  subject: Subject,
+  who: 'members' | 'also-left' = 'members',
+): Promise<Traces> {
   const { kind, id } = subject
   const player = kind === 'member' ? null : await manager.findOneBy(SquadPlayer, { id, teamId })
   if (kind === 'squad-player' && !player) throw new NotFound('player')
@@ -33,14 +41,16 @@ export async function tracesOf(manager: EntityManager, teamId: string, subject: 
     Membership,
     kind === 'member' ? { teamId, personId: id } : { teamId, squadPlayerId: id },
   )
-  if (kind === 'member' && !membership) throw new NotFound('member')
-  const person = membership && (await manager.findOneBy(Person, { id: membership.personId }))
-  const teams = person ? await manager.countBy(Membership, { personId: person.id }) : 0
-  const addresses = [person?.email ?? null, await ownGuardian(manager, player)].filter(
-    (address) => address !== null,
-  )
+  if (kind === 'member' && !membership && who === 'members') throw new NotFound('member')
+  const personId = membership?.personId ?? (kind === 'member' ? id : null)
+  const person = personId === null ? null : await manager.findOneBy(Person, { id: personId })
+  if (kind === 'member' && !person) throw new NotFound('member')
+  const elsewhere = person
+    ? await manager.countBy(Membership, { personId: person.id, teamId: Not(teamId) })
+    : 0
+  const addresses = await ownAddresses(manager, { teamId, player, person, membership })
   const invitationIds = await invitationsOf(manager, { teamId, player, person, addresses })
-  const accountGoes = person !== null && teams === 1
+  const accountGoes = person !== null && elsewhere === 0
   return {
     teamId,
     player,
@@ -51,7 +61,7 @@ export async function tracesOf(manager: EntityManager, teamId: string, subject: 
     invitationIds,
     letterIds: await lettersOf(manager, {
       teamId,
-      player,
+      playerId: player?.id ?? membership?.squadPlayerId ?? null,
       addresses,
       invitationIds,
       everywhere: accountGoes ? person.email : null,
@@ -60,11 +70,25 @@ export async function tracesOf(manager: EntityManager, teamId: string, subject: 
   }
 }
 
-/** Her guardian's address, unless a sister in the squad has the same: then it is still needed. */
-async function ownGuardian(manager: EntityManager, player: SquadPlayer | null): Promise<string | null> {
-  if (!player || player.guardianEmail === null) return null
-  const { teamId, guardianEmail } = player
-  return (await manager.countBy(SquadPlayer, { teamId, guardianEmail })) === 1 ? guardianEmail : null
+/** The account's and her guardian's address, unless somebody else here has the same: then it is still needed. */
+async function ownAddresses(
+  manager: EntityManager,
+  { teamId, player, person, membership }: Pick<Traces, 'teamId' | 'player' | 'person' | 'membership'>,
+): Promise<string[]> {
+  const own: string[] = []
+  const playerId = player?.id ?? membership?.squadPlayerId ?? null
+  for (const address of new Set([person?.email, player?.guardianEmail])) {
+    if (address === null || address === undefined) continue
+    const families = await manager.findBy(SquadPlayer, { teamId, guardianEmail: address })
+    const holder = await manager.findOneBy(Person, { email: address })
+    const others =
+      families.some(({ id }) => id !== playerId) ||
+      (holder !== null &&
+        holder.id !== person?.id &&
+        (await manager.existsBy(Membership, { teamId, personId: holder.id })))
+    if (!others) own.push(address)
+  }
+  return own
 }
 
 async function invitationsOf(
@@ -84,9 +108,12 @@ async function invitationsOf(
 
 async function lettersOf(
   manager: EntityManager,
-  whose: Pick<Traces, 'teamId' | 'player' | 'addresses' | 'invitationIds'> & { everywhere: string | null },
+  whose: Pick<Traces, 'teamId' | 'addresses' | 'invitationIds'> & {
+    playerId: string | null
+    everywhere: string | null
+  },
 ): Promise<string[]> {
-  const { teamId, player, addresses, invitationIds, everywhere } = whose
+  const { teamId, playerId, addresses, invitationIds, everywhere } = whose
   const found = new Set<string>()
   const take = (rows: Mail[]) => rows.forEach(({ id }) => found.add(id))
   const select = { id: true } as const
@@ -103,11 +130,17 @@ async function lettersOf(
     )
   if (invitationIds.length > 0)
     take(await manager.find(Mail, { select, where: { teamId, aboutId: In(invitationIds) } }))
-  if (player)
+  // By whose sheet it is: her address may have been another one then.
+  if (playerId !== null)
     take(
       await manager
         .createQueryBuilder(Mail, 'mail')
-        .where('mail.teamId = :teamId AND mail.attachment LIKE :hers', { teamId, hers: `%${player.id}%` })
+        .where('mail.teamId = :teamId', { teamId })
+        .andWhere(
+          `(mail.attachment LIKE :hers OR mail.onceKey LIKE :hers OR mail.onceKey IN
+            (SELECT 'recalled:' || copy.sheetId || ':' || copy.id FROM copies copy WHERE copy.squadPlayerId = :playerId))`,
+          { hers: `%${playerId}%`, playerId },
+        )
         .getMany(),
     )
   return [...found]

@@ -9,7 +9,7 @@ import { Team } from '../../database/entities/Team'
 import { sheetWhen } from '@shared/sheets/when'
 import { pokeMail } from '../mail/carrier'
 import { linkTo } from '../mail/linkTo'
-import { queueMail } from '../mail/queueMail'
+import { queueMail, withdrawMailAbout } from '../mail/queueMail'
 import { listCopies } from './copies.service'
 import { pageOfSheet, type WholeSheet } from './sheets.presenter'
 import { getSheet } from './sheets.service'
@@ -30,7 +30,7 @@ export async function recallSheet(
     let withdrawn = 0
     if (whole.sheet.recalledAt === null) {
       await manager.getRepository(Sheet).update({ id: sheetId }, { recalledAt })
-      withdrawn = await withdrawLetters(manager, sheetId)
+      withdrawn = await withdrawMailAbout(manager, sheetId, 'sheet')
       await writeToReaders(context, manager, whole, now)
     }
     const copies = await listCopies(manager, teamId, sheetId)
@@ -38,17 +38,6 @@ export async function recallSheet(
   })
   pokeMail(context)
   return recalled
-}
-
-/** Letters that have not left stay here, and so do those that nobody could deliver. */
-async function withdrawLetters(manager: EntityManager, sheetId: string): Promise<number> {
-  const { affected } = await manager
-    .getRepository(Mail)
-    .update(
-      { aboutId: sheetId, kind: 'sheet', state: In(['waiting', 'kept', 'failed']) },
-      { state: 'withdrawn', nextTryAt: null },
-    )
-  return affected ?? 0
 }
 
 /** A word to everybody whose letter has left. */
