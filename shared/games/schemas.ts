@@ -40,7 +40,11 @@ export const GameRow = RowMeta.extend({
   opponentName: z.string(),
   /** Where the work stands: worked out from what is there, never typed in. */
   station: z.enum(valuesOf(STATIONS)),
-  counts: z.object({ possessions: z.number().int(), scoutedGames: z.number().int() }),
+  counts: z.object({
+    possessions: z.number().int(),
+    scoutedGames: z.number().int(),
+    ourGames: z.number().int(),
+  }),
   /** Newest plan version of this game, signed or not. */
   plan: z
     .object({ id: z.uuid(), number: z.number().int(), signedAt: z.iso.datetime().nullable() })

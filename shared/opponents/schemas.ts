@@ -14,6 +14,8 @@ export const OpponentRow = RowMeta.extend({
   /** Counted, not stored. */
   counts: z.object({
     scoutedGames: z.number().int(),
+    /** Our own games against them in which something was logged: they press us too. */
+    ourGames: z.number().int(),
     possessions: z.number().int(),
     pressed: z.number().int(),
     /** Rows that count towards how often they press: covered, with a shape. */

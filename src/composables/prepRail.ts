@@ -44,9 +44,9 @@ function doneWords(game: GameRow, station: Station, timeZone: string): string {
 }
 
 function whatOf(game: GameRow, station: Station, ahead: number, timeZone: string): string {
-  const { possessions, scoutedGames } = game.counts
+  const { possessions, scoutedGames, ourGames } = game.counts
   if (station === 'scout' && possessions > 0)
-    return `${plural(possessions, 'possession')}, ${plural(scoutedGames, 'game')}`
+    return `${plural(possessions, 'possession')}, ${plural(scoutedGames + ourGames, 'game')}`
   if (ahead < 0) return doneWords(game, station, timeZone)
   const due = dueOf(game, station)
   const dueWords = due === null ? '' : `due ${weekdayAndTime(due, timeZone)}`

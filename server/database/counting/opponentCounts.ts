@@ -44,6 +44,13 @@ export async function countOpponents(
       WHERE teamId = ? ${onlyOf('g')} AND deletedAt IS NULL GROUP BY opponentId`,
     scope,
   )
+  const ours: { opponentId: string; ourGames: number }[] = await manager.query(
+    `SELECT g.opponentId, count(*) AS ourGames FROM games g
+      WHERE g.teamId = ? ${onlyOf('g')} AND g.deletedAt IS NULL
+        AND EXISTS (SELECT 1 FROM possessions p WHERE p.gameId = g.id AND +p.deletedAt IS NULL)
+      GROUP BY g.opponentId`,
+    scope,
+  )
   const meetings: { opponentId: string; id: string; tipOff: string; place: 'home' | 'away' | 'neutral' }[] =
     await manager.query(
       `SELECT opponentId, id, min(tipOff) AS tipOff, place FROM games g
@@ -53,7 +60,7 @@ export async function countOpponents(
   const result = new Map<string, OpponentCounts>()
   const entry = (id: string): OpponentCounts => {
     const fresh = {
-      counts: { scoutedGames: 0, possessions: 0, pressed: 0, pressable: 0, mostlyShape: null },
+      counts: { scoutedGames: 0, ourGames: 0, possessions: 0, pressed: 0, pressable: 0, mostlyShape: null },
       nextGame: null,
     }
     const present = result.get(id) ?? fresh
@@ -70,6 +77,7 @@ export async function countOpponents(
   }
   for (const { counts } of result.values()) if (counts.mostlyShape) counts.mostlyShape.n = counts.pressed
   for (const row of games) entry(row.opponentId).counts.scoutedGames = row.scoutedGames
+  for (const row of ours) entry(row.opponentId).counts.ourGames = row.ourGames
   for (const { opponentId: id, ...game } of meetings) entry(id).nextGame = game
   return result
 }

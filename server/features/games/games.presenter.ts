@@ -10,6 +10,8 @@ export interface GameFacts {
   opponentName: string
   possessions: number
   scoutedGames: number
+  /** Our own games against them in which something was logged. */
+  ourGames: number
   plan: GameRow['plan']
   headCoach: Coach | null
   /** The staff of the team, by id. */
@@ -79,7 +81,7 @@ export function presentGame(row: Game, facts: GameFacts, now: Date): GameRow {
     ...bodyOfGame(row),
     opponentName: facts.opponentName,
     station,
-    counts: { possessions: facts.possessions, scoutedGames: facts.scoutedGames },
+    counts: { possessions: facts.possessions, scoutedGames: facts.scoutedGames, ourGames: facts.ourGames },
     plan: facts.plan,
     headCoach: facts.headCoach && { name: facts.headCoach.name, initials: facts.headCoach.initials },
     holder,

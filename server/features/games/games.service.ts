@@ -43,6 +43,7 @@ export async function presentGames(
       opponentName: opponents.get(game.opponentId) ?? '',
       possessions: counted?.possessions ?? 0,
       scoutedGames: counted?.scoutedGames ?? 0,
+      ourGames: counted?.ourGames ?? 0,
       plan: plans.get(game.id) ?? null,
       headCoach: (head && byId.get(head.id)) ?? null,
       staff: byId,

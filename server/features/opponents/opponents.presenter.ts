@@ -6,6 +6,7 @@ import { metaOf } from '../../http/present'
 
 const NOTHING: OpponentRow['counts'] = {
   scoutedGames: 0,
+  ourGames: 0,
   possessions: 0,
   pressed: 0,
   pressable: 0,

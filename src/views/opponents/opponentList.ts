@@ -45,10 +45,10 @@ const capital = (text: string) => text.charAt(0).toUpperCase() + text.slice(1)
 
 /** The counted sentence under the page's name. */
 export function countedSentence(ahead: readonly Listed[], behind: readonly Listed[]): string {
-  const sum = (key: 'possessions' | 'pressed' | 'scoutedGames') =>
+  const sum = (key: 'possessions' | 'pressed' | 'scoutedGames' | 'ourGames') =>
     [...ahead, ...behind].reduce((total, row) => total + row.opponent.counts[key], 0)
   const behindWords = behind.length === 0 ? '' : `, ${inWords(behind.length)} with none ahead`
-  const games = sum('scoutedGames')
+  const games = sum('scoutedGames') + sum('ourGames')
   const aheadWords = ahead.length === 0 ? 'no one' : inWords(ahead.length)
   const met = capital(`${aheadWords} ahead of us${behindWords}.`)
   if (sum('possessions') === 0) return `${met} Nothing counted yet.`

@@ -90,8 +90,9 @@ const PAGES: Record<Station, [page: Waiting['page'], button: string]> = {
 }
 
 function detailOf(game: GameRow): string {
-  const { possessions, scoutedGames } = game.counts
-  const games = `${scoutedGames} ${scoutedGames === 1 ? 'game' : 'games'}`
+  const { possessions, scoutedGames, ourGames } = game.counts
+  const counted = scoutedGames + ourGames
+  const games = `${counted} ${counted === 1 ? 'game' : 'games'}`
   if (game.station === 'scout')
     return possessions === 0 ? 'Nothing counted yet.' : `${possessions} possessions so far, ${games}.`
   if (game.station === 'read') return `${possessions} possessions of ${games} to decide from.`

@@ -23,7 +23,7 @@ const game: GameRow = {
   read: null,
   handedOn: null,
   mayHandOn: false,
-  counts: { possessions: 58, scoutedGames: 3 },
+  counts: { possessions: 58, scoutedGames: 3, ourGames: 0 },
   plan: null,
   headCoach: { name: 'Maren Oduya', initials: 'MO' },
 }
@@ -61,7 +61,11 @@ describe('railOf', () => {
   })
 
   it('claims no count where nothing is counted, and no page where none is built', () => {
-    const fresh = { ...game, station: 'scout' as const, counts: { possessions: 0, scoutedGames: 2 } }
+    const fresh = {
+      ...game,
+      station: 'scout' as const,
+      counts: { possessions: 0, scoutedGames: 2, ourGames: 0 },
+    }
     const { stations } = railOf(fresh, 'UTC', 'team')
     expect(stations[0]!.what).toBe('Nothing counted yet')
     expect(stations.map((each) => each.to !== undefined)).toEqual([true, true, true, true, false])

@@ -17,7 +17,7 @@ const row: GameRow = {
   due: { scout: null, read: '2026-03-27T18:00:00.000Z', teach: null, review: null },
   notes: 'Bus at **four**.',
   station: 'choose',
-  counts: { possessions: 0, scoutedGames: 0 },
+  counts: { possessions: 0, scoutedGames: 0, ourGames: 0 },
   plan: null,
   headCoach: null,
   holder: null,

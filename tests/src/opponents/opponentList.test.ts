@@ -14,6 +14,7 @@ const opponent = (id: string, next: string | null, possessions = 0, pressed = 0)
   notes: '',
   counts: {
     scoutedGames: possessions > 0 ? 2 : 0,
+    ourGames: 0,
     possessions,
     pressed,
     pressable: possessions,
@@ -37,7 +38,7 @@ const game = (id: string, opponentId: string, tipOff: string): GameRow => ({
   handedOn: null,
   mayHandOn: false,
   station: 'review',
-  counts: { possessions: 0, scoutedGames: 0 },
+  counts: { possessions: 0, scoutedGames: 0, ourGames: 0 },
   plan: null,
   headCoach: null,
 })

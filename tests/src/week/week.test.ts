@@ -26,7 +26,7 @@ const game = (more: Partial<GameRow> = {}): GameRow => ({
   due: { scout: null, read: null, teach: null, review: null },
   notes: 'Bus at four.',
   station: 'choose',
-  counts: { possessions: 58, scoutedGames: 3 },
+  counts: { possessions: 58, scoutedGames: 3, ourGames: 0 },
   plan: null,
   headCoach: maren,
   holder: maren,
@@ -50,7 +50,11 @@ describe('the head of the week', () => {
     expect(standsSentence(game({ read: null }), tomas.id)).toBe(
       '58 possessions are counted. Maren chooses the counter.',
     )
-    const scout = game({ station: 'scout', holder: null, counts: { possessions: 1, scoutedGames: 1 } })
+    const scout = game({
+      station: 'scout',
+      holder: null,
+      counts: { possessions: 1, scoutedGames: 1, ourGames: 0 },
+    })
     expect(standsSentence(scout, maren.id)).toBe('1 possession is counted. Nobody has the ball yet.')
   })
 })
