@@ -22,9 +22,9 @@ beforeAll(async () => {
     expect(answer.status, JSON.stringify(answer.body)).toBe(201)
   }
   const track = (at1: number, at2: number) => [
-    { t: 0, x: 0.1, y: 0.5 },
-    { t: 1, x: at1, y: 0.5 },
-    { t: 2, x: at2, y: 0.5 },
+    { t: 0, x: 0.1, y: 0.5, kind: 'pass' as const },
+    { t: 1, x: at1, y: 0.5, kind: 'pass' as const },
+    { t: 2, x: at2, y: 0.5, kind: 'pass' as const },
   ]
   await add(1, { track: track(0.2, 0.3) })
   await add(2, { track: track(0.3, 0.5), trigger: 'made-free-throw' })
