@@ -48,6 +48,19 @@ export function thinnestWords(totals: readonly RecordCell[]): string {
   return `Thinnest: ${label}, only ${least.n} ${least.n === 1 ? 'try' : 'tries'}`
 }
 
+/** "Not tried against 1-3-1 or other zone": every press without a game trip, said once; empty when all were tried. */
+export function untriedWords(cells: readonly RecordCell[]): string {
+  const labels = cells
+    .filter(({ n }) => n === 0)
+    .map(({ shape }) => PRESSES.find((press) => press.shape === shape)?.label ?? shape)
+    .map((label) => (/^\d/.test(label) ? label : label.toLowerCase()))
+  if (labels.length === 0) return ''
+  if (labels.length === cells.length) return 'Not tried in a game yet.'
+  const last = labels.at(-1) ?? ''
+  const list = labels.length === 1 ? last : `${labels.slice(0, -1).join(', ')} or ${last}`
+  return `Not tried against ${list}.`
+}
+
 /** Counters whose name, call or alignment holds the words looked for, of one family where one is chosen. */
 export function findCounters<Row extends Pick<CounterRow, 'name' | 'call' | 'alignment' | 'family'>>(
   rows: readonly Row[],
