@@ -132,6 +132,24 @@ async function practise({ db, clock }: Context, cast: Cast): Promise<void> {
   }
 }
 
+/** Drawings that were walked on the screen, and how many days ago. */
+const WALKED: readonly (readonly [counter: string, days: number])[] = [
+  ['1-4 across', -1],
+  ['Box, big in the middle', -1],
+  ['Middle three', -6],
+  ['Back and across', -12],
+  ['Stack, go long', -20],
+]
+
+async function walkThem({ db, clock }: Context, cast: Cast): Promise<void> {
+  for (const [name, days] of WALKED)
+    await db.manager.update(
+      Counter,
+      { id: idIn(cast.counters, name) },
+      { walkedAt: at(clock(), days, '20:15').toISOString() },
+    )
+}
+
 /** The read of the Gulls came to Maren last night. */
 async function handOn({ db, clock }: Context, cast: Cast): Promise<void> {
   await db.manager.insert(HandOn, {
@@ -156,5 +174,6 @@ export async function fillDemo(context: Context): Promise<boolean> {
   await handOut(context, cast)
   await practise(context, cast)
   await handOn(context, cast)
+  await walkThem(context, cast)
   return true
 }
