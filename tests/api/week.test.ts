@@ -3,6 +3,7 @@ import { afterAll, beforeAll, describe, expect, it } from 'vitest'
 import { Opening } from '@server/database/entities/Opening'
 import { Person } from '@server/database/entities/Person'
 import { Practice } from '@server/database/entities/Practice'
+import { ENGINE_DEFAULTS } from '@server/engine/settings'
 import { expectedBefore, type OwnCell } from '@server/features/week/lastTime'
 import { startOfDay, weekOf } from '@server/features/week/days'
 import type { Week, WeekEvent } from '@shared/week/schemas'
@@ -130,6 +131,25 @@ describe('what happened since yesterday', () => {
     expect(JSON.stringify(said(now, 'sheets'))).not.toContain('Test player')
   })
 
+  it('has nothing of what was deleted meanwhile but that it was, and is empty again without opponents', async () => {
+    const name = 'Vanishing Saltmarsh'
+    const opponent = await newOpponent(head, name)
+    const scouted = await newScoutedGame(head, opponent)
+    await newPossession(head, scouted, { number: 1 })
+    const game = await newGame(head, opponent)
+    const assistant = (await test.context.db.manager.find(Person)).find(
+      ({ name: who }) => who === 'Test assistant',
+    )
+    await head.post(teamUrl(`/games/${game}/hand-on`)).send({ toId: assistant?.id, note: 'Yours.' })
+    const about = (now: Week) =>
+      now.since
+        .filter((event) => event.about?.includes('Saltmarsh'))
+        .map(({ kind, action }) => [kind, action])
+    expect(about(await week()).length).toBeGreaterThan(2)
+    await head.delete(teamUrl(`/opponents/${opponent}`)).expect(204)
+    expect(about(await week())).toEqual([['opponents', 'deleted']])
+  })
+
   it('keeps to the team', async () => {
     const theirs = (await (await test.as('otherHead')).get(teamUrl('/week', OTHER_TEAM))).body as Week
     expect(theirs.since).toEqual([])
@@ -189,11 +209,18 @@ describe('last time out', () => {
       n: 20,
       ...more,
     })
-    const of = (cells: OwnCell[]) => expectedBefore(cells, 'kite', '1-2-1-1', 10)
+    const of = (cells: OwnCell[]) => expectedBefore(cells, 'kite', '1-2-1-1', 10, ENGINE_DEFAULTS)
     const sum = ({ low, high }: { low: number; high: number }) => low + high
     expect(sum(of([cell({})]))).toBeGreaterThan(sum(of([])))
     expect(sum(of([cell({ k: 0 })]))).toBeLessThan(sum(of([cell({ k: 0, shape: '2-2-1' })])))
     expect(of([cell({ earlier: 0, k: 0 })])).toEqual(of([]))
+  })
+
+  it('stands on the figures that the team has set', () => {
+    const cell: OwnCell = { gameId: 'g', earlier: 1, counterId: 'kite', shape: '1-2-1-1', k: 20, n: 20 }
+    const set = { ...ENGINE_DEFAULTS, basePrior: { rate: 0.1, trips: 400 }, priorTrips: 60 }
+    const usual = expectedBefore([cell], 'kite', '1-2-1-1', 10, ENGINE_DEFAULTS)
+    expect(expectedBefore([cell], 'kite', '1-2-1-1', 10, set).low).toBeLessThan(usual.low)
   })
 
   it('is nothing where no trip was pressed', async () => {

@@ -16,29 +16,32 @@ interface OnGame {
   now: Date
 }
 
-/** The game as it stands for a caller who may move it on. @throws NotFound, NotAllowed */
-async function movable(
-  manager: EntityManager,
-  { gameId, caller, now }: OnGame,
-): Promise<{ row: Game; game: GameRow }> {
+/** The game as it stands. @throws NotFound */
+async function standing(manager: EntityManager, { gameId, caller, now }: OnGame): Promise<GameRow> {
   const row = await findInTeam(manager, Game, caller.teamId, gameId, 'game')
   const [game] = await presentGames(manager, caller.teamId, [row], now, caller)
-  if (!game?.mayHandOn) {
-    const whose = game?.holder ? `It is with ${game.holder.name}.` : 'It is with nobody yet.'
-    throw new NotAllowed(`${whose} Ask them, or the head coach.`)
-  }
-  return { row, game }
+  return game as GameRow
+}
+
+/** @throws NotAllowed for a caller who may not move it on */
+function checkMovable({ mayHandOn, holder }: GameRow): void {
+  if (mayHandOn) return
+  throw new NotAllowed(
+    `${holder ? `It is with ${holder.name}.` : 'It is with nobody yet.'} Ask them, or the head coach.`,
+  )
 }
 
 /**
  * Gives the ball to somebody of the staff, at the station where the work stands. To whoever has it already, with
- * nothing to say, it changes nothing.
+ * nothing to say, it changes nothing; nor does the same again, when an answer got lost on its way.
  * @throws NotFound, NotAllowed, BadInput for a player
  */
 export function handOn(db: DataSource, { body, ...options }: OnGame & { body: HandOnBody }): Promise<void> {
   const { gameId, caller, now } = options
   return db.transaction(async (manager) => {
-    const { game } = await movable(manager, options)
+    const game = await standing(manager, options)
+    if (await isRepeat(manager, options, body, game)) return
+    checkMovable(game)
     const to = await manager
       .getRepository(Membership)
       .findOneBy({ teamId: caller.teamId, personId: body.toId })
@@ -61,6 +64,24 @@ export function handOn(db: DataSource, { body, ...options }: OnGame & { body: Ha
   })
 }
 
+/** Whether the last that happened to the ball, at this station, is that the caller handed it on with these words. */
+async function isRepeat(
+  manager: EntityManager,
+  { gameId, caller }: OnGame,
+  { toId, note }: HandOnBody,
+  { station }: GameRow,
+): Promise<boolean> {
+  const [newest] = await manager
+    .getRepository(HandOn)
+    .find({ where: { gameId }, order: { at: 'DESC' }, take: 1 })
+  return (
+    newest?.fromId === caller.personId &&
+    newest.toId === toId &&
+    newest.note === note &&
+    newest.station === station
+  )
+}
+
 /**
  * Signs the read of a game off, or takes that back: then the ball is at Choose already, so that whoever signed it
  * may, too. The same again changes nothing.
@@ -73,9 +94,9 @@ export function signRead(
   const { gameId, caller, now } = options
   return db.transaction(async (manager) => {
     const found = await findInTeam(manager, Game, caller.teamId, gameId, 'game')
-    const own = !signed && found.readById === caller.personId
-    const row = own ? found : (await movable(manager, options)).row
-    if ((row.readAt !== null) === signed) return
+    const own = found.readById === caller.personId
+    if (!own) checkMovable(await standing(manager, options))
+    if ((found.readAt !== null) === signed) return
     const readAt = signed ? now.toISOString() : null
     await manager
       .getRepository(Game)
@@ -86,7 +107,7 @@ export function signRead(
       action: 'changed',
       by: caller.personId,
       now,
-      fields: [{ field: 'readAt', from: row.readAt, to: readAt }],
+      fields: [{ field: 'readAt', from: found.readAt, to: readAt }],
     })
   })
 }

@@ -45,7 +45,7 @@ export function putPractice(db: DataSource, options: Write & { body: PracticeBod
   const { teamId, body } = options
   return db.transaction(async (manager) => {
     await findInTeam(manager, Game, teamId, body.gameId, 'game')
-    await checkCounters(manager, teamId, body)
+    await checkCounters(manager, options)
     return putRow<Practice, PracticeBody>({
       ...options,
       manager,
@@ -59,13 +59,19 @@ export function putPractice(db: DataSource, options: Write & { body: PracticeBod
   })
 }
 
-async function checkCounters(manager: EntityManager, teamId: string, { reps }: PracticeBody): Promise<void> {
-  const asked = [...new Set(reps.map(({ counterId }) => counterId))]
+/** A practice keeps what was run in it, also once a counter of it is gone for good. @throws NotFound */
+async function checkCounters(
+  manager: EntityManager,
+  { id, teamId, body }: Write & { body: PracticeBody },
+): Promise<void> {
+  const before = await manager.getRepository(Practice).findOneBy({ id, teamId })
+  const kept = new Set(before && bodyOfPractice(before)?.reps.map(({ counterId }) => counterId))
+  const asked = [...new Set(body.reps.map(({ counterId }) => counterId))].filter((one) => !kept.has(one))
   if ((await manager.getRepository(Counter).countBy({ teamId, id: In(asked) })) < asked.length)
     throw new NotFound('counter')
 }
 
-/** Rows of their own beside the body, so that they can be summed. */
+/** Rows of their own beside the body, so that they can be summed; none of a counter that is gone. */
 async function writeReps(
   manager: EntityManager,
   { id, teamId }: Practice,
@@ -73,7 +79,12 @@ async function writeReps(
 ): Promise<void> {
   const rows = manager.getRepository(PracticeReps)
   await rows.delete({ practiceId: id })
-  for (const reps of body.reps) await rows.insert({ id: randomUUID(), teamId, practiceId: id, ...reps })
+  const counters = await manager
+    .getRepository(Counter)
+    .find({ where: { teamId, id: In(body.reps.map(({ counterId }) => counterId)) }, select: { id: true } })
+  const there = new Set(counters.map((counter) => counter.id))
+  for (const reps of body.reps.filter(({ counterId }) => there.has(counterId)))
+    await rows.insert({ id: randomUUID(), teamId, practiceId: id, ...reps })
 }
 
 const practice = (manager: EntityManager, { id, teamId, now, by }: Omit<Write, 'ifMatch'>) => ({

@@ -87,7 +87,10 @@ export function makeCopies(
     const { sheet } = await findSheet(manager, teamId, sheetId)
     const copies = manager.getRepository(Copy)
     const there = await copies.findBy({ id: In(body.copies.map(({ id }) => id)) })
-    for (const copy of there) checkSame(copy, sheetId, body)
+    for (const copy of there) {
+      if (copy.teamId !== teamId) throw new NotFound('copy')
+      checkSame(copy, sheetId, body)
+    }
     const news = body.copies.filter(({ id }) => !there.some((copy) => copy.id === id))
     if (news.length > 0 && sheet.recalledAt !== null)
       throw new Conflict('This sheet was called back. Make copies of the newest one.')

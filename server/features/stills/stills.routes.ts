@@ -39,7 +39,7 @@ export const stillRoutes = ({ db, clock, stillFiles }: Context) => [
         bytes: req.file?.buffer ?? Buffer.alloc(0),
         now: clock(),
       })
-      return { status: created ? 201 : 200, body: presentStill(still) }
+      return { status: created ? 201 : 200, body: presentStill(still), version: still.version }
     },
   }),
   endpoint({

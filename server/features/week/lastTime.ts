@@ -4,7 +4,8 @@ import { betaAfter, betaMean, betaOf } from '@shared/stats/beta'
 import { predictiveRange } from '@shared/stats/predictive'
 import type { LastCall, LastTime } from '@shared/week/schemas'
 import { NOT_STOPPED, PRESSED, THROUGH } from '../../database/counting/expressions'
-import { ENGINE_DEFAULTS } from '../../engine/settings'
+import type { EngineSettings } from '../../engine/settings'
+import { engineSettings } from '../team/team.service'
 
 /** Pressed trips of our own games that were not stopped, by game, counter and shape. */
 export interface OwnCell {
@@ -31,8 +32,8 @@ export function expectedBefore(
   counterId: string,
   shape: string | null,
   n: number,
+  { basePrior, priorTrips, recordWeights }: EngineSettings,
 ): LastCall['expected'] {
-  const { basePrior, priorTrips, recordWeights } = ENGINE_DEFAULTS
   const earlier = cells.filter((cell) => cell.earlier === 1)
   const own = sum(earlier)
   const base = betaMean(betaAfter(betaOf(basePrior.rate, basePrior.trips), own.k, own.n))
@@ -75,6 +76,7 @@ export async function lastTimeOut(
     'SELECT id, name FROM counters WHERE teamId = ?',
     [teamId],
   )
+  const settings = await engineSettings(manager, teamId)
   const shapes = new Map<string, number>()
   for (const { shape, n } of now) shapes.set(shape, (shapes.get(shape) ?? 0) + n)
   const shape = [...shapes].sort((a, b) => b[1] - a[1])[0]?.[0] ?? null
@@ -82,7 +84,7 @@ export async function lastTimeOut(
     .map(({ id, name }): LastCall => {
       const { k, n } = sum(now.filter((cell) => cell.counterId === id))
       const before = sum(cells.filter((cell) => cell.earlier === 1 && cell.counterId === id))
-      return { counterId: id, name, k, n, before, expected: expectedBefore(cells, id, shape, n) }
+      return { counterId: id, name, k, n, before, expected: expectedBefore(cells, id, shape, n, settings) }
     })
     .filter(({ n }) => n > 0)
     .sort((a, b) => b.n - a.n || a.name.localeCompare(b.name))

@@ -17,7 +17,10 @@ interface Line {
 
 const isKind = (kind: string): kind is Kind => SINCE_KINDS.some((known) => known === kind)
 
-/** Rows changed, counted by person, thing and what it is about; one line for a whole evening of logging. */
+/**
+ * Rows changed, counted by person, thing and what it is about; one line for a whole evening of logging. Of a row that
+ * was deleted only that it was.
+ */
 const CHANGED = `
   SELECT c.personId, CASE WHEN c.kind = 'games' AND instr(c.fields, '"readAt"') THEN 'read' ELSE c.kind END AS kind,
          CASE WHEN c.kind = 'games' AND instr(c.fields, '"readAt"')
@@ -46,13 +49,15 @@ const CHANGED = `
     LEFT JOIN practices r ON c.kind = 'practices' AND r.id = c.rowId
     LEFT JOIN games rg ON rg.id = r.gameId LEFT JOIN opponents ro ON ro.id = rg.opponentId
    WHERE c.teamId = ? AND c.at >= ?
+     AND (c.action = 'deleted' OR coalesce(p.deletedAt, hg.deletedAt, gg.deletedAt, o.deletedAt, k.deletedAt,
+                                           op.deletedAt, l.deletedAt, r.deletedAt) IS NULL)
    GROUP BY 1, 2, 3, 6`
 
 const SIGNED = `
   SELECT l.signedById AS personId, 'plans' AS kind, 'signed' AS action, count(*) AS count, NULL AS "of",
          o.name AS about, NULL AS toId, max(l.signedAt) AS at
     FROM plans l JOIN games g ON g.id = l.gameId JOIN opponents o ON o.id = g.opponentId
-   WHERE l.teamId = ? AND l.signedAt >= ? GROUP BY l.signedById, g.id`
+   WHERE l.teamId = ? AND l.signedAt >= ? AND l.deletedAt IS NULL GROUP BY l.signedById, g.id`
 
 /** Players only: that a coach looked at her own sheet is no news. */
 const OPENED = `
@@ -62,13 +67,13 @@ const OPENED = `
     FROM openings n JOIN memberships w ON w.personId = n.personId AND w.teamId = n.teamId AND w.role = 'player'
     JOIN sheets s ON s.id = n.sheetId JOIN plans l ON l.id = s.planId JOIN games g ON g.id = l.gameId
     JOIN opponents o ON o.id = g.opponentId
-   WHERE n.teamId = ? AND n.firstAt >= ? GROUP BY n.sheetId`
+   WHERE n.teamId = ? AND n.firstAt >= ? AND l.deletedAt IS NULL GROUP BY n.sheetId`
 
 const HANDED = `
   SELECT h.fromId AS personId, 'ball' AS kind, 'handed-on' AS action, 1 AS count, NULL AS "of",
          o.name AS about, h.toId, h.at
     FROM hand_ons h JOIN games g ON g.id = h.gameId JOIN opponents o ON o.id = g.opponentId
-   WHERE h.teamId = ? AND h.at >= ?`
+   WHERE h.teamId = ? AND h.at >= ? AND g.deletedAt IS NULL`
 
 /** More lines than anybody reads of a day. */
 const MOST = 24

@@ -1,4 +1,4 @@
-import type { DataSource, EntityManager } from 'typeorm'
+import { IsNull, type DataSource, type EntityManager } from 'typeorm'
 import type { GameRow } from '@shared/games/schemas'
 import { STATIONS, type Station } from '@shared/vocabulary'
 import type { Week, WeekMark } from '@shared/week/schemas'
@@ -85,6 +85,8 @@ export async function weekFor(
     lastTime: last && (await lastTimeOut(manager, teamId, last)),
     since: await sinceThen(manager, teamId, startOfDay(dayAfter(today, -1), timeZone)),
     coaches: (await staffOf(manager, teamId)).map(({ id, name, initials }) => ({ id, name, initials })),
-    empty: games.length === 0 && !(await manager.getRepository(Opponent).existsBy({ teamId })),
+    empty:
+      games.length === 0 &&
+      !(await manager.getRepository(Opponent).existsBy({ teamId, deletedAt: IsNull() })),
   }
 }
