@@ -6,6 +6,7 @@ import { entriesOf, entryFault, withDates } from '@/views/week/dueDates'
 import { verdict } from '@/views/week/lastWords'
 import { layOut, placeInWeek, widthOf, type Placed } from '@/views/week/rulerPlaces'
 import { sinceSentence } from '@/views/week/sinceWords'
+import { ended } from '@/views/week/whereEnded'
 import { dueWords, standsSentence, weekTitle, withMe } from '@/views/week/weekWords'
 
 const NOW = Date.parse('2026-03-17T09:42:00Z')
@@ -120,6 +121,35 @@ describe('the ruler', () => {
       for (const other of labels.slice(index + 1))
         if (other.lane === one.lane)
           expect(one.left + one.width <= other.left || other.left + other.width <= one.left).toBe(true)
+    }
+  })
+
+  it('turns words to the left of their marks where that saves a lane', () => {
+    const at = (days: number): Placed => ({
+      mark: { kind: 'due' } as WeekMark,
+      days,
+      title: 'Choose, due 18:00',
+      under: 'Gulls',
+    })
+    const lanes = (labels: { lane: number }[]) => Math.max(...labels.map(({ lane }) => lane)) + 1
+    // Two marks at nearly one place: one's words to the left, one's to the right, in one lane.
+    expect(lanes(layOut([at(3), at(3.3)], 1400))).toBe(1)
+    expect(lanes(layOut([at(3), at(3.05), at(3.1), at(3.15)], 1400))).toBe(2)
+    expect(layOut([at(1)], 1400)[0]?.before).toBe(false)
+  })
+})
+
+describe('where each trip ended', () => {
+  it('draws every trip once, inside its part, none over another', () => {
+    for (const count of [0, 1, 3, 9, 20, 60]) {
+      const marks = ended(count, [72, 230], 28)
+      expect(marks).toHaveLength(count)
+      for (const [index, { x, y, r }] of marks.entries()) {
+        expect(x).toBeGreaterThanOrEqual(72)
+        expect(x).toBeLessThanOrEqual(230)
+        for (const other of marks.slice(index + 1))
+          expect(Math.hypot(x - other.x, y - other.y)).toBeGreaterThan(2 * r)
+      }
     }
   })
 })
