@@ -1,9 +1,8 @@
 import { randomUUID } from 'node:crypto'
 import { isDeepStrictEqual } from 'node:util'
-import type { EntityManager, EntityTarget } from 'typeorm'
+import type { EntityManager, EntityTarget, ObjectLiteral } from 'typeorm'
 import type { FieldChange } from '@shared/history/schemas'
 import { Change } from './entities/Change'
-import type { TeamRow } from './columns'
 
 /** JSON characters past which a value is told by its length only: a whole drawing, a long note. */
 const LONG = 8000
@@ -35,7 +34,7 @@ export function fieldsChanged(from: object, to: object): FieldChange[] {
 }
 
 /** Writes one entry into a row's history; call it in the transaction of the change itself. */
-export async function recordChange<E extends TeamRow>(
+export async function recordChange<E extends ObjectLiteral>(
   manager: EntityManager,
   entity: EntityTarget<E>,
   { teamId, rowId, action, by, now, fields = [], batchId = null }: NewChange,

@@ -13,10 +13,15 @@ async function isOfTeam(manager: EntityManager, teamId: string, id: string, now:
     ({ tableName }) =>
       `SELECT 1 FROM "${tableName}" WHERE id = ? AND teamId = ? AND (deletedAt IS NULL OR deletedAt > ?)`,
   )
-  const found: unknown[] = await manager.query(
-    `${parts.join(' UNION ALL ')} LIMIT 1`,
-    parts.flatMap(() => [id, teamId, undoUntil(now)]),
-  )
+  // A still is there while its possession is; a membership has no undo.
+  const stills = `SELECT 1 FROM stills s JOIN possessions p ON p.id = s.possessionId
+                   WHERE s.id = ? AND s.teamId = ? AND (p.deletedAt IS NULL OR p.deletedAt > ?)`
+  const members = 'SELECT 1 FROM memberships WHERE id = ? AND teamId = ?'
+  const found: unknown[] = await manager.query(`${[...parts, stills, members].join(' UNION ALL ')} LIMIT 1`, [
+    ...[...parts, stills].flatMap(() => [id, teamId, undoUntil(now)]),
+    id,
+    teamId,
+  ])
   return found.length > 0
 }
 

@@ -12,8 +12,8 @@ interface Line {
 }
 
 /**
- * Lines of what happened, newest first: rows of one batch are one line, and the possessions that one person
- * logged in one game are one line. SQLite takes a bare column from the row that holds the maximum.
+ * Lines of what happened, newest first: rows of one batch are one line, and so are the possessions that one person
+ * logged in one game, and what one person did to a still. SQLite takes a bare column from the row that holds the maximum.
  */
 const LINES = `
   SELECT id, at, rows, count(*) OVER () AS total FROM (
@@ -23,6 +23,7 @@ const LINES = `
      GROUP BY CASE WHEN c.batchId IS NOT NULL THEN c.batchId || c.action
                    WHEN p.id IS NOT NULL
                    THEN coalesce(c.personId, '') || coalesce(p.scoutedGameId, p.gameId)
+                   WHEN c.kind = 'stills' THEN c.rowId || coalesce(c.personId, '')
                    ELSE c.id END)
    ORDER BY at DESC, id LIMIT ?`
 
@@ -31,7 +32,7 @@ type Place = Pick<NewsRow, 'label' | 'open' | 'opponentId' | 'scoutedGameId' | '
 /** Where rows of a kind are, and what they are called; `r` is the row. A person's name stands in none but squad_players. */
 const PLACES: Record<
   string,
-  { label: string; from: string; opponent?: string; scouted?: string; game?: string }
+  { label: string; from: string; open?: string; opponent?: string; scouted?: string; game?: string }
 > = {
   opponents: { label: 'r.name', from: '', opponent: 'r.id' },
   scouted_games: {
@@ -50,6 +51,15 @@ const PLACES: Record<
     label: `'No. ' || r.number || ', ' || o.shortName || CASE WHEN s.id IS NULL THEN ' against us' ELSE ' v ' || s.foe END`,
     from: `LEFT JOIN scouted_games s ON s.id = r.scoutedGameId LEFT JOIN games g ON g.id = r.gameId
            JOIN opponents o ON o.id = coalesce(s.opponentId, g.opponentId)`,
+    opponent: 'o.id',
+    scouted: 's.id',
+    game: 'g.id',
+  },
+  stills: {
+    label: `'Still of no. ' || p.number || ', ' || o.shortName`,
+    from: `JOIN possessions p ON p.id = r.possessionId LEFT JOIN scouted_games s ON s.id = p.scoutedGameId
+           LEFT JOIN games g ON g.id = p.gameId JOIN opponents o ON o.id = coalesce(s.opponentId, g.opponentId)`,
+    open: 'p.deletedAt IS NULL',
     opponent: 'o.id',
     scouted: 's.id',
     game: 'g.id',
@@ -89,7 +99,7 @@ async function placesOf(
   const sql = PLACES[kind]
   if (!sql) return new Map()
   const rows: (Omit<Place, 'open'> & { id: string; open: number })[] = await manager.query(
-    `SELECT r.id, ${sql.label} AS label, r.deletedAt IS NULL AS open, ${sql.opponent ?? 'NULL'} AS opponentId,
+    `SELECT r.id, ${sql.label} AS label, ${sql.open ?? 'r.deletedAt IS NULL'} AS open, ${sql.opponent ?? 'NULL'} AS opponentId,
             ${sql.scouted ?? 'NULL'} AS scoutedGameId, ${sql.game ?? 'NULL'} AS gameId
        FROM "${kind}" r ${sql.from} WHERE r.teamId = ? AND r.id IN (${ids.map(() => '?').join(', ')})`,
     [teamId, ...ids],

@@ -30,7 +30,8 @@ export async function eraseSubject(manager: EntityManager, teamId: string, subje
     await manager.update(Copy, { teamId, mailId: In(letterIds) }, { mailId: null })
     await manager.delete(Mail, { id: In(letterIds) })
   }
-  await forgetHistory(manager, [...invitationIds, ...(player ? [player.id] : [])])
+  const gone = [player?.id, membership?.id].filter((id) => id !== undefined)
+  await forgetHistory(manager, [...invitationIds, ...gone])
   if (invitationIds.length > 0) await manager.delete(Invitation, { id: In(invitationIds) })
   if (membership) await manager.delete(Membership, { id: membership.id })
   // Memberships, invitations and copies that name her let go of her by their foreign keys.

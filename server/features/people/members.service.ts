@@ -3,6 +3,7 @@ import type { MemberEdit } from '@shared/people/schemas'
 import { Membership } from '../../database/entities/Membership'
 import { SquadPlayer } from '../../database/entities/SquadPlayer'
 import { findInTeam } from '../../database/findInTeam'
+import { fieldsChanged, recordChange } from '../../database/history'
 import { Conflict, NeedsIfMatch, NotFound, StaleVersion } from '../../http/problem'
 import { presentMember, type WithPerson } from './people.presenter'
 
@@ -42,9 +43,16 @@ export async function checkPlace(
 /** @throws NotFound, StaleVersion, NeedsIfMatch, Conflict for the only head coach and a place that is taken */
 export function changeMember(
   db: DataSource,
-  options: { teamId: string; id: string; callerId: string; body: MemberEdit; ifMatch: number | null },
+  options: {
+    teamId: string
+    id: string
+    callerId: string
+    body: MemberEdit
+    ifMatch: number | null
+    now: Date
+  },
 ) {
-  const { teamId, id, callerId, body, ifMatch } = options
+  const { teamId, id, callerId, body, ifMatch, now } = options
   return db.transaction(async (manager) => {
     const row = await findMember(manager, teamId, id)
     const present = async () => presentMember(row, { callerId, heads: await headsOf(manager, teamId) })
@@ -54,8 +62,17 @@ export function changeMember(
     if (body.role !== 'head-coach') await keepAHead(manager, row, 'the role stays')
     if (body.squadPlayerId !== null) await checkPlace(manager, teamId, body.squadPlayerId, id)
     const version = row.version + 1
+    const fields = fieldsChanged({ role: row.role, squadPlayerId: row.squadPlayerId }, body)
     Object.assign(row, body, { version })
     await manager.update(Membership, { id }, { ...body, version })
+    await recordChange(manager, Membership, {
+      teamId,
+      rowId: id,
+      action: 'changed',
+      by: callerId,
+      now,
+      fields,
+    })
     return present()
   })
 }
@@ -63,11 +80,11 @@ export function changeMember(
 /** Takes a membership out; what they did for the team stays. @throws NotFound, StaleVersion, Conflict */
 export function removeMember(
   db: DataSource,
-  options: { teamId: string; callerId: string; ifMatch: number | null } & (
+  options: { teamId: string; callerId: string; ifMatch: number | null; now: Date } & (
     { id: string } | { personId: string }
   ),
 ): Promise<void> {
-  const { teamId, callerId, ifMatch } = options
+  const { teamId, callerId, ifMatch, now } = options
   return db.transaction(async (manager) => {
     const id =
       'id' in options
@@ -81,5 +98,6 @@ export function removeMember(
       )
     await keepAHead(manager, row, 'they stay in the team')
     await manager.delete(Membership, { id })
+    await recordChange(manager, Membership, { teamId, rowId: id, action: 'deleted', by: callerId, now })
   })
 }

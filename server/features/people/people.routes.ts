@@ -50,7 +50,7 @@ export const peopleRoutes = ({ db, clock, config }: Context) => [
     response: MemberRow,
     handle: async ({ caller, params, body, ifMatch }) => {
       const where = { teamId: caller.teamId, id: params.id, callerId: caller.personId }
-      const row = await changeMember(db, { ...where, body, ifMatch })
+      const row = await changeMember(db, { ...where, body, ifMatch, now: clock() })
       return ok(row, row.version)
     },
   }),
@@ -62,7 +62,7 @@ export const peopleRoutes = ({ db, clock, config }: Context) => [
     params: OneRow,
     handle: async ({ caller, params, ifMatch }) => {
       const { teamId, personId: callerId } = caller
-      await removeMember(db, { teamId, callerId, id: params.id, ifMatch })
+      await removeMember(db, { teamId, callerId, id: params.id, ifMatch, now: clock() })
       return { status: 204 }
     },
   }),
@@ -74,7 +74,7 @@ export const peopleRoutes = ({ db, clock, config }: Context) => [
     params: InTeam,
     handle: async ({ caller, ifMatch }) => {
       const { teamId, personId } = caller
-      await removeMember(db, { teamId, callerId: personId, personId, ifMatch })
+      await removeMember(db, { teamId, callerId: personId, personId, ifMatch, now: clock() })
       return { status: 204 }
     },
   }),

@@ -17,6 +17,7 @@ export const editStillRoutes = ({ db, clock, stillFiles }: Context) => {
   const editOf = (caller: Caller, id: string, ifMatch: number | null): StillEdit => ({
     teamId: caller.teamId,
     role: caller.role,
+    by: caller.personId,
     id,
     ifMatch,
     now: clock(),

@@ -9,6 +9,7 @@ import { blurPicture } from '../../adapters/pictures'
 import type { StillFiles } from '../../adapters/stillFiles'
 import { Still } from '../../database/entities/Still'
 import { Team } from '../../database/entities/Team'
+import { fieldsChanged, recordChange } from '../../database/history'
 import { BadInput, Conflict, NeedsIfMatch, StaleVersion } from '../../http/problem'
 import { dayInZone } from '../../http/zone'
 import { presentStill } from '../possessions/possessions.presenter'
@@ -20,6 +21,7 @@ export interface StillEdit {
   id: string
   ifMatch: number | null
   role: TeamRole
+  by: string
   now: Date
 }
 
@@ -75,6 +77,16 @@ async function move(manager: EntityManager, still: Still, place: number): Promis
   return order.findIndex(({ id }) => id === still.id) + 1
 }
 
+const record = (manager: EntityManager, { teamId, id, by, now }: StillEdit, from: object, to: object) =>
+  recordChange(manager, Still, {
+    teamId,
+    rowId: id,
+    action: 'changed',
+    by,
+    now,
+    fields: fieldsChanged(from, to),
+  })
+
 /**
  * Changes some fields of a still. A face that is found on one in the report takes it out of the report.
  * @throws NotFound, NeedsIfMatch, StaleVersion, Conflict, BadInput
@@ -92,6 +104,7 @@ export function patchStill(db: DataSource, edit: StillEdit, patch: StillPatch): 
     if (place === still.position && isDeepStrictEqual(before, after)) return still
     const version = still.version + 1
     await manager.update(Still, { id: still.id }, { ...after, version } as never)
+    await record(manager, edit, { ...before, position: still.position }, { ...after, position: place })
     return manager.create(Still, { ...still, ...after, position: place, version } as Still)
   })
 }
@@ -117,6 +130,8 @@ export function blurStill(
       version: still.version + 1,
     }
     await manager.update(Still, { id: still.id }, columns)
+    const { version: _version, ...told } = columns
+    await record(manager, edit, still, told)
     // Last: if the row cannot be written, the picture is not touched.
     await files.replace(still.teamId, still.id, picture)
     return manager.create(Still, { ...still, ...columns })

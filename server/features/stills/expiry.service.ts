@@ -4,6 +4,7 @@ import type { StillFiles } from '../../adapters/stillFiles'
 import { Still } from '../../database/entities/Still'
 import { Team } from '../../database/entities/Team'
 import { eachAlone } from '../../database/eachAlone'
+import { forgetHistory } from '../../database/history'
 import { dayInZone } from '../../http/zone'
 
 /** The day until which a team's stills are kept unless somebody says another. */
@@ -29,6 +30,7 @@ export async function expireStills(db: DataSource, files: StillFiles, now: Date)
         if (!(await manager.existsBy(Still, { ...over, id }))) return
         await files.remove(teamId, id)
         await manager.delete(Still, { id })
+        await forgetHistory(manager, [id])
         gone += 1
       }),
     )

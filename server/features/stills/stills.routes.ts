@@ -38,6 +38,7 @@ export const stillRoutes = ({ db, clock, stillFiles }: Context) => [
         fields: body,
         bytes: req.file?.buffer ?? Buffer.alloc(0),
         now: clock(),
+        by: caller.personId,
       })
       return { status: created ? 201 : 200, body: presentStill(still), version: still.version }
     },

@@ -7,6 +7,7 @@ import type { StillFiles } from '../../adapters/stillFiles'
 import { Possession } from '../../database/entities/Possession'
 import { Still } from '../../database/entities/Still'
 import { findInTeam } from '../../database/findInTeam'
+import { forgetHistory, recordChange } from '../../database/history'
 import { BadInput, Conflict, NotFound } from '../../http/problem'
 import { getPossession } from '../possessions/possessions.service'
 import { seasonEndOf } from './expiry.service'
@@ -18,6 +19,8 @@ interface Upload {
   fields: StillFields
   bytes: Buffer
   now: Date
+  /** Whoever sends it. */
+  by: string
 }
 
 const REFUSALS: Record<PictureRefused['why'], string> = {
@@ -45,7 +48,7 @@ export async function putStill(
   files: StillFiles,
   upload: Upload,
 ): Promise<{ still: Still; created: boolean }> {
-  const { teamId, possessionId, stillId, fields, now } = upload
+  const { teamId, possessionId, stillId, fields, now, by } = upload
   const digest = createHash('sha256').update(upload.bytes).digest('hex')
   await getPossession(db.manager, teamId, possessionId)
   const there = await same(db.manager, upload, digest)
@@ -79,6 +82,7 @@ export async function putStill(
         createdAt: now.toISOString(),
       }
       await manager.insert(Still, columns)
+      await recordChange(manager, Still, { teamId, rowId: stillId, action: 'made', by, now })
       await files.keep(teamId, stillId, picture)
       kept = true
       return { still: manager.create(Still, columns), created: true }
@@ -116,7 +120,7 @@ async function checkRoom(manager: EntityManager, possessionId: string): Promise<
 }
 
 /**
- * Row and files go at once; a picture of minors is not kept for an undo. Files first, as in a purge: if that
+ * Row, history and files go at once; a picture of minors is not kept for an undo. Files first, as in a purge: if that
  * fails, the row is still there to try again from. In one transaction, so that a still sent anew under the
  * same id waits and does not lose its files.
  * @throws NotFound
@@ -131,6 +135,7 @@ export function deleteStill(
     if (still.possessionId !== which.possessionId) throw new NotFound('still')
     await files.remove(still.teamId, still.id)
     await manager.delete(Still, { id: still.id })
+    await forgetHistory(manager, [still.id])
   })
 }
 

@@ -1,13 +1,11 @@
-import { randomUUID } from 'node:crypto'
 import { isDeepStrictEqual } from 'node:util'
 import type { DataSource, EntityManager } from 'typeorm'
 import { ownCourtFaults } from '@shared/court/ownCourt'
 import { rulePack } from '@shared/court/rulePacks'
 import { FIGURE_KEYS, figureOf } from '@shared/team/figures'
 import { settingsOf, type TeamBody } from '@shared/team/settings'
-import { Change } from '../../database/entities/Change'
 import { Team } from '../../database/entities/Team'
-import { fieldsChanged } from '../../database/history'
+import { fieldsChanged, recordChange } from '../../database/history'
 import type { EngineSettings } from '../../engine/settings'
 import { ENGINE_DEFAULTS } from '../../engine/settings'
 import { BadInput, NeedsIfMatch, StaleVersion } from '../../http/problem'
@@ -45,17 +43,8 @@ export function putTeam(
       { id: teamId },
       { ...body, settings: body.settings as never, version: row.version },
     )
-    await manager.insert(Change, {
-      id: randomUUID(),
-      teamId,
-      kind: 'teams',
-      rowId: teamId,
-      action: 'changed',
-      personId: by,
-      at: now.toISOString(),
-      batchId: null,
-      fields: fieldsChanged(before, body),
-    })
+    const fields = fieldsChanged(before, body)
+    await recordChange(manager, Team, { teamId, rowId: teamId, action: 'changed', by, now, fields })
     return row
   })
 }
