@@ -102,7 +102,7 @@ describe('one possession to one printed sheet', () => {
     await page.keyboard.press('4')
     const still = join(folder, 'still.jpg')
     await writeFile(still, await jpeg(1600, 900))
-    await page.locator('input[type=file]').setInputFiles(still)
+    await page.getByLabel('Pictures for this possession').setInputFiles(still)
     expect(await seriousFaults(page)).toEqual([])
     const sent = page.waitForResponse(
       (answer) => answer.url().includes('/stills/') && answer.request().method() === 'PUT',

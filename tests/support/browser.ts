@@ -28,7 +28,7 @@ export async function openPage(
 ): Promise<{ page: Page; faults: string[] }> {
   const context = await browser.newContext({ baseURL, viewport, reducedMotion: 'reduce', serviceWorkers })
   const page = await context.newPage()
-  page.setDefaultTimeout(30_000)
+  page.setDefaultTimeout(15_000)
   const faults: string[] = []
   page.on('pageerror', (error) => faults.push(error.message))
   page.on('console', (message) => {

@@ -20,6 +20,7 @@ export async function startProduct(env: Record<string, string> = {}, dataDir?: s
     stdio: ['ignore', 'pipe', 'pipe'],
   })
   let output = ''
+  let stopping = false
   const url = await new Promise<string>((resolve, reject) => {
     const timer = setTimeout(() => reject(new Error(`the server did not start: ${output}`)), START_MS)
     const read = (chunk: Buffer) => {
@@ -31,6 +32,10 @@ export async function startProduct(env: Record<string, string> = {}, dataDir?: s
     }
     server.stdout?.on('data', read)
     server.stderr?.on('data', read)
+    server.on('exit', (code, signal) => {
+      // A test then only sees that nobody answers; why stands in what the server printed.
+      if (!stopping) process.stderr.write(`the server stopped with ${code ?? signal}: ${output}\n`)
+    })
     server.on('exit', (code) => reject(new Error(`the server stopped with ${code}: ${output}`)))
   })
   return {
@@ -38,6 +43,7 @@ export async function startProduct(env: Record<string, string> = {}, dataDir?: s
     printed: () => output,
     stop: async () => {
       const ended = new Promise((resolve) => server.once('exit', resolve))
+      stopping = true
       server.kill('SIGTERM')
       await ended
       if (dataDir === undefined) await rm(folder, { recursive: true, force: true })
