@@ -1,6 +1,7 @@
 import type { Choice, Reason } from '@shared/choices/schemas'
 import type { Demand } from '@shared/rules/schemas'
-import { TRAITS, labelOf, type Trait } from '@shared/vocabulary'
+import { TRAITS, type Trait } from '@shared/counterWords'
+import { labelOf } from '@shared/vocabulary'
 import type { FiredRule } from './rules'
 import type { EngineSettings } from './settings'
 

@@ -1,4 +1,4 @@
-import type { Strength } from '@shared/vocabulary'
+import type { Strength } from '@shared/counterWords'
 import { POOL, type PoolSettings } from '@shared/stats/pooling'
 import { LEAST_FIT } from '@shared/stats/roles'
 

@@ -3,7 +3,8 @@ import { Id } from '../http/common'
 import { RuleBody } from '../rules/schemas'
 import { Interval } from '../tendencies/schemas'
 import { Role } from '../court/diagram'
-import { STRENGTHS, valuesOf } from '../vocabulary'
+import { STRENGTHS } from '../counterWords'
+import { valuesOf } from '../vocabulary'
 
 /** One line for or against a counter: the rule, the habit behind it, the count, the weight and its sign. */
 export const Reason = z.object({

@@ -2,7 +2,8 @@ import { z } from 'zod'
 import { RowMeta } from '../http/common'
 import { Diagram, Role } from '../court/diagram'
 import { RulePackKey } from '../court/rulePacks'
-import { FAMILIES, SKILLS, TRAITS, valuesOf } from '../vocabulary'
+import { FAMILIES, SKILLS, TRAITS } from '../counterWords'
+import { valuesOf } from '../vocabulary'
 import { SkillLevel } from '../squad/schemas'
 
 export const CounterRole = z.object({

@@ -1,7 +1,8 @@
 import { z } from 'zod'
 import { RowMeta } from '../http/common'
 import { LIMITS } from '../limits'
-import { GRADES, STRENGTHS, TRAITS, valuesOf } from '../vocabulary'
+import { STRENGTHS, TRAITS } from '../counterWords'
+import { GRADES, valuesOf } from '../vocabulary'
 
 /** Facts that are not habits: counts of the record, our squad, the rule set, the book. */
 export const FACTS = [

@@ -2,7 +2,7 @@ import { z } from 'zod'
 import { Day, RowMeta } from '../http/common'
 import { Jersey } from '../possessions/schemas'
 import { Email } from '../session/schemas'
-import { SKILLS } from '../vocabulary'
+import { SKILLS } from '../counterWords'
 
 /** 0 not yet, 1 when free, 2 under pressure, 3 our best (common practice, no source). */
 export const SkillLevel = z.number().int().min(0).max(3)

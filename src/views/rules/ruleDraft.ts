@@ -1,6 +1,7 @@
 import type { RuleBody, RuleRow } from '@shared/rules/schemas'
 import { LIMITS } from '@shared/limits'
-import { labelOf, STRENGTHS, TRAITS, type Strength } from '@shared/vocabulary'
+import { STRENGTHS, TRAITS, type Strength } from '@shared/counterWords'
+import { labelOf } from '@shared/vocabulary'
 
 /** What is changed of a rule and not kept yet, on top of the row that it was changed on. */
 export interface RuleDraft {

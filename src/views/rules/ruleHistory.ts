@@ -1,6 +1,7 @@
 import type { ChangeRow } from '@shared/history/schemas'
 import { Demand } from '@shared/rules/schemas'
-import { labelOf, STRENGTHS, TRAITS } from '@shared/vocabulary'
+import { STRENGTHS, TRAITS } from '@shared/counterWords'
+import { labelOf } from '@shared/vocabulary'
 
 /** What changed from what, as a correction is written: the old is struck, the new stands beside it. */
 export interface Correction {

@@ -1,5 +1,6 @@
 import type { Condition, Demand, RuleBody } from '@shared/rules/schemas'
-import { labelOf, STRENGTHS, TRAITS, type Strength } from '@shared/vocabulary'
+import { STRENGTHS, TRAITS, type Strength } from '@shared/counterWords'
+import { labelOf } from '@shared/vocabulary'
 import { clausesOf, type Joined } from './conditionWords'
 
 /** A stretch of a rule's sentence and what it is; a strength and the reason can be changed where they stand. */

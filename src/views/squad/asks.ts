@@ -1,7 +1,7 @@
 import type { CounterRole } from '@shared/counters/schemas'
 import type { SquadPlayerRow } from '@shared/squad/schemas'
 import { assignRoles, fitOf, LEAST_FIT } from '@shared/stats/roles'
-import { SKILLS, type Skill } from '@shared/vocabulary'
+import { SKILLS, type Skill } from '@shared/counterWords'
 
 type Seat = CounterRole['role']
 type Roles = readonly Pick<CounterRole, 'role' | 'title' | 'needs'>[]

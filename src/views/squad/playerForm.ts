@@ -1,7 +1,7 @@
 import { LIMITS } from '@shared/limits'
 import { Email } from '@shared/session/schemas'
 import type { SquadPlayerBody, SquadPlayerRow } from '@shared/squad/schemas'
-import { SKILLS, type Skill } from '@shared/vocabulary'
+import { SKILLS, type Skill } from '@shared/counterWords'
 import { LEVELS } from '@/components/skillLevels'
 
 /** A player's form as it is typed: the number and the day are text until they are sent. */

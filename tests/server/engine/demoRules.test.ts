@@ -4,7 +4,7 @@ import { factsOf, type EnginePlayer, type GivenFacts } from '@server/engine/fact
 import { reasonsFor, warningsForAll } from '@server/engine/reasons'
 import { runRules } from '@server/engine/rules'
 import { ENGINE_DEFAULTS } from '@server/engine/settings'
-import type { Skill, Trait } from '@shared/vocabulary'
+import type { Skill, Trait } from '@shared/counterWords'
 import { player, read, type Counts } from './builders'
 
 const rules = DEMO_RULES.map((body) => ({ ...body, id: body.key }))

@@ -1,5 +1,5 @@
 import { describe, it, expect } from 'vitest'
-import type { Skill } from '@shared/vocabulary'
+import type { Skill } from '@shared/counterWords'
 import { asksOf, fitsOf, fitWords, readSkill } from '@/views/squad/asks'
 
 const NONE = { handle: 0, 'throw-in': 0, 'long-arm': 0, decide: 0, sprint: 0, screen: 0 }
