@@ -66,7 +66,8 @@ export function stationLabels(
   width: number,
   least: number,
 ): StationLabel[] {
-  const bare = Math.min(Math.max(least, NUMBER + PAD), width / Math.max(1, stations.length))
+  const share = (width + GAP) / Math.max(1, stations.length) - GAP
+  const bare = Math.min(Math.max(least, NUMBER + PAD), share)
   const full = stations.map(({ title }) => Math.max(bare, NUMBER + PAD + textWidth(title, TYPE, 'label')))
   const room = (widths: readonly number[]) => widths.reduce((sum, one) => sum + one + GAP, -GAP) <= width
   const one = full.map((wide, i) => (i === current ? wide : bare))
