@@ -1,5 +1,6 @@
 import type { RouteRecordRaw } from 'vue-router'
 import type { Action } from '@shared/session/schemas'
+import { newId } from '@/composables/newId'
 
 declare module 'vue-router' {
   interface RouteMeta {
@@ -97,6 +98,22 @@ const teamPages: RouteRecordRaw[] = [
     name: 'library',
     component: () => import('@/views/counters/LibraryView.vue'),
     meta: { title: 'Library', section: 'library', needs: 'counter:read' },
+  },
+  {
+    path: 'library/new',
+    name: 'new-counter',
+    redirect: ({ params, query }) => ({
+      name: 'board',
+      params: { ...params, counter: newId() },
+      query: { ...query, new: '1' },
+    }),
+  },
+  {
+    path: 'library/:counter/draw',
+    name: 'board',
+    component: () => import('@/views/board/BoardView.vue'),
+    props: true,
+    meta: { title: 'Drawing board', section: 'library', needs: 'counter:write' },
   },
   {
     path: 'library/:counter',

@@ -14,7 +14,7 @@ export function addStep(diagram: Diagram, after: number): Diagram {
 
 export function duplicateStep(diagram: Diagram, index: number): Diagram {
   const step = diagram.steps[index]
-  return step ? withSteps(diagram, diagram.steps.toSpliced(index + 1, 0, structuredClone(step))) : diagram
+  return step ? withSteps(diagram, diagram.steps.toSpliced(index + 1, 0, { ...step })) : diagram
 }
 
 /** The last step stays: a drawing has one at least. */
