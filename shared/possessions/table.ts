@@ -88,6 +88,8 @@ export const TableQuery = TableFilter.extend({
   direction: z.enum(['asc', 'desc']).default('asc'),
   offset: z.coerce.number().int().min(0).default(0),
   limit: z.coerce.number().int().min(1).max(LIMITS.pageRows).default(50),
+  /** The page on which this row stands, whatever `offset` says; a row that is not in the filter changes nothing. */
+  row: Id.optional(),
   /** `no`: without the row ruler, for a further page of the same filter. */
   bars: z.enum(['yes', 'no']).default('yes'),
 })
@@ -132,6 +134,8 @@ export type TableBars = z.infer<typeof TableBars>
 
 export const PossessionTable = z.object({
   rows: z.array(TableRow),
+  /** Rows before these in the filter. */
+  offset: z.number().int(),
   /** Rows in the filter. */
   total: z.number().int(),
   /** Rows of the opponent in all. */

@@ -118,6 +118,17 @@ describe('possessions as a table', () => {
 
   it('comes page by page, and a page past the end still says how many there are', async () => {
     expect(await numbers('limit=2&offset=2')).toEqual([3, 5])
+    // A row's own page, whatever the offset says, in the order and the filter that are asked for.
+    const onPageOf = async (query: string) => {
+      const answer = await table(`limit=2&${query}`)
+      return [answer.offset, ...answer.rows.map(({ possession }) => possession.number)]
+    }
+    expect(await onPageOf(`row=${ids[5]}`)).toEqual([2, 3, 5])
+    expect(await onPageOf(`row=${ids[1]}&direction=desc`)).toEqual([4, 2, 1])
+    expect(await onPageOf(`row=${ids[2]}&offset=2&pressed=yes`)).toEqual(
+      await onPageOf('offset=2&pressed=yes'),
+    )
+    expect(await onPageOf(`row=${opponent}&offset=2`)).toEqual([2, 3, 5])
     const past = await table('limit=2&offset=20&pressed=yes')
     expect([past.rows.length, past.total, past.of]).toEqual([0, 4, 6])
   })

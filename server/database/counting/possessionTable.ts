@@ -29,6 +29,24 @@ export async function tablePage(
   return onCalendarDays(manager, opponentId, rows)
 }
 
+/** How many rows of a filter stand before one of them, in order; null where it is not among them. */
+export async function placeInTable(
+  manager: EntityManager,
+  opponentId: string,
+  filter: TableFilter,
+  { sort, direction, row }: Pick<TableQuery, 'sort' | 'direction'> & { row: string },
+): Promise<number | null> {
+  const where = tableWhere(filter)
+  const [found]: { place: number }[] = await manager.query(
+    `WITH ${SOURCES}, placed AS (
+       SELECT p.id, row_number() OVER (ORDER BY ${tableOrder(sort, direction)}) - 1 AS place
+         FROM ${JOINED} WHERE ${where.sql})
+     SELECT place FROM placed WHERE id = ?`,
+    [opponentId, opponentId, ...where.parameters, row],
+  )
+  return found?.place ?? null
+}
+
 /** How many rows an opponent has, and how many of them are in a filter. */
 export async function countTable(
   manager: EntityManager,

@@ -2,7 +2,13 @@ import { In, type EntityManager } from 'typeorm'
 import { z } from 'zod'
 import { FieldChange } from '@shared/history/schemas'
 import type { Fix, PossessionTable, TableGame, TableQuery, TableRow } from '@shared/possessions/table'
-import { countTable, tableBars, tablePage, type RowGame } from '../../database/counting/possessionTable'
+import {
+  countTable,
+  placeInTable,
+  tableBars,
+  tablePage,
+  type RowGame,
+} from '../../database/counting/possessionTable'
 import { Change } from '../../database/entities/Change'
 import { Possession } from '../../database/entities/Possession'
 import { initialsOf } from '../session/session.presenter'
@@ -56,15 +62,19 @@ async function wholeRows(
 export async function readTable(
   manager: EntityManager,
   opponentId: string,
-  { sort, direction, offset, limit, bars: wanted, ...filter }: TableQuery,
+  { sort, direction, offset: asked, limit, bars: wanted, row, ...filter }: TableQuery,
 ): Promise<PossessionTable> {
+  const place =
+    row === undefined ? null : await placeInTable(manager, opponentId, filter, { sort, direction, row })
+  const offset = place === null ? asked : place - (place % limit)
   const page = await tablePage(manager, opponentId, filter, { sort, direction, offset, limit })
   const counted = await countTable(manager, opponentId, filter)
   const rows = await wholeRows(manager, page)
-  if (wanted === 'no') return { rows, ...counted, bars: null }
+  if (wanted === 'no') return { rows, offset, ...counted, bars: null }
   const { bars, games } = await tableBars(manager, opponentId, filter)
   return {
     rows,
+    offset,
     ...counted,
     bars: {
       games: games.map((game) => ({ ...presentGame(game), rows: game.rows })),

@@ -27,6 +27,8 @@ export function useTableAddress() {
     row,
     setFilter: (filter: TableFilter) => go({ filter, page: 1, row: null }),
     setSort: (sort: TableSort, direction: 'asc' | 'desc') => go({ sort, direction, page: 1 }),
+    /** Puts the page right on which the open row stands, without a step of its own for Back. */
+    correctPage: (page: number) => void router.replace({ query: queryOf({ ...viewOf(route.query), page }) }),
     setPage: (page: number, open: string | null = null) => go({ page, row: open }),
     setRow: (open: string | null) => go({ row: open }),
   }

@@ -33,7 +33,9 @@ const SAY: Record<WeekEvent['kind'], Say> = {
         : `${verb} the picks${about(event, ' for ')}`,
   practices: (event, verb) => `${verb} ${count(event.count, 'practice')}${about(event, ' for ')}`,
   read: (event) =>
-    `${event.action === 'signed' ? 'signed off the read' : 'opened the read again'}${about(event, ' of ')}`,
+    event.action === 'signed'
+      ? `signed off the read${about(event, ' of ')}`
+      : `opened the read${about(event, ' of ')} again`,
   sheets: () => '',
   ball: (event) =>
     `handed ${event.about ?? 'a game'} to ${event.to === null ? 'somebody' : firstName(event.to)}`,
@@ -43,7 +45,8 @@ const SAY: Record<WeekEvent['kind'], Say> = {
 export function sinceSentence(event: WeekEvent, me: string): string {
   if (event.kind === 'sheets') {
     const all = event.of === null ? '' : ` of ${event.of}`
-    return `${event.count}${all} players opened the sheet${about(event, ' for ')}.`
+    const players = (event.of ?? event.count) === 1 ? 'player' : 'players'
+    return `${event.count}${all} ${players} opened the sheet${about(event, ' for ')}.`
   }
   const who = event.who === null ? 'Somebody' : event.who.id === me ? 'You' : firstName(event.who.name)
   return `${who} ${SAY[event.kind](event, PAST[event.action] ?? 'changed')}.`
