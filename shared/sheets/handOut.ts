@@ -27,7 +27,11 @@ export const CopiesBody = z
   })
 export type CopiesBody = z.infer<typeof CopiesBody>
 
-export const CopyChange = z.object({ place: CopyPlace })
+export const CopyChange = z.object({
+  place: CopyPlace,
+  /** Who gets it; left out it stays whose it was. */
+  squadPlayerId: Id.nullable().optional(),
+})
 export type CopyChange = z.infer<typeof CopyChange>
 
 /** One paper or one letter of a sheet. */

@@ -4,7 +4,7 @@ import {
   LettersMade,
   OpeningList,
   Recalled,
-  type CopyPlace,
+  type CopyChange,
   type SheetChange,
 } from '@shared/sheets/handOut'
 import { SheetView, type Paper } from '@shared/sheets/schemas'
@@ -24,8 +24,9 @@ export function makeCopies(
   return request('POST', teamPath(team, 'sheets', sheet, 'copies'), CopyList, { body: { copies } })
 }
 
-export function moveCopy(team: string, copy: string, place: CopyPlace, version: number): Promise<CopyRow> {
-  return request('PATCH', teamPath(team, 'copies', copy), CopyRow, { body: { place }, version })
+/** Moves a paper; with a player it is hers from now on. */
+export function moveCopy(team: string, copy: string, change: CopyChange, version: number): Promise<CopyRow> {
+  return request('PATCH', teamPath(team, 'copies', copy), CopyRow, { body: change, version })
 }
 
 /** Address of the papers in one file, a page each; all of them without ids. */

@@ -27,6 +27,33 @@ const move = (copy: CopyRow, place: string, version = copy.version, agent = assi
     .set('If-Match', `"${version}"`)
     .send({ place })
 
+describe('to whom a paper goes', () => {
+  it('is said when it is given out and stays with it', async () => {
+    const sheet = await freshSheet(head, counters)
+    const [copy] = await papers(assistant, sheet, [{}])
+    const url = teamUrl(`/copies/${copy?.id}`)
+    const given = await assistant
+      .patch(url)
+      .set('If-Match', '"1"')
+      .send({ place: 'out', squadPlayerId: PLAYER })
+    expect(given.body).toMatchObject({ place: 'out', squadPlayerId: PLAYER, name: 'Nell', version: 2 })
+    const back = await assistant.patch(url).set('If-Match', '"2"').send({ place: 'back' })
+    expect(back.body).toMatchObject({ place: 'back', squadPlayerId: PLAYER, outAt: given.body.outAt })
+  })
+
+  it('cannot be a player of another team, and then nothing moved', async () => {
+    const sheet = await freshSheet(head, counters)
+    const [copy] = await papers(assistant, sheet, [{}])
+    const refused = await assistant
+      .patch(teamUrl(`/copies/${copy?.id}`))
+      .set('If-Match', '"1"')
+      .send({ place: 'out', squadPlayerId: OTHER_PLAYER })
+    expect(refused.status).toBe(404)
+    const { body } = await head.get(teamUrl(`/sheets/${sheet}/copies`))
+    expect(body.rows[0]).toMatchObject({ place: 'bag', version: 1 })
+  })
+})
+
 describe('numbers', () => {
   it('go up from 1 within a sheet and a repeat makes nothing new', async () => {
     const sheet = await freshSheet(head, counters)

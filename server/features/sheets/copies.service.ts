@@ -1,5 +1,5 @@
 import { In, type DataSource, type EntityManager } from 'typeorm'
-import { COPIES, type CopiesBody, type CopyPlace, type CopyRow } from '@shared/sheets/handOut'
+import { COPIES, type CopiesBody, type CopyChange, type CopyRow } from '@shared/sheets/handOut'
 import { Copy } from '../../database/entities/Copy'
 import { Mail } from '../../database/entities/Mail'
 import { Membership } from '../../database/entities/Membership'
@@ -142,10 +142,13 @@ function checkSame(copy: Copy, sheetId: string, body: CopiesBody): void {
     throw new Conflict('Another copy has this id already. Use a new one.')
 }
 
-/** Gives a paper out, takes it back, or puts it in the bag again. @throws NotFound, NeedsIfMatch, StaleVersion */
+/**
+ * Gives a paper out, says to whom, takes it back, or puts it in the bag again.
+ * @throws NotFound, NeedsIfMatch, StaleVersion, Conflict
+ */
 export function moveCopy(
   db: DataSource,
-  options: { teamId: string; id: string; place: CopyPlace; ifMatch: number | null; now: Date; by: string },
+  options: { teamId: string; id: string; ifMatch: number | null; now: Date; by: string } & CopyChange,
 ): Promise<CopyRow> {
   const { teamId, id, place, ifMatch, now, by } = options
   return db.transaction(async (manager) => {
@@ -156,16 +159,23 @@ export function moveCopy(
     if (ifMatch !== copy.version) throw new StaleVersion(await shown(), copy.version)
     const from = placeOf(copy)
     if (copy.way !== 'paper') throw new Conflict('A letter is not given out by hand.')
-    if (from === place) return shown()
+    const had = copy.squadPlayerId
+    const has = options.squadPlayerId === undefined ? had : options.squadPlayerId
+    if (has !== null && has !== had) await playersNamed(manager, teamId, [has])
+    if (from === place && has === had) return shown()
     if (place === 'out') await checkInForce(manager, copy)
     const stamp = now.toISOString()
+    copy.squadPlayerId = has
     copy.outAt = place === 'bag' ? null : place === 'out' ? stamp : copy.outAt
     copy.backAt = place === 'back' ? stamp : null
     copy.version += 1
     copy.updatedAt = stamp
-    const { outAt, backAt, version, updatedAt } = copy
-    await manager.getRepository(Copy).update({ id }, { outAt, backAt, version, updatedAt })
-    const fields = [{ field: 'place', from, to: place }]
+    const { squadPlayerId, outAt, backAt, version, updatedAt } = copy
+    await manager.getRepository(Copy).update({ id }, { squadPlayerId, outAt, backAt, version, updatedAt })
+    const fields = [
+      ...(from === place ? [] : [{ field: 'place', from, to: place }]),
+      ...(had === has ? [] : [{ field: 'squadPlayerId', from: had, to: has }]),
+    ]
     await recordChange(manager, Copy, { teamId, rowId: id, action: 'changed', by, now, fields })
     return shown()
   })

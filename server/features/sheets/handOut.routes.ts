@@ -75,7 +75,7 @@ export const handOutRoutes = (context: Context) => {
     endpoint({
       method: 'patch',
       path: '/teams/:team/copies/:id',
-      summary: 'Give a paper out, take it back, or put it in the bag again',
+      summary: 'Give a paper out and say to whom, take it back, or put it in the bag again',
       action: 'sheet:hand-out',
       params: OneRow,
       body: CopyChange,
@@ -83,7 +83,7 @@ export const handOutRoutes = (context: Context) => {
       problems: { 409: 'Its sheet was called back, or it is a letter' },
       handle: async ({ caller, params, body, ifMatch }) => {
         const { teamId, personId: by } = caller
-        const options = { teamId, id: params.id, place: body.place, ifMatch, now: clock(), by }
+        const options = { teamId, id: params.id, ...body, ifMatch, now: clock(), by }
         const row = await moveCopy(db, options)
         return ok(row, row.version)
       },
