@@ -3,6 +3,7 @@ import { randomUUID } from 'node:crypto'
 import { gameBody, makeFixture, opponentBody, teamUrl } from '../support/fixture'
 import { startTestApp } from '../support/testApp'
 import { benchCounts } from './counts'
+import { benchCourt } from './court'
 import { benchFirstLoad } from './firstLoad'
 import { benchPaper } from './paper'
 import { benchWrites } from './writes'
@@ -25,6 +26,7 @@ const parts: Record<string, () => Promise<string[]>> = {
   writes: () => benchWrites(test, fixture.scoutedGame, quick ? 50 : 400),
   counts: () => benchCounts(test, opponentOf),
   paper: () => benchPaper(test, fixture.sheet, quick ? 5 : 20),
+  court: () => benchCourt(quick ? 5 : 20),
   firstLoad: () => benchFirstLoad(),
 }
 /** `npm run bench -- counts` runs that part alone. */

@@ -10,8 +10,8 @@ import { changedIn, useWalkSettings } from '@/views/counters/walkSettings'
 
 describe('the courts of a counter', () => {
   it('are the books it names, the team’s own first, and our hall last', () => {
-    const courts = courtsOf(['nfhs-84', 'fiba'], 'fiba', { length: 26, backcourtSeconds: 10 })
-    expect(courts.map(({ value }) => value)).toEqual(['fiba', 'nfhs-84', 'own'])
+    const courts = courtsOf(['nfhs84', 'fiba'], 'fiba', { length: 26, backcourtSeconds: 10 })
+    expect(courts.map(({ value }) => value)).toEqual(['fiba', 'nfhs84', 'own'])
     expect(courts[2]?.label).toBe('Our court, 10 s')
     expect(courts[2]?.pack.court).toEqual({ length: 26, width: rulePack('fiba').court.width })
   })
