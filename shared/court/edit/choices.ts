@@ -74,7 +74,7 @@ export function choicesFor(diagram: Diagram, step: number, sentence: Sentence, s
     case 'how':
       return sentence.does === 'screens'
         ? [
-            { key: 'o', word: 'seen', value: 'open' },
+            { key: 'o', word: 'not blind', value: 'open' },
             { key: 'b', word: 'blind', value: 'blind' },
           ]
         : [

@@ -50,6 +50,12 @@ export function newBody(pack: RulePackKey): CounterDraft {
   }
 }
 
+/** A body as text that is the same whatever way it was put together: card, then drawing. */
+export function textOfBody({ diagram, ...card }: CounterDraft): string {
+  const fields = Object.entries(card).sort(([one], [other]) => one.localeCompare(other))
+  return JSON.stringify([fields, diagram])
+}
+
 /** The same play as a new counter: what was done with the old one stays with it. */
 export const copyOf = (row: CounterRow): CounterDraft => ({
   ...bodyOfRow(row),

@@ -18,7 +18,7 @@ export const TOKEN = 14
 const PAD = 26
 const OFF = 9
 /** Metres round the court: as far out as a player may be put. */
-const ROUND = { left: 2.3, right: 0.6, side: 0.7 }
+const ROUND = { left: 2.3, right: 0.6, side: 0.15 }
 /** Metres past half that a narrow board shows. */
 const PAST_HALF = 2.5
 

@@ -3,6 +3,7 @@ import { useEventListener } from '@vueuse/core'
 import { CounterDraft, CounterRow } from '@shared/counters/schemas'
 import { putCounter } from '@/api/counters'
 import { ApiProblem, OfflineError } from '@/api/problems'
+import { textOfBody } from './boardBody'
 import { forget, keep, keyOf, recall } from '@/composables/kept'
 
 /** What a device keeps of a drawing that is not sent: what it was drawn on, and how it is now. */
@@ -45,8 +46,8 @@ export function useKeeping(options: {
 }) {
   const version = ref(options.version)
   const draft = ref(options.row?.draft ?? true)
-  const stored = ref(options.stored ? JSON.stringify(options.stored) : '')
-  const text = computed(() => JSON.stringify(options.body()))
+  const stored = ref(options.stored ? textOfBody(options.stored) : '')
+  const text = computed(() => textOfBody(options.body()))
   const changed = computed(() => text.value !== stored.value)
   const sending = ref(false)
   const offline = ref(false)
@@ -92,7 +93,7 @@ export function useKeeping(options: {
       )
       version.value = row.version
       draft.value = row.draft
-      stored.value = JSON.stringify(sent)
+      stored.value = textOfBody(sent)
       offline.value = false
       error.value = null
       if (changed.value) {
@@ -138,7 +139,7 @@ export function useKeeping(options: {
     if (!row) return
     version.value = row.version
     draft.value = row.draft
-    stored.value = JSON.stringify(body)
+    stored.value = textOfBody(body)
     theirs.value = null
     forget(options.key)
   }
