@@ -6,7 +6,6 @@ export const FORCED_SIDES = terms([
   { value: 'right', label: 'to the right', definition: 'The dribbler is turned to the right sideline.' },
   { value: 'middle', label: 'to the middle', definition: 'The dribbler is turned inside.' },
 ])
-export type ForcedSide = (typeof FORCED_SIDES)[number]['value']
 
 /** What they play once the press is beaten or over. */
 export const FALLBACKS = terms([
@@ -17,7 +16,6 @@ export const FALLBACKS = terms([
   { value: 'match-up', label: 'match-up', definition: 'A zone that guards persons.' },
   { value: 'still-trapping', label: 'still trapping', definition: 'They go on trapping past half.' },
 ])
-export type Fallback = (typeof FALLBACKS)[number]['value']
 
 /** How the trip ended for the offence once it was over half, or where it never got there. */
 export const FINISHES = terms([
@@ -39,4 +37,3 @@ export const PRESS_JOBS = terms([
   { value: 'handler', label: 'handles', definition: 'Brings their own ball up.' },
   { value: 'foul-trouble', label: 'fouls', definition: 'Reaches; is often in trouble.' },
 ])
-export type PressJob = (typeof PRESS_JOBS)[number]['value']

@@ -250,7 +250,6 @@ export const GOALIES = terms([
   { value: 'home', label: 'stayed home', definition: 'The safety waited in front of the basket.' },
   { value: 'left-early', label: 'left early', definition: 'The safety came up before the long pass.' },
 ])
-export type Goalie = (typeof GOALIES)[number]['value']
 
 export const GRADES = terms([
   { value: 'none', label: 'nothing yet', definition: 'Nothing counted.' },

@@ -25,7 +25,7 @@ const USAGE =
  * @throws CommandError for an argument that is none of ours, and for a password: other users of the machine
  * and the shell's history would see it.
  */
-export function answersIn(args: readonly string[]): Answers {
+function answersIn(args: readonly string[]): Answers {
   if (args.some((arg) => /^--?pass/i.test(arg)))
     throw new CommandError(
       'The password is not taken as an argument, where others could read it. Leave it out: it is asked for, or read from standard input.',
@@ -48,7 +48,7 @@ interface Faults {
 }
 
 /** The answers as a first coach, or what is wrong with each. */
-export function checkAnswers(answers: Answers): { coach: FirstCoach } | { faults: Faults[] } {
+function checkAnswers(answers: Answers): { coach: FirstCoach } | { faults: Faults[] } {
   const parsed = FirstCoach.safeParse(answers, { reportInput: true })
   return parsed.success ? { coach: parsed.data } : { faults: faultsOf(parsed.error) }
 }

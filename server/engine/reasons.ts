@@ -15,7 +15,7 @@ const isTraitDemand = (demand: Demand): demand is TraitDemand =>
  * +1 for a wanted trait offered, -1 for one missing, -1 for an unwanted trait offered. Not having what is
  * unwanted says nothing for a counter (0): it spares a fault, it beats no press.
  */
-export function signOf(demand: TraitDemand, traits: readonly Trait[]): 1 | -1 | 0 {
+function signOf(demand: TraitDemand, traits: readonly Trait[]): 1 | -1 | 0 {
   const offered = traits.includes(demand.trait)
   if (demand.effect === 'want') return offered ? 1 : -1
   return offered ? -1 : 0

@@ -88,7 +88,7 @@ export class TooMany extends HttpError {
 }
 
 /** The RFC 9457 body of an error at an address. */
-export function problemOf(error: HttpError, instance: string): Problem {
+function problemOf(error: HttpError, instance: string): Problem {
   return {
     type: `/problems/${error.slug}`,
     title: error.title,

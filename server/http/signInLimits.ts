@@ -6,6 +6,8 @@ const WINDOW_MS = 15 * 60 * 1000
 /** Wrong passwords in a window; a right one does not count. */
 const PER_ACCOUNT = 10
 const PER_ADDRESS = 40
+/** Links that open nothing in a window. */
+const LINKS_PER_ADDRESS = 30
 
 /** Links asked for in a window, by one typed address: enough for a letter that is slow, too few to flood a mailbox. */
 const ASKED_PER_ACCOUNT = 5
@@ -48,8 +50,8 @@ export function askLimits(): RequestHandler[] {
   ]
 }
 
-/** Slows trying links that were not given. */
-export const linkLimits = (): RequestHandler[] => [limit(PER_ADDRESS, WRONG_LINK, address)]
+/** Slows trying links and tokens that were not given; one that works does not count. */
+export const linkLimits = (): RequestHandler[] => [limit(LINKS_PER_ADDRESS, WRONG_LINK, address)]
 
 /** Slows guessing the old password in a session that somebody left open. */
 export const passwordLimits = (): RequestHandler[] => [

@@ -25,9 +25,6 @@ export interface WalkedStep {
   moves: readonly WalkedMove[]
 }
 
-/** Who walks in a move, or null for a pass. */
-export const walkerOf = (move: Move): Role | DefenderId | null => (move.kind === 'pass' ? null : move.who)
-
 /** Where ten stand before the first step. Of two players with one number the last one stands. */
 export function startOfDiagram(diagram: Diagram): Standing {
   return {

@@ -2,7 +2,7 @@ import type { Role } from '../vocabulary'
 import type { FrozenCounter, FrozenPlan, SheetView } from './schemas'
 
 /** The role of a player in a frozen counter; null when she has none. */
-export const roleIn = (counter: FrozenCounter | null, squadPlayerId: string): Role | null =>
+const roleIn = (counter: FrozenCounter | null, squadPlayerId: string): Role | null =>
   counter?.roles.find((role) => role.squadPlayerId === squadPlayerId)?.role ?? null
 
 /** The same sheet as one player reads it, or as everybody does (null). */

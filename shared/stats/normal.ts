@@ -1,7 +1,7 @@
 const SQRT_TWO_PI = Math.sqrt(2 * Math.PI)
 
 /** Density of the standard normal at x. */
-export function normalDensity(x: number): number {
+function normalDensity(x: number): number {
   return Math.exp(-0.5 * x * x) / SQRT_TWO_PI
 }
 

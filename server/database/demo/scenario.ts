@@ -21,7 +21,7 @@ const SEED = 20_26
 const GAME = 2400
 const MINUTE = 60
 
-export const DEMO_OPPONENTS: DemoOpponent[] = [
+const DEMO_OPPONENTS: DemoOpponent[] = [
   {
     key: 'gulls',
     name: 'Port Selby Gulls',

@@ -30,7 +30,7 @@ async function dayOf(manager: EntityManager, teamId: string, tipOff: string): Pr
 }
 
 /** The squad as it will be on the day of a game. */
-export async function squadOn(manager: EntityManager, teamId: string, tipOff: string) {
+async function squadOn(manager: EntityManager, teamId: string, tipOff: string) {
   const day = await dayOf(manager, teamId, tipOff)
   const rows = await manager.getRepository(SquadPlayer).find({ where: { teamId }, order: { jersey: 'ASC' } })
   return rows.map((row) => presentSquadPlayer(row, day))
@@ -63,7 +63,7 @@ export function givenFacts(
 }
 
 /** Everything that the order for a game is worked out from. @throws NotFound */
-export async function chooseInput(
+async function chooseInput(
   manager: EntityManager,
   teamId: string,
   gameId: string,

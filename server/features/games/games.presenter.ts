@@ -33,7 +33,7 @@ const ENOUGH_TO_READ = 10
  * A later step that was taken moves the work on whether or not an earlier one was written down: a plan that is
  * signed off or begun is past the read, also where nobody signed the read off.
  */
-export function stationOf(
+function stationOf(
   game: Pick<Game, 'tipOff' | 'readAt'>,
   facts: Pick<GameFacts, 'possessions' | 'plan'>,
   now: Date,

@@ -1,7 +1,6 @@
 import { IsNull, LessThanOrEqual, type DataSource, type EntityManager } from 'typeorm'
 import type { GoesKey, StaysKey } from '@shared/people/erasureWords'
 import type { ErasureBody, ErasurePreview } from '@shared/people/schemas'
-import { localDay, localInstant } from '../../database/demo/days'
 import { Change } from '../../database/entities/Change'
 import { Copy } from '../../database/entities/Copy'
 import { Erasure } from '../../database/entities/Erasure'
@@ -15,6 +14,7 @@ import { eachAlone } from '../../database/eachAlone'
 import { findInTeam } from '../../database/findInTeam'
 import { putRow, type Put } from '../../database/putRow'
 import { Conflict, NotFound } from '../../http/problem'
+import { dayAfter, dayInZone, startOfDay } from '../../http/zone'
 import { countSessions, eraseSubject } from './eraseSubject'
 import { leaveNoByte } from './leaveNoByte'
 import { keepAHead } from './members.service'
@@ -25,7 +25,7 @@ import { tracesOf, type Traces } from './traces'
 /** The next midnight where the team is. */
 async function dueAfter(manager: EntityManager, teamId: string, now: Date): Promise<[Date, string]> {
   const { timeZone } = await manager.findOneByOrFail(Team, { id: teamId })
-  return [new Date(localInstant(now, timeZone, 1, '00:00')), timeZone]
+  return [startOfDay(dayAfter(dayInZone(now, timeZone), 1), timeZone), timeZone]
 }
 
 /** The two lists of an erasure as they stand now; nothing is changed. @throws NotFound */
@@ -41,7 +41,7 @@ export async function previewErasure(
     dueAt: due.toISOString(),
     goes: counted(await going(manager, traces)),
     stays: counted(await staying(manager, traces)),
-    backupsUntil: localDay(due, timeZone, backupDays),
+    backupsUntil: dayAfter(dayInZone(due, timeZone), backupDays),
   }
 }
 

@@ -5,10 +5,10 @@ import type { Context } from '../../context'
 import type { SignedIn } from '../../http/passport'
 import { NotSignedIn } from '../../http/problem'
 import { readBody } from '../../http/readBody'
+import { linkLimits } from '../../http/signInLimits'
 import { addFirstCoach, checkToken } from './firstCoach.service'
 import { joinAsMe, joinAsNew, lookAtInvitation } from './join.service'
 import { addTeam } from './teams.service'
-import { tryLimit } from './tryLimits'
 
 /** A new session id for somebody who has just proved who they are. */
 const signIn = (req: Request, person: SignedIn): Promise<void> =>
@@ -20,12 +20,12 @@ const signIn = (req: Request, person: SignedIn): Promise<void> =>
 
 /** Ways in that stand outside any team: an invitation's link, a head coach's next team, the very first one. */
 export function mountJoin(router: Router, { db, clock, firstRunToken = null }: Context): void {
-  const limit = tryLimit()
-  router.post('/invitations/look', limit, async (req, res) => {
+  const limits = linkLimits()
+  router.post('/invitations/look', ...limits, async (req, res) => {
     res.json(await lookAtInvitation(db, readBody(LookBody, req).secret, clock()))
   })
 
-  router.post('/invitations/accept', limit, async (req, res) => {
+  router.post('/invitations/accept', ...limits, async (req, res) => {
     const { person, teamId } = req.user
       ? await joinAsMe(db, readBody(LookBody, req).secret, req.user, clock())
       : await joinAsNew(db, readBody(NewAccount, req), clock())
@@ -38,7 +38,7 @@ export function mountJoin(router: Router, { db, clock, firstRunToken = null }: C
     res.status(201).json({ id: await addTeam(db, readBody(NewTeam, req), req.user.id, clock()) })
   })
 
-  router.post('/first-coach', limit, async (req, res) => {
+  router.post('/first-coach', ...limits, async (req, res) => {
     const { token, ...coach } = readBody(FirstCoachBySelf, req)
     checkToken(firstRunToken, token)
     await signIn(req, await addFirstCoach(db, coach, clock()))

@@ -8,7 +8,7 @@ import { Conflict, NeedsIfMatch, NotFound, StaleVersion } from '../../http/probl
 import { presentMember, type WithPerson } from './people.presenter'
 
 /** How many head coaches a team has. */
-export const headsOf = (manager: EntityManager, teamId: string): Promise<number> =>
+const headsOf = (manager: EntityManager, teamId: string): Promise<number> =>
   manager.countBy(Membership, { teamId, role: 'head-coach' })
 
 async function findMember(manager: EntityManager, teamId: string, id: string): Promise<WithPerson> {

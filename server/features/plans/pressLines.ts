@@ -80,7 +80,7 @@ function pickupLine(read: OpponentRead): Line | null {
 }
 
 /** The lane they leave open most often on the trap; null when none was counted. */
-export function roomOf(
+function roomOf(
   read: OpponentRead,
 ): { lane: NonNullable<Press['room']>; k: number; n: number } | null {
   const [best] = LANES.flatMap(({ value }) => {

@@ -14,7 +14,7 @@ export const bodyOfSquadPlayer = (row: SquadPlayer): SquadPlayerBody => ({
 })
 
 /** `day` is the calendar day asked about, in the team's zone: out through `outUntil`, back the day after. */
-export const isAvailable = (row: Pick<SquadPlayer, 'outUntil'>, day: string): boolean =>
+const isAvailable = (row: Pick<SquadPlayer, 'outUntil'>, day: string): boolean =>
   row.outUntil === null || row.outUntil < day
 
 export const presentSquadPlayer = (row: SquadPlayer, day: string): SquadPlayerRow => ({
