@@ -20,6 +20,10 @@ export type StripList = z.infer<typeof StripList>
 /** More zones than this and the counts of a row stand on one another. */
 const ZONES = 4
 
+/** Whether a strip looks at a habit. */
+export const onStrip = (key: string): boolean =>
+  key === 'trap' || key === 'trap-again' || key.startsWith('leave-open:')
+
 /** What of a read stands on the strip. A spot that was seen once stands there only where none was seen more often. */
 export function stripOf(
   read: Pick<TendencyRead, 'spots' | 'pickup'> & {

@@ -1,6 +1,7 @@
 import type { EntityManager } from 'typeorm'
 import { thin } from '@shared/stats/evidence'
 import type { TendencyFilter, TendencyRead } from '@shared/tendencies/schemas'
+import { HABITS, type Habit } from '@shared/tendencies/habits'
 import { PICKUPS, TRIGGERS } from '@shared/vocabulary'
 import { narrows } from '../../database/counting/filters'
 import {
@@ -44,12 +45,16 @@ function medianPickup(rows: Awaited<ReturnType<typeof countPickups>>): TendencyR
 const countOf = (list: readonly EngineTendency[], key: string) =>
   list.find((tendency) => tendency.key === key)
 
-/** Counts, tendencies, spots and luck of an opponent. An empty filter is the whole read; figures default to RECORD.md's. */
+/**
+ * Counts, tendencies, spots and luck of an opponent. An empty filter is the whole read; figures default to RECORD.md's.
+ * @param habits only these are worked out, where a list of many opponents needs no more
+ */
 export async function readOpponent(
   manager: EntityManager,
   opponentId: string,
   filter: TendencyFilter,
   settings?: EngineSettings,
+  habits: readonly Habit[] = HABITS,
 ): Promise<OpponentRead> {
   const { games, notCovered } = await countGames(manager, opponentId, filter)
   const ages = new Map(games.map((game) => [game.id, game.age]))
@@ -59,6 +64,7 @@ export async function readOpponent(
     situation: narrows(filter),
     triggers: filter.trigger ?? null,
     settings,
+    habits,
   })
   const counted = await countSituations(manager, opponentId, filter)
   const all = counted.reduce((sum, row) => ({ n: sum.n + row.n, pressed: sum.pressed + row.pressed }), {
