@@ -31,7 +31,7 @@ export function orderStep(diagram: Diagram, index: number, by: -1 | 1): Diagram 
 
 /** An empty title is not taken. */
 export function titleStep(diagram: Diagram, index: number, title: string): Diagram {
-  const words = title.trim().slice(0, TITLE).trim()
+  const words = title.replace(/\s+/g, ' ').trim().slice(0, TITLE).trim()
   return withStep(diagram, index, (step) =>
     words === '' || words === step.title ? null : { ...step, title: words },
   )
