@@ -9,6 +9,7 @@ import { Team } from '../../database/entities/Team'
 import { recordChange } from '../../database/history'
 import { Conflict, HttpError } from '../../http/problem'
 import { digestOf } from '../mail/secretLink'
+import { endLinks } from '../session/passwordReset.service'
 import { checkPlace } from './members.service'
 import { stateOf } from './people.presenter'
 
@@ -76,6 +77,8 @@ async function join(
   if (await manager.existsBy(Membership, { teamId, personId: person.id }))
     throw new Conflict('You are in this team already, so the invitation was left as it is.')
   if (squadPlayerId !== null) await checkPlace(manager, teamId, squadPlayerId, null)
+  // A link that a head coach holds was made for an account of her teams only; it must not open this one.
+  await endLinks(manager, person.id, now)
   const stamp = now.toISOString()
   await manager.update(
     Invitation,

@@ -19,7 +19,7 @@ const linkIsOver = () =>
   new HttpError(410, 'link-over', 'Link is over', 'This link no longer works. Ask for a new one.')
 
 /** Ends every link that a person has, with the letters that would still bring one. */
-async function endLinks(manager: EntityManager, personId: string, now: Date): Promise<void> {
+export async function endLinks(manager: EntityManager, personId: string, now: Date): Promise<void> {
   const resets = manager.getRepository(PasswordReset)
   const open = await resets.findBy({ personId, usedAt: IsNull() })
   for (const { id } of open) {
