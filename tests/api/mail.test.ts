@@ -424,4 +424,18 @@ describe('without a mail server', () => {
     await soon(() => server.arrived.length).toBe(1)
     expect(await list()).toMatchObject([{ state: 'sent', text: null }])
   })
+
+  it('a letter that failed while there was one is kept too, with its words to copy', async () => {
+    server.refuse.push(550)
+    const { id } = await queue()
+    await carry()
+    expect(await list()).toMatchObject([{ id, state: 'failed', text: null }])
+    const transport = test.context.mail
+    test.context.mail = null
+    await carry()
+    const [kept] = await list()
+    expect(kept?.state).toBe('kept')
+    expect(kept?.text).not.toBe(null)
+    test.context.mail = transport
+  })
 })

@@ -18,8 +18,8 @@ const inMinutes = (now: Date, minutes: number): string =>
 
 /**
  * Takes every letter whose time has come to the mail server, one after another. Several at once are fine: a
- * letter is claimed by one UPDATE that only one of them can win. Without a mail server what waits is kept for
- * the staff instead.
+ * letter is claimed by one UPDATE that only one of them can win. Without a mail server what waits, and what
+ * did not arrive while there was one, is kept for the staff, who can send its words themselves.
  */
 export async function carryMail(context: Context): Promise<void> {
   await endOldPasswordLetters(context)
@@ -154,5 +154,5 @@ async function endOldPasswordLetters({ db, clock, mail }: Context): Promise<void
 async function keepAll({ db }: Context): Promise<void> {
   await db
     .getRepository(Mail)
-    .update({ state: In(['waiting', 'sending']) }, { state: 'kept', nextTryAt: null })
+    .update({ state: In(['waiting', 'sending', 'failed']) }, { state: 'kept', nextTryAt: null })
 }

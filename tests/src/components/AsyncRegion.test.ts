@@ -71,7 +71,13 @@ describe('AsyncRegion', () => {
     const loadedAt = new Date(2026, 2, 16, 21, 14).getTime()
     const { wrapper } = region({ data: '58', error: new OfflineError(), offline: true, loadedAt })
     expect(wrapper.text()).toContain('counted: 58')
-    expect(wrapper.text()).toContain('This is the copy from 21:14.')
+    expect(wrapper.text()).toContain('This is the copy from Mon 16 Mar, 21:14.')
+  })
+
+  it('leaves the day out of a copy of today', () => {
+    const loadedAt = new Date().setHours(0, 5, 0, 0)
+    const { wrapper } = region({ data: '58', error: new OfflineError(), offline: true, loadedAt })
+    expect(wrapper.text()).toContain('This is the copy from 00:05.')
   })
 })
 
