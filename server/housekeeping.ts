@@ -4,6 +4,7 @@ import { purgeDeleted } from './features/deletion/purge.service'
 import { carryMail } from './features/mail/carrier'
 import { forgetOldMail } from './features/mail/oldMail'
 import { eraseDue } from './features/people/erasures.service'
+import { forgetOldInvitations } from './features/people/oldInvitations'
 import { forgetOldLinks } from './features/session/passwordReset.service'
 import { expireStills } from './features/stills/expiry.service'
 import { SESSION_MS } from './http/passport'
@@ -22,6 +23,7 @@ const PARTS: readonly Part[] = [
   ['sessions', ({ db, clock }) => new SessionStore(db, clock, SESSION_MS).sweep()],
   ['backups', ({ config, clock }) => pruneBackups(config, clock())],
   ['password links', (context) => forgetOldLinks(context)],
+  ['old invitations', ({ db, clock }) => forgetOldInvitations(db, clock())],
   ['old letters', ({ db, clock }) => forgetOldMail(db, clock())],
   ['letters', (context) => carryMail(context)],
 ]

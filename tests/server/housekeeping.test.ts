@@ -3,7 +3,9 @@ import { mkdir } from 'node:fs/promises'
 import { join } from 'node:path'
 import { pino } from 'pino'
 import { afterEach, beforeEach, describe, expect, it } from 'vitest'
+import { Change } from '@server/database/entities/Change'
 import { Erasure } from '@server/database/entities/Erasure'
+import { Invitation } from '@server/database/entities/Invitation'
 import { Mail } from '@server/database/entities/Mail'
 import { SquadPlayer } from '@server/database/entities/SquadPlayer'
 import { Still } from '@server/database/entities/Still'
@@ -63,13 +65,41 @@ describe('housekeeping', () => {
     expect((await manager.findOneByOrFail(Erasure, { subjectId: one?.id ?? '' })).doneAt).toBeNull()
   })
 
+  it('forgets whom an invitation went to once it has opened nothing for ninety days', async () => {
+    const [old, open] = [randomUUID(), randomUUID()]
+    const body = { role: 'assistant-coach', way: 'mail', email: 'new@club.example', days: 7 }
+    await head
+      .put(teamUrl(`/invitations/${old}`))
+      .send(body)
+      .expect(201)
+    await head.delete(teamUrl(`/invitations/${old}`)).expect(204)
+    test.setNow(new Date('2026-06-16T09:00:00Z'))
+    await sweepOnce(test.context)
+    const { manager } = test.context.db
+    expect(await manager.existsBy(Invitation, { id: old })).toBe(false)
+    expect(await manager.existsBy(Change, { rowId: old })).toBe(false)
+    await manager.insert(Invitation, {
+      id: open,
+      teamId: TEAM,
+      role: 'assistant-coach',
+      email: 'new@club.example',
+      tokenHash: 'digest',
+      expiresAt: '2026-06-20T09:00:00.000Z',
+      version: 1,
+      createdAt: '2026-06-13T09:00:00.000Z',
+      updatedAt: '2026-06-13T09:00:00.000Z',
+    } as never)
+    await sweepOnce(test.context)
+    expect(await manager.existsBy(Invitation, { id: open })).toBe(true)
+  })
+
   it('lets every other still go where the files of one cannot be removed', async () => {
     const own = await makeFixture(test)
     const { manager } = test.context.db
     const [first] = await manager.findBy(Still, { id: own.still })
     // Before and after it, whatever order they come in.
     const others = ['00000000-0000-4000-8000-000000000001', 'ffffffff-ffff-4fff-8fff-ffffffffffff']
-    for (const id of others) await manager.insert(Still, { ...first, id, position: 2 } as Still)
+    for (const id of others) await manager.insert(Still, { ...first, id, position: 2 } as never)
     await manager.update(Still, { teamId: TEAM }, { expiresOn: '2026-03-16' })
     const stuck = test.context.stillFiles.pathOf(TEAM, own.still, 'full')
     await mkdir(join(`${stuck}.part`, 'in-the-way'), { recursive: true })
