@@ -58,7 +58,7 @@ describe('whoever has the ball', () => {
     })
     await test.context.db.manager.delete(Membership, { id: membership.id })
     expect((await row()).holder).toBeNull()
-    await test.context.db.manager.insert(Membership, membership)
+    await test.context.db.manager.insert(Membership, membership as never)
   })
 })
 

@@ -92,7 +92,7 @@ describe('letters of a sheet', () => {
     await manager.update(Team, { id: TEAM }, { settings: { attachSheet: true } })
     await write(sheet, { players: [young.id, PLAYER] })
     await to('guardian@home.example', sheet)
-    await manager.update(Team, { id: TEAM }, { settings: null })
+    await manager.update(Team, { id: TEAM }, { settings: null as never })
     const letter = letterTo('guardian@home.example')
     const file = letter?.files[0]?.content
     expect(file).toBeInstanceOf(Buffer)

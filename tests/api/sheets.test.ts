@@ -213,7 +213,7 @@ describe('the file', () => {
     for (const role of body.roles) role.jobs = Array(4).fill('wordswords '.repeat(7).trim()) as string[]
     const id = randomUUID()
     const longest = { ...body, name: 'W'.repeat(40), call: 'W'.repeat(20) }
-    await manager.insert(Counter, { ...counter, id, body: longest })
+    await manager.insert(Counter, { ...counter, id, body: longest } as never)
     const opponentId = await newOpponent(head, 'W '.repeat(LIMITS.name / 2).trim())
     const keys = Array(LIMITS.keys).fill('W'.repeat(LIMITS.key)) as string[]
     const full = await signed(await newGame(head, opponentId), { firstCallId: id, keys })

@@ -29,6 +29,7 @@ export function frozenCounter(key: string, players: readonly (string | null)[]):
     name: counter.name,
     call: counter.call,
     diagram: counter.diagram,
+    looks: counter.looks ?? [],
     roles: counter.roles.map(({ role, title, jobs, changeUpLine, keyStep }, index) => ({
       role,
       title,
@@ -110,6 +111,9 @@ export function sheetView(content: FrozenPlan = frozenPlan(), change: Partial<Sh
     players: FIVE.map(({ squadPlayerId, firstName, jersey }) => ({ squadPlayerId, firstName, jersey })),
     mine: null,
     budget: { words: 0, limit: 120, over: false },
+    fuller: false,
+    recalledAt: null,
+    newest: null,
     ...change,
   }
 }

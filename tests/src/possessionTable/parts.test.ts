@@ -48,7 +48,7 @@ describe('the batch sentence', () => {
     expect(wrapper.text()).toContain('1 row does not hold it and stays as it is.')
     expect(wrapper.text()).toContain('3 are on the screen, no. 21 is elsewhere.')
     await change().trigger('click')
-    const [sent] = wrapper.emitted('change')![0] as [{ number: number }[]]
+    const [sent] = wrapper.emitted('change')![0] as unknown as [{ number: number }[]]
     expect(sent.map(({ number }) => number)).toEqual([4, 8, 21])
     wrapper.unmount()
   })

@@ -200,7 +200,9 @@ describe('a row and its draft', () => {
       updatedAt: '2026-03-14T14:41:00.000Z',
       pressed: true,
       stills: [],
-      traps: [{ ...body.traps![0]!, spot: 'coffin-corner' as const, side: 'left' as const }] as never,
+      traps: [
+        { ...(body.traps as object[])[0], spot: 'coffin-corner' as const, side: 'left' as const },
+      ] as never,
     }
     expect(draftOfRow(row)).toEqual(body)
   })

@@ -14,6 +14,7 @@ import { pictureFault, roomFor } from '@/views/possessions/pictureFaults'
 import { stillThere, undoUntil } from '@/views/possessions/thrownAway'
 import { fresh, GAME, press, ROW, said } from './walk'
 
+const OF_GAME = { id: GAME, ours: false }
 const text = (value: unknown) => (typeof value === 'string' ? value : null)
 
 describe('what the device keeps', () => {
@@ -49,7 +50,7 @@ describe('half a row', () => {
     const line = press(fresh(), '1 2 0')
     const kept = readHalfRows(JSON.parse(JSON.stringify(halfRowsOf(line, null))))
     if (kept?.fresh == null) throw new Error('not kept')
-    const back = lineOfHalf(kept.fresh, GAME, null)
+    const back = lineOfHalf(kept.fresh, OF_GAME, null)
     expect(said(back)).toBe(said(line))
     expect(back.open).toEqual({ field: 'trap', trap: 0 })
     expect(back.id).toBe(ROW)
@@ -63,7 +64,7 @@ describe('half a row', () => {
   it('does not ask again for what was unseen', () => {
     const line = press(fresh(), '1 2 1 8 0')
     const kept = readHalfRows(JSON.parse(JSON.stringify(halfRowsOf(line, null))))
-    expect(kept?.fresh == null ? undefined : lineOfHalf(kept.fresh, GAME, null).open).toBeNull()
+    expect(kept?.fresh == null ? undefined : lineOfHalf(kept.fresh, OF_GAME, null).open).toBeNull()
   })
 })
 
@@ -78,7 +79,7 @@ describe('the rows of a game', () => {
   })
 
   it('give the next number, also when a half-said row had it', () => {
-    expect(nextLine('x', GAME, [row(13), row(12)]).draft.number).toBe(14)
+    expect(nextLine('x', OF_GAME, [row(13), row(12)]).draft.number).toBe(14)
     expect(renumbered({ ...press(fresh(), '1'), id: 'y' }, [row(1), row(2)]).draft.number).toBe(3)
     expect(renumbered({ ...press(fresh(), '1'), id: 'y' }, [row(4)]).draft.number).toBe(1)
   })

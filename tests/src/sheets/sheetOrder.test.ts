@@ -16,6 +16,9 @@ const sheet = (
   opponentName: 'Gulls',
   tipOff,
   createdAt,
+  signedBy: null,
+  fuller: false,
+  recalledAt: null,
 })
 
 const rows = [

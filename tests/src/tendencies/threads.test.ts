@@ -4,7 +4,16 @@ import { lastSecond, stretchOf, threadOf, threadsOf } from '@/views/tendencies/t
 import { possession } from './tally'
 
 const fiba = rulePack('fiba')
-const trap = { x: 0.1, y: 0.9, t: 2, cue: null, result: null, spot: 'coffin-corner', side: 'right' } as const
+const trap = {
+  x: 0.1,
+  y: 0.9,
+  t: 2,
+  cue: null,
+  trappers: null,
+  result: null,
+  spot: 'coffin-corner',
+  side: 'right',
+} as const
 
 describe('threads', () => {
   it('follow the track from the first touch on, with traps and the crossing put in by time', () => {

@@ -14,8 +14,26 @@ describe('a possession as a sentence', () => {
     const row = possession({
       denied: ['pass-back'],
       traps: [
-        { x: 0.1, y: 0.9, t: 2, cue: 'on-catch', result: 'passed-out', spot: 'coffin-corner', side: 'right' },
-        { x: 0.55, y: 0.9, t: 6.6, cue: null, result: 'lost', spot: 'just-over-half', side: 'right' },
+        {
+          x: 0.1,
+          y: 0.9,
+          t: 2,
+          cue: 'on-catch',
+          trappers: null,
+          result: 'passed-out',
+          spot: 'coffin-corner',
+          side: 'right',
+        },
+        {
+          x: 0.55,
+          y: 0.9,
+          t: 6.6,
+          cue: null,
+          trappers: null,
+          result: 'lost',
+          spot: 'just-over-half',
+          side: 'right',
+        },
       ],
       leftOpen: ['middle'],
       outcome: 'lost-live',

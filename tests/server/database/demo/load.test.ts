@@ -213,7 +213,7 @@ describe('the game at Choose', () => {
         const { info, text } = readPdf(answer.body as Buffer)
         expect(info.get('Pages')).toBe('1')
         expect(text).toContain('Don’t catch in the corner.')
-        const told = DEMO_SQUAD.filter(({ lastName }) => text.includes(lastName))
+        const told = DEMO_SQUAD.filter(({ lastName }) => text.includes(lastName ?? ''))
         expect(told).toEqual([])
       }
     expect((await maren.get(url(`/games/${gulls.id}`))).body.station).toBe('teach')
