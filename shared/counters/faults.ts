@@ -72,5 +72,8 @@ const saysWhatToDo = ({ message }: DiagramFault): boolean => /\. \S/.test(messag
 
 function remedyOf(fault: DiagramFault, diagram: Diagram): string {
   const move = moveAt(diagram, fault)
-  return move ? REMEDIES[move.kind] : 'Move or change who stands there.'
+  if (move) return REMEDIES[move.kind]
+  if (fault.place) return 'Move one of them.'
+  const { ours, ball } = diagram.start
+  return ours.some(({ role }) => role === ball) ? 'Draw the pass that throws it in.' : 'Choose who throws in.'
 }
