@@ -72,7 +72,9 @@ function leftOutOf(counter: EngineCounter, unfillable: string | null, scene: Sce
 
 function contend(counter: EngineCounter, scene: Scene): Contender | LeftOut {
   const { settings, fired, mostly } = scene
-  const assignment = assignRoles(counter.roles, scene.squad, settings.leastFit)
+  const given = assignRoles(counter.roles, scene.squad, settings.leastFit)
+  // A club that has not written its squad down yet is not one that nobody plays for: its places stay empty.
+  const assignment = scene.squad.length === 0 ? { ...given, squadTerm: 0, unfillable: null } : given
   const left = leftOutOf(counter, assignment.unfillable, scene)
   if (left) return left
   const reasons = reasonsFor(counter.traits, fired, settings.strengths)

@@ -146,6 +146,28 @@ describe('left out', () => {
     expect(choices.map((choice) => choice.counterId)).toEqual(['b'])
   })
 
+  it('is none for want of players while no squad is written down: its places stay empty', async () => {
+    const needs = [{ skill: 'handle' as const, level: 3 }]
+    const { leftOut, choices } = await choose({
+      counters: [counter('a', { roles: roles({ '1': needs }) })],
+      squad: [],
+    })
+    expect(leftOut).toEqual([])
+    expect(choices[0]?.squadTerm).toBe(0)
+    expect(choices[0]?.roles.map(({ squadPlayerId }) => squadPlayerId)).toEqual([
+      null,
+      null,
+      null,
+      null,
+      null,
+    ])
+    const out = await choose({
+      counters: [counter('a', { roles: roles({ '1': needs }) })],
+      squad: [player('p', {}, false)],
+    })
+    expect(out.leftOut).toHaveLength(1)
+  })
+
   it('is a counter that is not for the game’s rule set', async () => {
     const { leftOut } = await choose({ counters: [counter('a', { rulePacks: ['nba', 'ncaa'] })] })
     expect(leftOut).toMatchObject([{ counterId: 'a', ruleId: null }])
