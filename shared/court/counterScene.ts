@@ -4,7 +4,7 @@ import { counterOverview } from './counterOverview'
 import { counterStep } from './counterStep'
 import type { Diagram } from './diagram'
 import { walkDiagram } from './diagramWalk'
-import { ballWaySentence, stepSentence } from './diagramWords'
+import { ballWaySentence, stepInWords } from './diagramWords'
 import { toMetres } from './frame'
 import type { HatchMedium } from './hatch'
 import { verdictWords } from './passMark'
@@ -148,7 +148,7 @@ export function counterSentence(diagram: Diagram, step: number | 'all'): string 
   if (step === 'all') return ballWaySentence(diagram)
   const title = diagram.steps[step]?.title
   if (title === undefined) return ballWaySentence(diagram)
-  return `Step ${step + 1} of ${diagram.steps.length}, ${title}: ${stepSentence(diagram, step)}`
+  return `Step ${step + 1} of ${diagram.steps.length}, ${title}: ${stepInWords(diagram, step)}`
 }
 
 /** px per metre at which the counter drawing of these options is `widthPx` wide. */

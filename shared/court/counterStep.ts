@@ -10,6 +10,7 @@ import type { Pen } from './pen'
 import type { RulePack } from './rulePacks'
 import type { GroupNode, SceneNode } from './scene'
 import { ballAt, ghost, ourToken, theirToken, type TokenSize } from './tokens'
+import { written } from './written'
 import type { Verdict } from './walk/laneWindow'
 
 export interface Drawing {
@@ -53,6 +54,7 @@ export function counterStep(diagram: Diagram, index: number, drawing: Drawing & 
       { kind: 'group', id: 'theirs', nodes: theirs },
       { kind: 'group', id: 'tokens', nodes: tokens },
       ...(holder ? [ballAt(metres(holder), size, pen)] : []),
+      ...written(diagram.steps[index]?.words, drawing),
     ],
     passes: moves.passes,
     tokens: standing.map(metres),

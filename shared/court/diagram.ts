@@ -41,10 +41,16 @@ export const Move = z.discriminatedUnion('kind', [
 ])
 export type Move = z.infer<typeof Move>
 
+/** A word or two written on the court; the place is the text's middle. */
+export const Word = z.object({ text: z.string().trim().min(1).max(24), at: Place })
+export type Word = z.infer<typeof Word>
+
 export const Step = z.object({
   /** What happens, in a few words, sentence case. */
   title: z.string().trim().min(1).max(60),
   moves: z.array(Move).max(12),
+  /** Written on the court while the step is on; absent in drawings without. */
+  words: z.array(Word).max(3).optional(),
 })
 export type Step = z.infer<typeof Step>
 

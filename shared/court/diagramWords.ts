@@ -35,6 +35,17 @@ export function stepSentence(diagram: Diagram, step: number): string {
   return `${beats.join(', then ')}.`
 }
 
+/** What is written on the court in a step, one sentence; empty where nothing is. */
+export function writtenSentence(diagram: Diagram, step: number): string {
+  const words = diagram.steps[step]?.words ?? []
+  if (words.length === 0) return ''
+  return `Written on the court: ${listed(words.map(({ text, at }) => `‘${text}’ at ${placeWords(at)}`))}.`
+}
+
+/** A step in full: what happens in it, and what is written on the court. */
+export const stepInWords = (diagram: Diagram, step: number): string =>
+  [stepSentence(diagram, step), writtenSentence(diagram, step)].filter((part) => part !== '').join(' ')
+
 /** The ball's whole way in one sentence: "5 throws in to 1, 1 passes to 2, 2 dribbles to …". */
 export function ballWaySentence(diagram: Diagram): string {
   const ball = walkDiagram(diagram)

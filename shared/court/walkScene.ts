@@ -6,6 +6,7 @@ import { penOf, type Pen } from './pen'
 import type { GroupNode, Scene } from './scene'
 import { ballAt, ourToken, theirToken, tokenSize, type TokenSize } from './tokens'
 import { viewOf } from './view'
+import { written } from './written'
 import type { Verdict } from './walk/laneWindow'
 import type { WalkStanding } from './walk/standing'
 
@@ -63,7 +64,7 @@ function moves(options: WalkSceneOptions, pen: Pen, size: TokenSize): GroupNode[
     defenders: options.defenders ?? true,
     windows: options.windows ?? null,
   })
-  return [{ kind: 'group', id: 'moves', nodes }]
+  return [{ kind: 'group', id: 'moves', nodes }, ...written(diagram.steps[step]?.words, { pack, pen, size })]
 }
 
 /** Solid is the reader alone, or who has the ball and who is about to. */

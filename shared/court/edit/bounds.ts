@@ -9,6 +9,8 @@ export const STEPS = 12
 export const MOVES = 12
 export const LAST_BEAT = 5
 export const TITLE = 60
+export const WORDS = 3
+export const WORD = 24
 
 /** Fractions are kept to 3 mm on the longest court, so that a mirrored place comes back to itself. */
 const FINE = 10_000

@@ -3,6 +3,7 @@ import type { Role } from '../../vocabulary'
 import { addMove, aimMove, bendMove, changeMove, joinMove, orderMove, removeMove } from './moves'
 import { addDefender, changeThrower, mirrorDiagram, placePlayer, removeDefender } from './players'
 import { addStep, duplicateStep, orderStep, removeStep, titleStep } from './steps'
+import { addWord, changeWord, moveWord, removeWord } from './words'
 
 /** One thing done to a drawing. Steps and moves are named by their stored index. */
 export type Edit =
@@ -22,6 +23,10 @@ export type Edit =
   | { do: 'remove-step'; step: number }
   | { do: 'order-step'; step: number; by: -1 | 1 }
   | { do: 'title'; step: number; title: string }
+  | { do: 'add-word'; step: number; text: string; at: Place }
+  | { do: 'change-word'; step: number; index: number; text: string }
+  | { do: 'move-word'; step: number; index: number; at: Place }
+  | { do: 'remove-word'; step: number; index: number }
   | { do: 'mirror' }
 
 /**
@@ -62,6 +67,14 @@ export function applyEdit(diagram: Diagram, edit: Edit): Diagram {
       return orderStep(diagram, edit.step, edit.by)
     case 'title':
       return titleStep(diagram, edit.step, edit.title)
+    case 'add-word':
+      return addWord(diagram, edit.step, edit.text, edit.at)
+    case 'change-word':
+      return changeWord(diagram, edit.step, edit.index, edit.text)
+    case 'move-word':
+      return moveWord(diagram, edit.step, edit.index, edit.at)
+    case 'remove-word':
+      return removeWord(diagram, edit.step, edit.index)
     case 'mirror':
       return mirrorDiagram(diagram)
   }

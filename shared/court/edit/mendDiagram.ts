@@ -1,6 +1,6 @@
-import { Diagram, DefenderId, Role, type Move, type Place, type Step } from '../diagram'
-import { clamped, fieldsOf, listOf, numberOf, oneOf, type Fields, type Reading } from './reading'
-import { BEND, LEAST_PLACE, MOST_PLACE, STEPS, MOVES, LAST_BEAT, TITLE } from './bounds'
+import { Diagram, DefenderId, Role, type Move, type Place, type Step, type Word } from '../diagram'
+import { clamped, fieldsOf, listOf, numberOf, oneOf, Reading, type Fields } from './reading'
+import { BEND, LEAST_PLACE, MOST_PLACE, STEPS, MOVES, LAST_BEAT, TITLE, WORD, WORDS } from './bounds'
 
 /** Further off the court than this a place is a mistake and not a slip of the hand; fractions. */
 const NEAR = 0.5
@@ -121,7 +121,29 @@ function mendStep(raw: unknown, index: number, reading: Reading, at: string): St
     const move = mendMove(one, reading, `${at}.moves.${i}`, `Step ${index + 1}, move ${i + 1}`)
     return move ? [move] : []
   })
-  return { title, moves }
+  const words = mendWords(fields['words'], `Step ${index + 1}`, reading)
+  return words.length > 0 ? { title, moves, words } : { title, moves }
+}
+
+/** What is written on the court changes nothing of the play: what is no word is left out, and said. */
+function mendWords(raw: unknown, name: string, reading: Reading): Word[] {
+  if (raw === undefined) return []
+  const words = (listOf(raw) ?? [raw]).flatMap((one): Word[] => {
+    const fields = fieldsOf(one)
+    const text = typeof fields?.['text'] === 'string' ? fields['text'].replace(/\s+/g, ' ').trim() : ''
+    const placed = new Reading()
+    const at = mendPlace(fields?.['at'], placed, '', name)
+    if (text === '' || !at) {
+      reading.mend(`${name}: something written on the court could not be read and was left out.`)
+      return []
+    }
+    if (text.length > WORD) reading.mend(`${name}: a word on the court was cut to ${WORD} characters.`)
+    if (placed.mended.length > 0)
+      reading.mend(`${name}: a word was written too far off the court and was moved in.`)
+    return [{ text: text.slice(0, WORD).trim(), at }]
+  })
+  if (words.length > WORDS) reading.mend(`${name}: of the words on the court the first ${WORDS} are kept.`)
+  return words.slice(0, WORDS)
 }
 
 function mendMove(raw: unknown, reading: Reading, at: string, name: string): Move | null {

@@ -90,7 +90,7 @@ export function changeMove(diagram: Diagram, step: number, index: number, move: 
     const next = { ...heldMove(move), beat: before.beat }
     // A title that only repeats the sentence goes with it.
     const title = one.title === moveWords(before) ? moveWords(next).slice(0, TITLE).trim() : one.title
-    return { title, moves: one.moves.map((old, i) => (i === index ? next : old)) }
+    return { ...one, title, moves: one.moves.map((old, i) => (i === index ? next : old)) }
   })
 }
 

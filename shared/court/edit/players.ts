@@ -70,6 +70,7 @@ export function mirrorDiagram(diagram: Diagram): Diagram {
     },
     steps: diagram.steps.map((step) => ({
       ...step,
+      ...(step.words ? { words: step.words.map((word) => ({ ...word, at: over(word.at) })) } : {}),
       moves: step.moves.map((move): Move => {
         if (move.kind === 'pass') return move
         if (move.kind === 'screen') return { ...move, to: over(move.to) }

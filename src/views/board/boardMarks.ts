@@ -13,6 +13,7 @@ import type { RulePack } from '@shared/court/rulePacks'
 import type { SceneNode } from '@shared/court/scene'
 import { ballAt, ghost, ourToken, theirToken, type TokenSize } from '@shared/court/tokens'
 import type { Verdict } from '@shared/court/walk/laneWindow'
+import { wordNode, wordPoint, wordSize } from '@shared/court/written'
 import type { Role } from '@shared/vocabulary'
 
 /** Something on the board that can be taken up. */
@@ -23,6 +24,8 @@ export interface Token {
   /** What it is and where, for readers. */
   label: string
   node: SceneNode
+  /** Half as wide and half as high as what is taken up, metres; a round one has none. */
+  reach?: { x: number; y: number }
 }
 
 /** A drawn move as it can be pointed at. */
@@ -67,7 +70,7 @@ export function drawnNodes(board: Board, windows: ReadonlyMap<string, Verdict>):
   ]
 }
 
-/** All that can be taken up: ours, the ball, theirs, and whoever walks in this step at the end of the walk. */
+/** All that can be taken up: words, ours, the ball, theirs, and whoever walks in this step at the end of the walk. */
 export function tokensOf(board: Board): Token[] {
   const { station, pack, pen, size } = board
   const { before, after, moves } = standingOf(board)
@@ -89,11 +92,29 @@ export function tokensOf(board: Board): Token[] {
     node: theirToken(metres(place), id, size, pen),
   }))
   return [
+    ...wordsOf(board),
     ...ours,
     ...(station === 'start' ? [] : endsOf(before, after, board)),
     ...theirs,
     ...ballOf(after, board),
   ]
+}
+
+/** Words lie under the players: who stands on one is taken up first. */
+function wordsOf({ diagram, station, pack, pen }: Board): Token[] {
+  if (station === 'start') return []
+  return (diagram.steps[station]?.words ?? []).map((word, index) => {
+    const at = wordPoint(word, pack, pen)
+    const { width, height } = wordSize(word.text, pen)
+    return {
+      id: `word-${index}`,
+      held: { kind: 'word', index },
+      at,
+      label: `“${word.text}”, written at ${placeWords(word.at)}`,
+      node: wordNode(word.text, at, pen),
+      reach: { x: width / 2 + pen.px(8), y: Math.max(height / 2, pen.px(18)) },
+    }
+  })
 }
 
 function endsOf(before: Standing, after: Standing, { pack, pen, size }: Board): Token[] {

@@ -14,6 +14,7 @@ export type Held =
   | { kind: 'ball' }
   | { kind: 'aim'; index: number }
   | { kind: 'bend'; index: number }
+  | { kind: 'word'; index: number }
 
 /** Something in hand: where it was taken up, and where it is. */
 export interface Hand {
@@ -43,9 +44,9 @@ export const takenUp = (held: Held, from: InMetres, pack: RulePack): Hand => ({
   moved: false,
 })
 
-/** The hand somewhere else. The ball and a bend go where they are pulled; players find the spots. */
+/** The hand somewhere else. The ball, a bend and a word go where they are pulled; players find the spots. */
 export function handAt(hand: Hand, at: InMetres, pack: RulePack, screen: boolean): Hand {
-  const free = hand.held.kind === 'ball' || hand.held.kind === 'bend'
+  const free = hand.held.kind !== 'player' && hand.held.kind !== 'aim'
   const { place, spot } = free
     ? { place: heldPlace(toPlace(pack, at)), spot: null }
     : snapped(toPlace(pack, at), pack)
@@ -96,6 +97,7 @@ export function editOfHand(hand: Hand, diagram: Diagram, station: Station, pack:
     return to && pullBall(diagram, station, to)
   }
   if (station === 'start') return null
+  if (held.kind === 'word') return { do: 'move-word', step: station, index: held.index, at: place }
   if (held.kind === 'aim') return { do: 'aim', step: station, index: held.index, to: place }
   const walked = stateAt(diagram, station).moves.find(({ index }) => index === held.index)
   if (!walked) return null

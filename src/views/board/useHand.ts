@@ -1,4 +1,4 @@
-import { onBeforeUnmount, shallowRef } from 'vue'
+import { nextTick, onBeforeUnmount, shallowRef } from 'vue'
 import type { Edit } from '@shared/court/edit/edits'
 import { pullBall } from '@shared/court/edit/gestures'
 import { inMetres } from '@shared/court/frame'
@@ -51,6 +51,8 @@ export function useHand(o: {
 
   /** Where tokens lie over each other, the one whose middle is nearest is meant. */
   function takeNearest(event: PointerEvent, token: Token): void {
+    // A word is taken anywhere along it, also where a player's middle is nearer.
+    if (token.held.kind === 'word') return take(event, token.held, token.at)
     const at = pointOf(event)
     const off = (one: Token) => (at ? Math.hypot(one.at.x - at.x, one.at.y - at.y) : 0)
     const near = o.tokens().reduce((best, one) => (off(one) < off(best) ? one : best), token)
@@ -109,6 +111,15 @@ export function useHand(o: {
   function keyOn(event: KeyboardEvent, held: Held, at: Token['at']): void {
     if (event.altKey || event.ctrlKey || event.metaKey) return
     const own = hand.value && JSON.stringify(hand.value.held) === JSON.stringify(held) ? hand.value : null
+    const step = o.board().station
+    if (held.kind === 'word' && event.key === 'Delete' && step !== 'start') {
+      letGo()
+      o.edit({ do: 'remove-word', step, index: held.index })
+      // The word in hand is gone: the keyboard goes on at what can be taken up first.
+      void nextTick(() => o.svg()?.querySelector<SVGElement>('[data-token]')?.focus())
+      event.preventDefault()
+      return event.stopPropagation()
+    }
     const moved = handByKey(own ?? takenUp(held, at, o.board().pack), event.key, o.board().pack)
     if (moved) hand.value = moved
     else if (event.key === 'Escape' && own) letGo()

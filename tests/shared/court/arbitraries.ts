@@ -41,6 +41,12 @@ export const anyMove: fc.Arbitrary<Move> = fc.oneof(
   fc.record({ kind: fc.constant('theirs' as const), who: defender, to: anyPlace, bend, beat }),
 ) as fc.Arbitrary<Move>
 
+/** Anything that may be written on the court. */
+export const anyWord = fc.record({
+  text: fc.string({ minLength: 1, maxLength: 24 }).filter((text) => text.trim() !== ''),
+  at: anyPlace,
+})
+
 /** Any diagram that the schema lets in, faults and all: twins, strangers, balls that nobody has. */
 export const anyDiagram = fc
   .record({
@@ -52,7 +58,14 @@ export const anyDiagram = fc
       ball: role,
     }),
     steps: fc.array(
-      fc.record({ title: fc.constant('A step'), moves: fc.array(anyMove, { maxLength: 12 }) }),
+      fc.record(
+        {
+          title: fc.constant('A step'),
+          moves: fc.array(anyMove, { maxLength: 12 }),
+          words: fc.array(anyWord, { minLength: 1, maxLength: 3 }),
+        },
+        { requiredKeys: ['title', 'moves'] },
+      ),
       {
         minLength: 1,
         maxLength: 6,

@@ -1,12 +1,13 @@
 import fc from 'fast-check'
 import { describe, expect, it } from 'vitest'
 import { counterScale, counterScene } from '@shared/court/counterScene'
+import { applyEdit } from '@shared/court/edit/edits'
 import { walkDiagram } from '@shared/court/diagramWalk'
 import { toMetres } from '@shared/court/frame'
 import { rulePack } from '@shared/court/rulePacks'
 import { anyDiagram, anyPack, anyZones } from './arbitraries'
 import { ACROSS } from './diagrams'
-import { READABLE, allNodes, discCentre, groupOf, groupsOf, pathsOf, textsOf } from './sceneParts'
+import { READABLE, allNodes, discCentre, groupOf, groupsOf, pathsOf, textsOf, typeBox } from './sceneParts'
 
 const fiba = rulePack('fiba')
 const scale = fc.double({ min: 4, max: 60, noNaN: true })
@@ -126,5 +127,31 @@ describe('counterScene', () => {
     expect(allNodes(groupOf(scene, 'theirs')?.nodes ?? []).length).toBeGreaterThan(0)
     const without = counterScene({ diagram: ACROSS, pack: fiba, pxPerMetre: 30, step: 1, defenders: false })
     expect(groupOf(without, 'theirs')?.nodes).toEqual([])
+  })
+
+  it('writes the words of a step on its court alone, whole by an endline, and not over the whole way', () => {
+    const texts = ['wait', 'go when she turns away']
+    const diagram = texts.reduce(
+      (one, text, i) => applyEdit(one, { do: 'add-word', step: 1, text, at: { x: 0.4 * i, y: 0.3 } }),
+      ACROSS,
+    )
+    const shown = (step: number | 'all', pxPerMetre = 30) =>
+      counterScene({ diagram, pack: fiba, pxPerMetre, step })
+    const nodes = textsOf(groupOf(shown(1), 'written')?.nodes ?? [])
+    expect(nodes.map(({ text, ink, halo }) => [text, ink, halo?.ink])).toEqual(
+      texts.map((text) => [text, 'graphite', 'floor']),
+    )
+    const [wait, go] = nodes.map((node) => {
+      const box = typeBox(node)
+      return { left: box.x, middle: box.x + box.width / 2 }
+    })
+    expect(wait?.left).toBeCloseTo(0)
+    expect(go?.middle).toBeCloseTo(toMetres(fiba, { x: 0.4, y: 0.3 }).x)
+    expect(shown(1).description).toMatch(/Written on the court: ‘wait’ at .* and ‘go when she turns away’ at/)
+    for (const step of [0, 2, 'all'] as const) {
+      expect(groupOf(shown(step), 'written')).toBeUndefined()
+      expect(textsOf(shown(step).nodes).some(({ text }) => texts.includes(text))).toBe(false)
+    }
+    expect(groupOf(shown(1, 4), 'written')).toBeUndefined()
   })
 })

@@ -1,6 +1,7 @@
 import fc from 'fast-check'
 import { describe, expect, it } from 'vitest'
 import { counterScale, counterScene } from '@shared/court/counterScene'
+import { applyEdit } from '@shared/court/edit/edits'
 import { inside, grown, overlaps } from '@shared/court/path'
 import { rulePack } from '@shared/court/rulePacks'
 import { walkScene } from '@shared/court/walkScene'
@@ -178,5 +179,16 @@ describe('a counter over an opponent', () => {
       const { view } = counterScene({ ...options, pxPerMetre: px })
       expect(view.width * px).toBeCloseTo(width, 0)
     }
+  })
+
+  it('has the words of the step that is walked on its ground', () => {
+    const diagram = applyEdit(ACROSS, { do: 'add-word', step: 1, text: 'go', at: { x: 0.3, y: 0.3 } })
+    const said = (step: number | null, part: 'ground' | 'moving') =>
+      textsOf(
+        walkScene({ diagram, pack: fiba, pxPerMetre: 30, standing: standingAt(across, 0), step, part }).nodes,
+      ).filter(({ text }) => text === 'go').length
+    expect([said(1, 'ground'), said(1, 'moving'), said(0, 'ground'), said(null, 'ground')]).toEqual([
+      1, 0, 0, 0,
+    ])
   })
 })

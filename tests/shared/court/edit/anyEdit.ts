@@ -39,5 +39,9 @@ export const anyEdit: fc.Arbitrary<Edit> = fc.oneof(
   fc.record({ do: fc.constant('remove-step' as const), step }),
   fc.record({ do: fc.constant('order-step' as const), step, by }),
   fc.record({ do: fc.constant('title' as const), step, title: fc.string({ maxLength: 90 }) }),
+  fc.record({ do: fc.constant('add-word' as const), step, text: fc.string({ maxLength: 40 }), at: place }),
+  fc.record({ do: fc.constant('change-word' as const), step, index, text: fc.string({ maxLength: 40 }) }),
+  fc.record({ do: fc.constant('move-word' as const), step, index, at: place }),
+  fc.record({ do: fc.constant('remove-word' as const), step, index }),
   fc.record({ do: fc.constant('mirror' as const) }),
 )
