@@ -30,24 +30,23 @@ describe('with every request of the page refused', () => {
     await page.route(/\/api\/(teams\/|session\/account)/, (route) => route.fulfill(broken))
   })
 
-  it.each(Object.keys(STAFF_PAGES) as StaffPage[])(
-    '%s says so, what is safe, and lets try again',
-    async (name) => {
-      await page.goto(addressOf(name))
-      await page
-        .getByText(/did not open/)
-        .first()
-        .waitFor()
-      const words = await mainWords(page)
-      expect(words).toMatch(
-        /safe|kept|holds the same|nothing (else )?was|still in|all the same|as (it|they) (was|were)/i,
-      )
-      expect(words).not.toMatch(/undefined|NaN|\[object|500|Internal/)
-      expect(await page.getByRole('button', { name: /again/ }).count()).toBeGreaterThan(0)
-      expect(await page.evaluate(() => document.documentElement.scrollWidth)).toBeLessThanOrEqual(390)
-      expect(await seriousFaults(page)).toEqual([])
-    },
-  )
+  // A drawing is begun on the page itself: nothing is fetched before the first move is kept.
+  const fetched = (Object.keys(STAFF_PAGES) as StaffPage[]).filter((name) => name !== 'a new counter')
+  it.each(fetched)('%s says so, what is safe, and lets try again', async (name) => {
+    await page.goto(addressOf(name))
+    await page
+      .getByText(/did not open/)
+      .first()
+      .waitFor()
+    const words = await mainWords(page)
+    expect(words).toMatch(
+      /safe|kept|holds the same|nothing (else )?was|still in|all the same|as (it|they) (was|were)/i,
+    )
+    expect(words).not.toMatch(/undefined|NaN|\[object|500|Internal/)
+    expect(await page.getByRole('button', { name: /again/ }).count()).toBeGreaterThan(0)
+    expect(await page.evaluate(() => document.documentElement.scrollWidth)).toBeLessThanOrEqual(390)
+    expect(await seriousFaults(page)).toEqual([])
+  })
 })
 
 describe('with nothing in it yet', () => {
