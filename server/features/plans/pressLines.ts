@@ -80,9 +80,7 @@ function pickupLine(read: OpponentRead): Line | null {
 }
 
 /** The lane they leave open most often on the trap; null when none was counted. */
-function roomOf(
-  read: OpponentRead,
-): { lane: NonNullable<Press['room']>; k: number; n: number } | null {
+function roomOf(read: OpponentRead): { lane: NonNullable<Press['room']>; k: number; n: number } | null {
   const [best] = LANES.flatMap(({ value }) => {
     const found = tendency(read, `leave-open:${value}`)
     return found && found.k > 0 ? [{ lane: value, k: found.k, n: found.n }] : []

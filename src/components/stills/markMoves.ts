@@ -17,7 +17,9 @@ const FACE = 0.05
 const part = (value: number) => Math.round(Math.min(1, Math.max(0, value)) * 1e4) / 1e4
 const within = ({ x, y }: MarkPoint): MarkPoint => ({ x: part(x), y: part(y) })
 const rounded = <T extends Record<string, number>>(mark: T): T =>
-  Object.fromEntries(Object.entries(mark).map(([key, value]) => [key, Math.floor(value * 1e4 + 1e-6) / 1e4])) as T
+  Object.fromEntries(
+    Object.entries(mark).map(([key, value]) => [key, Math.floor(value * 1e4 + 1e-6) / 1e4]),
+  ) as T
 const ringOf = (ring: NonNullable<StillMarks['ring']>) => mendRing(rounded(ring))
 const regionOf = (region: Region) => rounded(mendRegion(region))
 
