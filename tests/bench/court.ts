@@ -14,6 +14,8 @@ import { byTurns, line, processor, timingOf } from './measure'
 /** A frame of a screen that draws sixty a second, ms. */
 const FRAME = 16.7
 const STEPS = 12
+/** Moves of the pointer, and of the count. */
+const MOMENTS = 240
 const COUNTERS = 200
 
 const counters = DEMO_COUNTERS.map((counter) => CounterBody.parse(counter))
@@ -50,6 +52,9 @@ import { counterScale, counterScene } from '@shared/court/counterScene'
 import { rulePack } from '@shared/court/rulePacks'
 import CourtScene from '@/components/court/CourtScene.vue'
 import WalkCourt from '@/components/court/WalkCourt.vue'
+import { timeline } from '@shared/court/walk/timeline'
+import { passWindows, verdictsOf } from '@shared/court/walk/windows'
+import BoardCourt from '@/views/board/BoardCourt.vue'
 import LibraryTable from '@/views/counters/LibraryTable.vue'
 
 const pack = rulePack('fiba')
@@ -76,6 +81,28 @@ window.frames12 = async (diagram, zones, moments) => {
   app.unmount()
   return times
 }
+
+const pulls = []
+let began = 0
+window.addEventListener('pointermove', () => (began = performance.now()), true)
+window.addEventListener('pointermove', async () => {
+  await nextTick()
+  document.body.getBoundingClientRect()
+  pulls.push(performance.now() - began)
+})
+window.board12 = async (diagram, zones) => {
+  empty()
+  const walked = timeline(diagram, pack)
+  const windows = verdictsOf(passWindows(walked))
+  const props = { diagram, pack, timeline: walked, zones, windows, half: false, station: 5, picked: null }
+  createApp(() => h(BoardCourt, props)).mount(place())
+  await painted()
+  await painted()
+  const { x, y, width, height } = document.querySelector('[data-token] .round').getBoundingClientRect()
+  pulls.length = 0
+  return { x: x + width / 2, y: y + height / 2 }
+}
+window.pulled = () => pulls
 
 window.drawn = async (diagrams) => {
   empty()
@@ -150,9 +177,25 @@ async function inBrowser<T>(run: (page: Page) => Promise<T>): Promise<T> {
 }
 
 interface Bench {
+  board12: (diagram: unknown, zones: unknown) => Promise<{ x: number; y: number }>
+  pulled: () => number[]
   frames12: (diagram: unknown, zones: unknown, moments: number) => Promise<number[]>
   drawn: (diagrams: unknown) => Promise<{ ours: number; floor: number; scenes: number }>
   library: (rows: unknown) => Promise<{ ours: number; floor: number }>
+}
+
+/** A player is pulled about on the board with a real pointer; ms from each move to its layout. */
+async function pullOnBoard(page: Page, diagram: unknown, zones: unknown): Promise<number[]> {
+  const from = await page.evaluate(
+    ([drawing, traps]) => (window as unknown as Bench).board12(drawing, traps),
+    [diagram, zones] as const,
+  )
+  await page.mouse.move(from.x, from.y)
+  await page.mouse.down()
+  for (let i = 0; i < MOMENTS; i += 1)
+    await page.mouse.move(from.x + 160 * Math.sin(i / 9), from.y + 90 * Math.sin(i / 7))
+  await page.mouse.up()
+  return page.evaluate(() => (window as unknown as Bench).pulled())
 }
 
 /** Scenes built and drawn, a frame of a long walk with an opponent under it, and a library of two hundred. */
@@ -178,9 +221,10 @@ export async function benchCourt(rounds: number): Promise<string[]> {
   const built = await scenesBuilt(rounds)
   const shown = await inBrowser(async (page) => {
     const frames = await page.evaluate(
-      ([diagram, traps]) => (window as unknown as Bench).frames12(diagram, traps, 240),
-      [long, zones] as const,
+      ([diagram, traps, moments]) => (window as unknown as Bench).frames12(diagram, traps, moments),
+      [long, zones, MOMENTS] as const,
     )
+    const pulled = await pullOnBoard(page, long, zones)
     const drawn = []
     const library = []
     for (let round = 0; round < 5; round += 1) {
@@ -192,7 +236,7 @@ export async function benchCourt(rounds: number): Promise<string[]> {
       )
       library.push(await page.evaluate((all) => (window as unknown as Bench).library(all), rows))
     }
-    return { frames: timingOf(frames.slice(20)), drawn, library }
+    return { frames: timingOf(frames.slice(20)), pulled: timingOf(pulled.slice(20)), drawn, library }
   })
   const median = (list: { ours: number; floor: number }[], key: 'ours' | 'floor') =>
     timingOf(list.map((one) => one[key])).median
@@ -207,6 +251,7 @@ export async function benchCourt(rounds: number): Promise<string[]> {
       'ms',
     ),
     line(`frame of a ${STEPS}-step walk with overlays, p95`, shown.frames.p95, FRAME, 'ms'),
+    line(`frame of a pull on a ${STEPS}-step drawing with overlays, p95`, shown.pulled.p95, FRAME, 'ms'),
     line(
       `first paint of ${COUNTERS} counters`,
       median(shown.library, 'ours'),
