@@ -84,12 +84,13 @@ window.frames12 = async (diagram, zones, moments) => {
 
 const pulls = []
 let began = 0
-window.addEventListener('pointermove', () => (began = performance.now()), true)
-window.addEventListener('pointermove', async () => {
+// The board draws once a frame: the one callback stands before its own, the other after it.
+window.addEventListener('pointermove', () => requestAnimationFrame(() => (began = performance.now())), true)
+window.addEventListener('pointermove', () => requestAnimationFrame(async () => {
   await nextTick()
   document.body.getBoundingClientRect()
   pulls.push(performance.now() - began)
-})
+}))
 window.board12 = async (diagram, zones) => {
   empty()
   const walked = timeline(diagram, pack)
@@ -98,7 +99,9 @@ window.board12 = async (diagram, zones) => {
   createApp(() => h(BoardCourt, props)).mount(place())
   await painted()
   await painted()
-  const { x, y, width, height } = document.querySelector('[data-token] .round').getBoundingClientRect()
+  const tokens = [...document.querySelectorAll('[data-token] .round')].map((one) => one.getBoundingClientRect())
+  const free = tokens.find((box) => document.elementFromPoint(box.x + box.width / 2, box.y + box.height / 2)?.closest('[data-token]'))
+  const { x, y, width, height } = free
   pulls.length = 0
   return { x: x + width / 2, y: y + height / 2 }
 }
@@ -184,7 +187,7 @@ interface Bench {
   library: (rows: unknown) => Promise<{ ours: number; floor: number }>
 }
 
-/** A player is pulled about on the board with a real pointer; ms from each move to its layout. */
+/** A player is pulled about on the board with a real pointer; ms that each frame takes, layout with it. */
 async function pullOnBoard(page: Page, diagram: unknown, zones: unknown): Promise<number[]> {
   const from = await page.evaluate(
     ([drawing, traps]) => (window as unknown as Bench).board12(drawing, traps),
@@ -194,6 +197,7 @@ async function pullOnBoard(page: Page, diagram: unknown, zones: unknown): Promis
   await page.mouse.down()
   for (let i = 0; i < MOMENTS; i += 1)
     await page.mouse.move(from.x + 160 * Math.sin(i / 9), from.y + 90 * Math.sin(i / 7))
+  if ((await page.locator('.pulling').count()) === 0) throw new Error('nobody is pulled')
   await page.mouse.up()
   return page.evaluate(() => (window as unknown as Bench).pulled())
 }
