@@ -2,8 +2,8 @@ import { getTurns } from '@/api/choices'
 import { useAsync } from '@/composables/useAsync'
 import { turnSentence } from './turnWords'
 
-/** Columns that it is worked out for. */
-const COLUMNS = 3
+/** Counters that stand as columns from the start: the ones that a staff compares. */
+export const COLUMNS = 3
 
 /** What would turn the order, by counter: a reading that takes a moment, and the page is whole without it. */
 export function useTurns(options: {

@@ -7,8 +7,13 @@ import { getPlan } from '@/api/plans'
 
 /** The game that is played next; null when none is ahead. `now` in milliseconds since 1970. */
 export function nextGameOf(games: readonly GameRow[], now: number): GameRow | null {
+  return gamesAhead(games, now)[0] ?? null
+}
+
+/** The games that are still to be played, the next one first. */
+export function gamesAhead(games: readonly GameRow[], now: number): GameRow[] {
   const ahead = games.filter((game) => Date.parse(game.tipOff) > now)
-  return ahead.sort((one, two) => Date.parse(one.tipOff) - Date.parse(two.tipOff))[0] ?? null
+  return ahead.sort((one, two) => Date.parse(one.tipOff) - Date.parse(two.tipOff))
 }
 
 export interface NextGame {
