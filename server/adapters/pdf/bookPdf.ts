@@ -1,4 +1,3 @@
-import PDFDocument from 'pdfkit'
 import type { CounterBody } from '@shared/counters/schemas'
 import type { RulePack } from '@shared/court/rulePacks'
 import { countWords } from '@shared/court/walk/countWords'
@@ -7,11 +6,10 @@ import type { Paper } from '@shared/sheets/schemas'
 import { FAMILIES } from '@shared/counterWords'
 import { labelOf } from '@shared/vocabulary'
 import { column, footLine, linesUnder, rolesUnder, stepScenes, stepsBlock } from './bookBlocks'
-import { collected, plainTitle } from './collected'
-import { registerFonts } from './fonts'
+import { openFile, plainTitle } from './openFile'
 import type { Block } from './sheetBlocks'
 import type { Frame } from './sheetLayout'
-import { PAPERS, STYLES } from './sheetSizes'
+import { STYLES } from './sheetSizes'
 import { artifact, tagged, type Tag } from './tags'
 import { drawParagraph, fitted, paragraph, rule, widthOf, type Page } from './typeset'
 
@@ -36,28 +34,13 @@ const LEFT = 0.54
  * @returns the whole PDF file
  */
 export async function bookPdf(pages: readonly BookPage[], paper: Paper, owner: string): Promise<Buffer> {
-  const { size, margin } = PAPERS[paper]
-  const [width, height] = size
   const title = plainTitle(
     pages.length === 1 ? (pages[0]?.counter.name ?? 'Counter') : `The book of counters, ${owner}`,
   )
-  const doc = new PDFDocument({
-    size: [width, height],
-    margin: 0,
-    pdfVersion: '1.7',
-    tagged: true,
-    lang: 'en',
-    displayTitle: true,
-    info: { Title: title, Author: 'Overtop', Creator: 'Overtop', Producer: 'Overtop' },
-  })
-  const file = collected(doc)
-  registerFonts(doc)
-  const frame = { x: margin, y: margin, width: width - 2 * margin, height: height - 2 * margin }
-  const tree = doc.struct('Document', { title })
-  doc.addStructure(tree)
+  const { doc, file, frame, tree, nextPage } = openFile(title, paper)
   for (const [index, page] of pages.entries()) {
     if (index > 0) {
-      doc.addPage({ size: [width, height], margin: 0 })
+      nextPage()
       await new Promise((next) => setImmediate(next))
     }
     const number = pages.length === 1 ? '' : `${index + 1} of ${pages.length}`

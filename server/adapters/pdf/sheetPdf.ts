@@ -1,12 +1,9 @@
-import PDFDocument from 'pdfkit'
 import { sheetContent } from '@shared/sheets/content'
 import { fullerContent } from '@shared/sheets/fuller'
 import type { Paper, SheetView } from '@shared/sheets/schemas'
-import { collected, plainTitle } from './collected'
-import { registerFonts } from './fonts'
+import { openFile, plainTitle } from './openFile'
 import { layOutFuller } from './fullerLayout'
 import { layOut, type Frame } from './sheetLayout'
-import { PAPERS } from './sheetSizes'
 import type { Tag } from './tags'
 import type { Page } from './typeset'
 
@@ -39,28 +36,13 @@ export async function copiesPdf(
   paper: Paper,
   copies?: number,
 ): Promise<Buffer> {
-  const { size, margin } = PAPERS[paper]
-  const [width, height] = size
   const [first] = pages
   if (!first) throw new Error('a file of copies needs one at least')
   const { title: name, when } = sheetContent(first.view)
   const title = `${plainTitle(name)}, ${when}`
-  const doc = new PDFDocument({
-    size: [width, height],
-    margin: 0,
-    pdfVersion: '1.7',
-    tagged: true,
-    lang: 'en',
-    displayTitle: true,
-    info: { Title: title, Author: 'Overtop', Creator: 'Overtop', Producer: 'Overtop' },
-  })
-  const file = collected(doc)
-  registerFonts(doc)
-  const frame = { x: margin, y: margin, width: width - 2 * margin, height: height - 2 * margin }
-  const tree = doc.struct('Document', { title })
-  doc.addStructure(tree)
+  const { doc, file, frame, tree, nextPage } = openFile(title, paper)
   pages.forEach(({ view, copy }, index) => {
-    if (index > 0) doc.addPage({ size: [width, height], margin: 0 })
+    if (index > 0) nextPage()
     drawing(doc, view, { copy, copies }, frame)(tree)
   })
   tree.end()
